@@ -1,0 +1,4 @@
+export * from './people';
+export * from './homes';
+export * from './work';
+export * from './mail';

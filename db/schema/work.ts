@@ -1,0 +1,91 @@
+import { sql } from 'drizzle-orm';
+import { check, index, integer, primaryKey, real, sqliteTable, text } from 'drizzle-orm/sqlite-core';
+import { type FilmLife, type WorkItem } from '../../lib/care/types';
+import { type Explanation } from '../../lib/explain';
+import { finishes, keysOf, sealants, stainBases, workKinds } from '../../lib/schemas/vocabulary';
+import { createdAt, id, instant } from './columns';
+import { home, wall } from './homes';
+import { user } from './people';
+
+/** Work that was done: logged by somebody, or recalled when the home was set up. */
+export const workRecord = sqliteTable(
+  'work_record',
+  {
+    id: id(),
+    homeId: text('home_id').notNull().references(() => home.id, { onDelete: 'cascade' }),
+    kind: text('kind', { enum: keysOf(workKinds) }).notNull(),
+    doneOn: text('done_on').notNull(),
+    origin: text('origin', { enum: ['logged', 'recalled'] }).notNull(),
+    product: text('product'),
+    amountL: real('amount_l'),
+    costCents: integer('cost_cents'),
+    note: text('note'),
+    finish: text('finish', { enum: keysOf(finishes) }),
+    stainBase: text('stain_base', { enum: keysOf(stainBases) }),
+    colorHex: text('color_hex'),
+    sealant: text('sealant', { enum: keysOf(sealants) }),
+    /** Sent by the form; the same submission arriving twice makes one record. */
+    submissionKey: text('submission_key').notNull().unique(),
+    createdBy: text('created_by').references(() => user.id, { onDelete: 'set null' }),
+    createdAt: createdAt(),
+    removedAt: instant('removed_at'),
+    removedBy: text('removed_by').references(() => user.id, { onDelete: 'set null' }),
+  },
+  (t) => [
+    index('work_record_home').on(t.homeId, t.doneOn),
+    check('work_record_day', sql`${t.doneOn} glob '[12][0-9][0-9][0-9]-[01][0-9]-[0-3][0-9]'`),
+    check('work_record_amounts', sql`(${t.amountL} is null or ${t.amountL} >= 0) and (${t.costCents} is null or ${t.costCents} >= 0)`),
+  ],
+);
+
+export const workRecordWall = sqliteTable(
+  'work_record_wall',
+  {
+    workRecordId: text('work_record_id').notNull().references(() => workRecord.id, { onDelete: 'cascade' }),
+    wallId: text('wall_id').notNull().references(() => wall.id, { onDelete: 'cascade' }),
+  },
+  (t) => [primaryKey({ columns: [t.workRecordId, t.wallId] }), index('work_record_wall_wall').on(t.wallId)],
+);
+
+/** An owner's own rule for one kind of work on one wall, in place of the computed one. */
+export const careRule = sqliteTable(
+  'care_rule',
+  {
+    wallId: text('wall_id').notNull().references(() => wall.id, { onDelete: 'cascade' }),
+    kind: text('kind', { enum: keysOf(workKinds) }).notNull(),
+    rule: text('rule').notNull(),
+    startOn: text('start_on').notNull(),
+    createdBy: text('created_by').references(() => user.id, { onDelete: 'set null' }),
+    createdAt: createdAt(),
+  },
+  (t) => [primaryKey({ columns: [t.wallId, t.kind] })],
+);
+
+/** Coat and seal life of a wall as last planned. */
+export const wallPlan = sqliteTable('wall_plan', {
+  wallId: text('wall_id').primaryKey().references(() => wall.id, { onDelete: 'cascade' }),
+  coat: text('coat', { mode: 'json' }).$type<FilmLife>().notNull(),
+  seal: text('seal', { mode: 'json' }).$type<FilmLife>().notNull(),
+});
+
+/** The next work of each kind on each wall as last planned. Dates are calendar days at the home. */
+export const workItem = sqliteTable(
+  'work_item',
+  {
+    wallId: text('wall_id').notNull().references(() => wall.id, { onDelete: 'cascade' }),
+    kind: text('kind', { enum: keysOf(workKinds) }).notNull(),
+    homeId: text('home_id').notNull().references(() => home.id, { onDelete: 'cascade' }),
+    rule: text('rule'),
+    startOn: text('start_on'),
+    dueOn: text('due_on').notNull(),
+    opensOn: text('opens_on').notNull(),
+    closesOn: text('closes_on').notNull(),
+    moved: text('moved').$type<WorkItem['window']['moved']>().notNull(),
+    lapsesOn: text('lapses_on'),
+    basis: text('basis').$type<WorkItem['basis']>().notNull(),
+    lifeMonths: integer('life_months'),
+    because: text('because').notNull(),
+    explanation: text('explanation', { mode: 'json' }).$type<Explanation>().notNull(),
+  },
+  (t) => [primaryKey({ columns: [t.wallId, t.kind] }), index('work_item_home').on(t.homeId), index('work_item_opens').on(t.opensOn)],
+);
