@@ -29,16 +29,21 @@ export type RoleVerb = keyof typeof rolePolicy;
 export const homeVerbs = Object.keys(homePolicy) as HomeVerb[];
 export const roleVerbs = Object.keys(rolePolicy) as RoleVerb[];
 
+export const isRoleVerb = (verb: string): verb is RoleVerb => verb in rolePolicy;
+
 /** What `can` needs to know of a record: the actor's membership in its home, and who made the record. */
 export type Subject = { membership?: Membership | undefined; createdBy?: string | null | undefined };
 
 /** The whole policy. Somebody who logged a piece of work may take it back; the rest is in the two tables. */
 export function can(actor: Actor, verb: HomeVerb | RoleVerb, subject: Subject = {}): boolean {
-  if (verb in rolePolicy) return (rolePolicy[verb as RoleVerb] as Role[]).includes(actor.role);
+  if (isRoleVerb(verb)) return (rolePolicy[verb] as Role[]).includes(actor.role);
   if (!subject.membership) return false;
   if (verb === 'work.remove' && subject.createdBy === actor.id) return true;
-  return (homePolicy[verb as HomeVerb] as Membership[]).includes(subject.membership);
+  return (homePolicy[verb] as Membership[]).includes(subject.membership);
 }
+
+/** Stands for whoever is not signed in, where that is allowed. */
+export const nobody: Actor = { id: '', role: 'homeowner', email: '', name: null };
 
 /** Thrown by the data layer; wrappers and pages turn it into 404 or 403. */
 export class Refused extends Error {

@@ -2,7 +2,7 @@ import path from 'node:path';
 import { defineConfig } from 'vitest/config';
 
 const root = path.resolve(__dirname, '..');
-const alias = { '@': root };
+const alias = { '@': root, 'server-only': path.join(__dirname, 'setup', 'server-only.ts') };
 const shared = { globals: false, setupFiles: ['tests/setup/no-console-error.ts'], restoreMocks: true };
 
 export default defineConfig({

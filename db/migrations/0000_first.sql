@@ -192,6 +192,7 @@ CREATE TABLE `work_item` (
 	`closes_on` text NOT NULL,
 	`moved` text NOT NULL,
 	`lapses_on` text,
+	`remind_on` text,
 	`basis` text NOT NULL,
 	`life_months` integer,
 	`because` text NOT NULL,
@@ -203,6 +204,7 @@ CREATE TABLE `work_item` (
 --> statement-breakpoint
 CREATE INDEX `work_item_home` ON `work_item` (`home_id`);--> statement-breakpoint
 CREATE INDEX `work_item_opens` ON `work_item` (`opens_on`);--> statement-breakpoint
+CREATE INDEX `work_item_remind` ON `work_item` (`remind_on`);--> statement-breakpoint
 CREATE TABLE `work_record` (
 	`id` text PRIMARY KEY NOT NULL,
 	`home_id` text NOT NULL,

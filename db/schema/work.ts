@@ -82,10 +82,12 @@ export const workItem = sqliteTable(
     closesOn: text('closes_on').notNull(),
     moved: text('moved').$type<WorkItem['window']['moved']>().notNull(),
     lapsesOn: text('lapses_on'),
+    /** The day on which the next reminder stage begins; null when none is left. Written at planning and after each run. */
+    remindOn: text('remind_on'),
     basis: text('basis').$type<WorkItem['basis']>().notNull(),
     lifeMonths: integer('life_months'),
     because: text('because').notNull(),
     explanation: text('explanation', { mode: 'json' }).$type<Explanation>().notNull(),
   },
-  (t) => [primaryKey({ columns: [t.wallId, t.kind] }), index('work_item_home').on(t.homeId), index('work_item_opens').on(t.opensOn)],
+  (t) => [primaryKey({ columns: [t.wallId, t.kind] }), index('work_item_home').on(t.homeId), index('work_item_opens').on(t.opensOn), index('work_item_remind').on(t.remindOn)],
 );

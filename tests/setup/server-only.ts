@@ -1,0 +1,2 @@
+/** Stands in for the marker package, which only a React server bundle may load. */
+export {};
