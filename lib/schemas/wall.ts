@@ -1,0 +1,95 @@
+import { z } from 'zod';
+import { isCalendarDay } from '@/lib/calendar';
+import { checkbox, choice, neededText, readLength, shortText } from '@/lib/schemas/measures';
+import { finishes, keysOf, sealants, shades, stainBases, textures, unitSystems } from '@/lib/schemas/vocabulary';
+
+/** Plausible sizes of a house's parts, m. Our rule. */
+export const sizes = {
+  width: { min: 0.5, max: 60, what: 'Width' },
+  height: { min: 0.5, max: 15, what: 'Height' },
+  gable: { min: 0, max: 10, what: 'Gable height', optional: true },
+  eaveDepth: { min: 0, max: 6, what: 'Eave depth', optional: true },
+  eaveDrop: { min: 0, max: 3, what: 'Eave drop', optional: true },
+  openingWidth: { min: 0.1, max: 12, what: 'Width' },
+  openingHeight: { min: 0.1, max: 6, what: 'Height' },
+} as const;
+
+export const azimuth = z.coerce
+  .number({ error: 'Direction should be a number of degrees, 0 to 359.' })
+  .min(0, 'Direction should be 0 to 359 degrees.')
+  .max(360, 'Direction should be 0 to 359 degrees.')
+  .transform((degrees) => degrees % 360);
+
+/** A day in the past that may also be "not known". An empty date without that answer is a fault. */
+export const recalledDay = (what: string) =>
+  z.object({ on: z.string().trim().optional(), notKnown: checkbox }).transform((answer, ctx) => {
+    if (answer.notKnown) return null;
+    if (!answer.on) {
+      ctx.addIssue({ code: 'custom', path: ['on'], message: `Say when it was last ${what}, or choose "Not known".` });
+      return null;
+    }
+    if (!isCalendarDay(answer.on)) {
+      ctx.addIssue({ code: 'custom', path: ['on'], message: 'This day does not exist. Write it like 2021-06-15.' });
+      return null;
+    }
+    return answer.on;
+  });
+
+const opening = z.object({
+  kind: z.enum(['window', 'door']),
+  width: z.string().optional(),
+  height: z.string().optional(),
+  count: z.coerce.number({ error: 'How many?' }).int('How many? A whole number.').min(1, 'At least 1, or remove the row.').max(50, 'At most 50.'),
+});
+
+export const coatSchema = z.object({
+  finish: choice(keysOf(finishes), 'a finish'),
+  stainBase: choice(keysOf(stainBases), 'oil or waterborne'),
+  colorHex: z.string().regex(/^#[0-9a-fA-F]{6}$/, 'Choose a color.'),
+  colorName: shortText('The color name', 60),
+  texture: choice(keysOf(textures), 'a surface'),
+  sealant: choice(keysOf(sealants), 'a caulk'),
+});
+
+const wallFields = coatSchema.extend({
+  units: z.enum(keysOf(unitSystems)),
+  name: neededText('A name', 40),
+  azimuthDeg: azimuth,
+  width: z.string().optional(),
+  height: z.string().optional(),
+  gableHeight: z.string().optional(),
+  eaveDepth: z.string().optional(),
+  eaveDrop: z.string().optional(),
+  shade: choice(keysOf(shades), 'what stands in front'),
+  shadeHeightDeg: z.coerce.number({ error: 'Height of the shade should be a number of degrees.' }).min(0).max(80, 'At most 80 degrees.').default(0),
+  weatherSide: checkbox,
+  openings: z.record(z.string().regex(/^\d+$/), opening).default({}),
+  stained: recalledDay('stained'),
+  caulked: recalledDay('caulked'),
+});
+
+/** The wall form: lengths as typed in the person's units; out come metres. */
+export const wallSchema = wallFields.transform((form, ctx) => {
+  const { units, width, height, gableHeight, eaveDepth, eaveDrop, openings, ...rest } = form;
+  const read = (text: string | undefined, size: keyof typeof sizes, field: string) => readLength(text, units, sizes[size], ctx, field.split('.'));
+  const wall = {
+    ...rest,
+    widthM: read(width, 'width', 'width'),
+    heightM: read(height, 'height', 'height'),
+    gableHeightM: read(gableHeight, 'gable', 'gableHeight'),
+    eaveDepthM: read(eaveDepth, 'eaveDepth', 'eaveDepth'),
+    eaveDropM: read(eaveDrop, 'eaveDrop', 'eaveDrop'),
+    openings: Object.entries(openings).map(([row, one]) => ({
+      kind: one.kind,
+      count: one.count,
+      widthM: read(one.width, 'openingWidth', `openings.${row}.width`),
+      heightM: read(one.height, 'openingHeight', `openings.${row}.height`),
+    })),
+  };
+  const gross = wall.widthM * (wall.heightM + wall.gableHeightM / 2);
+  const holes = wall.openings.reduce((sum, one) => sum + one.widthM * one.heightM * one.count, 0);
+  if (gross > 0 && holes >= gross) ctx.addIssue({ code: 'custom', path: ['openings'], message: 'The doors and windows are larger than the wall.' });
+  return wall;
+});
+
+export type WallInput = z.output<typeof wallSchema>;
