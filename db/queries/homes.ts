@@ -1,0 +1,69 @@
+import { asc, count, eq, sql } from 'drizzle-orm';
+import { type Actor } from '@/lib/permissions';
+import { type Membership } from '@/lib/schemas/vocabulary';
+import { database, transaction } from '../client';
+import { demand, homeFor, memberOf } from '../scope';
+import { home, homeMember, wall, workItem } from '../schema';
+
+export type HomeRow = typeof home.$inferSelect;
+type HomeFacts = Omit<typeof home.$inferInsert, 'id' | 'createdBy' | 'createdAt' | 'revision' | 'plannedAt' | 'replanOn' | 'archivedAt'>;
+
+export type HomeSummary = { home: HomeRow; membership: Membership; nextOpensOn: string | null; wallCount: number };
+
+/** Every home the actor may see, by name, with the day its next work opens. */
+export function listHomes(actor: Actor): HomeSummary[] {
+  const next = database()
+    .select({ homeId: workItem.homeId, opensOn: sql<string>`min(${workItem.opensOn})`.as('next_opens_on') })
+    .from(workItem)
+    .groupBy(workItem.homeId)
+    .as('next');
+  const walls = database()
+    .select({ homeId: wall.homeId, walls: count().as('walls') })
+    .from(wall)
+    .where(sql`${wall.removedAt} is null`)
+    .groupBy(wall.homeId)
+    .as('walls_of');
+  return database()
+    .select({ home, membership: homeMember.membership, nextOpensOn: next.opensOn, wallCount: sql<number>`coalesce(${walls.walls}, 0)` })
+    .from(home)
+    .innerJoin(homeMember, eq(homeMember.homeId, home.id))
+    .leftJoin(next, eq(next.homeId, home.id))
+    .leftJoin(walls, eq(walls.homeId, home.id))
+    .where(memberOf(actor))
+    .orderBy(asc(home.name))
+    .all();
+}
+
+/** Makes a home owned by the actor. The caller adds walls and plans it in the same transaction. */
+export function createHome(actor: Actor, facts: HomeFacts): HomeRow {
+  demand(actor, 'home.create');
+  return transaction(() => {
+    const row = database().insert(home).values({ ...facts, createdBy: actor.id }).returning().get();
+    database().insert(homeMember).values({ homeId: row.id, userId: actor.id, membership: 'owner', addedBy: actor.id }).run();
+    return row;
+  });
+}
+
+export function updateHome(actor: Actor, homeId: string, facts: Partial<HomeFacts>): HomeRow {
+  homeFor(actor, homeId, 'home.edit');
+  return database().update(home).set(facts).where(eq(home.id, homeId)).returning().get();
+}
+
+/** Takes a home out of every list. Nothing is deleted. */
+export function archiveHome(actor: Actor, homeId: string, now: Date): void {
+  homeFor(actor, homeId, 'home.archive');
+  database().update(home).set({ archivedAt: now }).where(eq(home.id, homeId)).run();
+}
+
+/** Brings back a home that its owner took out. */
+export function restoreHome(actor: Actor, homeId: string): boolean {
+  const owned = database()
+    .select({ id: home.id })
+    .from(home)
+    .innerJoin(homeMember, eq(homeMember.homeId, home.id))
+    .where(sql`${home.id} = ${homeId} and ${homeMember.userId} = ${actor.id} and ${homeMember.membership} = 'owner' and ${home.archivedAt} is not null`)
+    .get();
+  if (!owned) return false;
+  database().update(home).set({ archivedAt: null }).where(eq(home.id, homeId)).run();
+  return true;
+}

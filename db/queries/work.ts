@@ -1,0 +1,77 @@
+import { and, desc, eq, inArray, isNull } from 'drizzle-orm';
+import { type Actor, Refused } from '@/lib/permissions';
+import { type LogWorkInput } from '@/lib/schemas/work';
+import { database, transaction } from '../client';
+import { homeFor, recordFor } from '../scope';
+import { user, wall, workRecord, workRecordWall } from '../schema';
+
+export type RecordRow = typeof workRecord.$inferSelect;
+export type RecordDetail = RecordRow & { wallIds: string[]; byName: string | null };
+
+/** Every record of a home that was not taken back, newest work first, with its walls and who wrote it. The caller has checked the home. */
+export function recordsOfHome(homeId: string): RecordDetail[] {
+  const rows = database()
+    .select({ record: workRecord, wallId: workRecordWall.wallId, byName: user.name })
+    .from(workRecord)
+    .innerJoin(workRecordWall, eq(workRecordWall.workRecordId, workRecord.id))
+    .leftJoin(user, eq(user.id, workRecord.createdBy))
+    .where(and(eq(workRecord.homeId, homeId), isNull(workRecord.removedAt)))
+    .orderBy(desc(workRecord.doneOn), desc(workRecord.createdAt), desc(workRecord.id))
+    .all();
+  const byId = new Map<string, RecordDetail>();
+  for (const { record, wallId, byName } of rows) {
+    const detail = byId.get(record.id) ?? { ...record, wallIds: [], byName };
+    detail.wallIds.push(wallId);
+    byId.set(record.id, detail);
+  }
+  return [...byId.values()];
+}
+
+export type LogResult = { record: RecordRow; isNew: boolean };
+
+/**
+ * Logs a piece of work. The same submission arriving again returns the record that it made.
+ * Throws `Refused` when a wall is not (or no longer) one of this home's.
+ */
+export function logWork(actor: Actor, input: Omit<LogWorkInput, 'homeId'> & { homeId: string }): LogResult {
+  homeFor(actor, input.homeId, 'work.log');
+  return transaction(() => {
+    const { wallIds, ...facts } = input;
+    const standing = database()
+      .select({ id: wall.id })
+      .from(wall)
+      .where(and(eq(wall.homeId, input.homeId), isNull(wall.removedAt), inArray(wall.id, wallIds)))
+      .all();
+    if (standing.length !== wallIds.length) throw new Refused('not found', 'A wall that you chose');
+    const made = database()
+      .insert(workRecord)
+      .values({ ...facts, origin: 'logged', createdBy: actor.id })
+      .onConflictDoNothing({ target: workRecord.submissionKey })
+      .returning()
+      .get();
+    if (!made) return { record: earlierSubmission(actor, input.submissionKey), isNew: false };
+    database().insert(workRecordWall).values(wallIds.map((wallId) => ({ workRecordId: made.id, wallId }))).run();
+    return { record: made, isNew: true };
+  });
+}
+
+function earlierSubmission(actor: Actor, submissionKey: string): RecordRow {
+  const row = database().select().from(workRecord).where(and(eq(workRecord.submissionKey, submissionKey), eq(workRecord.createdBy, actor.id))).get();
+  if (!row) throw new Refused('not found', 'That submission');
+  return row;
+}
+
+/** Takes a logged record back; it stays in the table with who and when. Returns its home. */
+export function removeRecord(actor: Actor, recordId: string, now: Date): RecordRow {
+  const { record } = recordFor(actor, recordId, 'work.remove');
+  database().update(workRecord).set({ removedAt: now, removedBy: actor.id }).where(eq(workRecord.id, recordId)).run();
+  return record;
+}
+
+/** Undoes `removeRecord`, for whoever could have removed it. */
+export function restoreRecord(actor: Actor, recordId: string): RecordRow {
+  const row = database().select().from(workRecord).where(eq(workRecord.id, recordId)).get();
+  if (!row?.removedAt) throw new Refused('not found', 'That work record');
+  homeFor(actor, row.homeId, row.removedBy === actor.id ? 'work.log' : 'work.remove');
+  return database().update(workRecord).set({ removedAt: null, removedBy: null }).where(eq(workRecord.id, recordId)).returning().get();
+}
