@@ -1,0 +1,43 @@
+import { type CalendarDay } from '@/lib/calendar';
+import { keysOf, type WorkKind, workKinds } from '@/lib/schemas/vocabulary';
+
+/** From the most to the least urgent. */
+export const reminderStages = { overdue: 0, open: 1, buy: 2, book: 3 } as const;
+export type ReminderStage = keyof typeof reminderStages;
+
+const verbs: Record<WorkKind, string> = { restain: 'restain', recaulk: 'recaulk', wash: 'wash', walkaround: 'walk around' };
+
+type Words = { headline: string; advice: string; inSubject: string };
+
+/** What each stage says of each kind of work. */
+export function stageWords(stage: ReminderStage, kind: WorkKind): Words {
+  const noun = workKinds[kind].toLowerCase();
+  const look = kind === 'walkaround';
+  switch (stage) {
+    case 'book':
+      return { headline: 'time to book', advice: 'Ask a crew for days in this window now, or set days of your own aside.', inSubject: `book the ${noun}` };
+    case 'buy':
+      return { headline: 'time to buy', advice: 'Buy what it takes, so that it stands ready when the window opens. The plan says how much.', inSubject: `buy for the ${noun}` };
+    case 'open':
+      return {
+        headline: 'can be done now',
+        advice: look ? 'Walk around the house and answer a few questions for this wall; the answers move its dates.' : 'The window is open. Pick a dry, mild day.',
+        inSubject: `time to ${verbs[kind]}`,
+      };
+    case 'overdue':
+      return {
+        headline: 'overdue',
+        advice: look ? 'Nobody has looked at this wall yet; without a look its dates are a guess.' : 'Do it in the next dry spell, or look at the wall and log what you find.',
+        inSubject: `${noun} is overdue`,
+      };
+  }
+}
+
+type Ranked = { stage: ReminderStage; kind: WorkKind; dueOn: CalendarDay };
+const kindOrder = keysOf(workKinds);
+
+/** Overdue first; then restain before recaulk, wash and walkaround; then the earlier date. */
+export function mostUrgent<T extends Ranked>(items: readonly T[]): T | undefined {
+  const rank = (it: Ranked) => reminderStages[it.stage] * 10 + kindOrder.indexOf(it.kind);
+  return [...items].sort((a, b) => rank(a) - rank(b) || (a.dueOn < b.dueOn ? -1 : a.dueOn > b.dueOn ? 1 : 0))[0];
+}

@@ -1,0 +1,43 @@
+import { type z } from 'zod';
+import { reminderMail } from './kinds/reminder';
+import { resetMail } from './kinds/reset';
+import { sharedMail } from './kinds/shared';
+import { signInMail } from './kinds/sign-in';
+import { verifyMail } from './kinds/verify';
+import { type MailDefinition, oneLine, type Rendered } from './letter';
+import { writeHtml } from './write-html';
+import { writeText } from './write-text';
+
+/** Every mail the application sends. A new one: a file in kinds/ and a line here. */
+const definitions = {
+  reminder: reminderMail,
+  verify: verifyMail,
+  'sign-in': signInMail,
+  reset: resetMail,
+  shared: sharedMail,
+};
+
+export type MailKind = keyof typeof definitions;
+type Definitions = typeof definitions;
+/** What the outbox keeps of a mail until it is sent. */
+export type QueuedProps<K extends MailKind> = z.input<NonNullable<Definitions[K]['queued']>>;
+
+const definitionOf = (kind: string): MailDefinition => {
+  if (!(kind in definitions)) throw new TypeError(`no such mail: ${kind}`);
+  return definitions[kind as MailKind] as unknown as MailDefinition;
+};
+
+export const isSecret = (kind: string): boolean => definitionOf(kind).secret === true;
+
+/** Throws a ZodError when the props are not what the mail's kind asks for. */
+export const checkQueuedProps = (kind: string, props: unknown): Record<string, unknown> => {
+  const definition = definitionOf(kind);
+  return (definition.queued ?? definition.props).parse(props) as Record<string, unknown>;
+};
+
+/** Subject, HTML and plain text of a mail. Throws when the props do not fit its kind. */
+export function renderMail(kind: string, props: unknown): Rendered {
+  const definition = definitionOf(kind);
+  const letter = definition.write(definition.props.parse(props));
+  return { subject: oneLine(letter.subject), html: writeHtml(letter), text: writeText(letter) };
+}
