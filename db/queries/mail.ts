@@ -1,4 +1,4 @@
-import { and, asc, eq, lte, or } from 'drizzle-orm';
+import { and, asc, eq, lte, or, sql } from 'drizzle-orm';
 import { backOffMs, mostAttempts } from '@/lib/mail/back-off';
 import { checkQueuedProps, isSecret, type MailKind, type QueuedProps } from '@/lib/mail/registry';
 import { database, transaction } from '../client';
@@ -42,8 +42,12 @@ export function enqueueMail<K extends MailKind>(wanted: NewMail<K>): string {
 
 export type ClaimedMail = MailRow & { leaseToken: string };
 
+/** The literal list lets SQLite use the partial index `mail_open`. */
 const open = (now: Date) =>
-  or(and(eq(mail.state, 'queued'), lte(mail.nextAttemptAt, now)), and(eq(mail.state, 'sending'), lte(mail.leaseUntil, now)));
+  and(
+    sql`${mail.state} in ('queued', 'sending')`,
+    or(and(eq(mail.state, 'queued'), lte(mail.nextAttemptAt, now)), and(eq(mail.state, 'sending'), lte(mail.leaseUntil, now))),
+  );
 
 /**
  * Takes up to `limit` mails that are due, oldest first, for this caller alone: one immediate transaction, so that two
