@@ -30,7 +30,7 @@ export function aboutRange(from: CalendarDay, to: CalendarDay): string {
 
 const count = (n: number, unit: string) => `${n} ${unit}${n === 1 ? '' : 's'}`;
 
-/** 'today', 'tomorrow', 'in 5 weeks', '3 months ago'; days up to 13, then weeks up to 12, months up to 23, then years. */
+/** 'today', 'tomorrow', 'in 5 weeks', '3 months ago'; days up to 13, then weeks up to 13, months up to 23, then years. */
 export function fromToday(day: CalendarDay, today: CalendarDay): string {
   const days = daysBetween(today, day);
   if (days === 0) return 'today';

@@ -41,3 +41,5 @@ export function mostUrgent<T extends Ranked>(items: readonly T[]): T | undefined
   const rank = (it: Ranked) => reminderStages[it.stage] * 10 + kindOrder.indexOf(it.kind);
   return [...items].sort((a, b) => rank(a) - rank(b) || (a.dueOn < b.dueOn ? -1 : a.dueOn > b.dueOn ? 1 : 0))[0];
 }
+
+export const isReminderStage = (text: string): text is ReminderStage => text in reminderStages;

@@ -5,7 +5,7 @@ import { cautionsDefer, cautionsFor } from '@/lib/cautions';
 import { keysOf, memberships, sealants, stainBases, unitSystems, workKinds } from '@/lib/schemas/vocabulary';
 import { type Course, defineMail, type Part } from '../letter';
 import { areaInWords } from './area-words';
-import { mostUrgent, type ReminderStage, reminderStages, stageWords } from './reminder-stages';
+import { mostUrgent, reminderStages, stageWords } from './reminder-stages';
 
 const item = z.object({
   kind: z.enum(keysOf(workKinds)),
@@ -18,7 +18,7 @@ const item = z.object({
 });
 export type ReminderItem = z.output<typeof item>;
 
-const wall = z.object({ name: z.string().min(1), areaM2: z.number().positive(), items: z.array(item) });
+const wall = z.object({ name: z.string().min(1), areaM2: z.number().nonnegative(), items: z.array(item) });
 
 /** Walls in plan order, also those with nothing to do: every wall keeps its place. */
 export const reminderProps = z.object({
@@ -103,4 +103,3 @@ const footer = (props: ReminderProps): Part[] => [
   { as: 'link', label: 'Turn reminders off or change your address', url: props.settingsUrl },
 ];
 
-export type { ReminderStage };

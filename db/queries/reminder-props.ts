@@ -1,0 +1,71 @@
+import { and, eq } from 'drizzle-orm';
+import { dayIn } from '@/lib/calendar';
+import { type ReminderItem, type ReminderProps } from '@/lib/mail/kinds/reminder';
+import { isReminderStage } from '@/lib/mail/kinds/reminder-stages';
+import { logUrl, planUrl, settingsUrl } from '@/lib/mail/links';
+import { database } from '../client';
+import { delivery, home, homeMember, user, workItem } from '../schema';
+import { type MailRow } from './mail';
+import { wantsReminders } from './reminders';
+import { type WallDetail, wallsOfHome } from './walls';
+
+type Of = Pick<MailRow, 'id' | 'userId' | 'homeId'>;
+
+/**
+ * What a reminder says, from the plan as it stands now: work that was logged or moved since the mail was queued is left out.
+ * `nothing` (with the reason) when nobody should get it any more.
+ */
+export function reminderPropsOf(mail: Of, site: string, now: Date): ReminderProps | { nothing: string } {
+  const { userId, homeId } = mail;
+  if (!userId || !homeId) return { nothing: 'The person or the home is gone.' };
+  const who = database()
+    .select({ home, membership: homeMember.membership, personName: user.name, units: user.units })
+    .from(homeMember)
+    .innerJoin(home, eq(home.id, homeMember.homeId))
+    .innerJoin(user, eq(user.id, homeMember.userId))
+    .where(and(eq(homeMember.homeId, homeId), eq(homeMember.userId, userId), wantsReminders()))
+    .get();
+  if (!who) return { nothing: 'The person no longer gets reminders for this home.' };
+  const items = standingItems(mail.id, site, homeId);
+  const details = wallsOfHome(homeId);
+  const concerned = details.filter(({ wall }) => items.some((item) => item.wallId === wall.id));
+  if (concerned.length === 0) return { nothing: 'Everything in it was done or moved before it was sent.' };
+  return {
+    homeName: who.home.name,
+    personName: who.personName,
+    membership: who.membership,
+    units: who.units,
+    today: dayIn(who.home.timeZone, now),
+    yearBuilt: who.home.yearBuilt,
+    stainBases: [...new Set(concerned.map(({ wall }) => wall.stainBase))],
+    sealants: [...new Set(concerned.map(({ wall }) => wall.sealant))],
+    walls: details.map((detail) => ({
+      name: detail.wall.name,
+      areaM2: faceAreaM2(detail),
+      items: items.filter((item) => item.wallId === detail.wall.id).map(({ wallId: _, ...item }) => item),
+    })),
+    planUrl: planUrl(site, homeId),
+    settingsUrl: settingsUrl(site),
+  };
+}
+
+/** The mail's work whose date is still the one it was queued for. */
+function standingItems(mailId: string, site: string, homeId: string): (ReminderItem & { wallId: string })[] {
+  const rows = database()
+    .select({ stage: delivery.stage, item: workItem })
+    .from(delivery)
+    .innerJoin(workItem, and(eq(workItem.wallId, delivery.wallId), eq(workItem.kind, delivery.kind), eq(workItem.dueOn, delivery.dueOn)))
+    .where(eq(delivery.mailId, mailId))
+    .orderBy(workItem.dueOn, workItem.kind)
+    .all();
+  return rows.flatMap(({ stage, item: { wallId, kind, dueOn, opensOn, closesOn, because } }) =>
+    isReminderStage(stage) ? [{ wallId, kind, stage, dueOn, opensOn, closesOn, because, logUrl: logUrl(site, homeId, kind, wallId) }] : [],
+  );
+}
+
+/** Flat face with its gable, less doors and windows. */
+function faceAreaM2({ wall, openings }: WallDetail): number {
+  const face = wall.widthM * (wall.heightM + wall.gableHeightM / 2);
+  const holes = openings.reduce((sum, one) => sum + one.widthM * one.heightM * one.count, 0);
+  return Math.max(face - holes, 0);
+}

@@ -1,0 +1,108 @@
+import { createHash } from 'node:crypto';
+import { and, eq, inArray, isNotNull, isNull, lte, min } from 'drizzle-orm';
+import { type CalendarDay, dayIn } from '@/lib/calendar';
+import { deliveryKey, nextStageDay, stageOn } from '@/lib/care/stages';
+import { database, transaction } from '../client';
+import { delivery, home, homeMember, user, wall, workItem } from '../schema';
+import { toWorkItem } from './home-view';
+import { enqueueMail } from './mail';
+
+export type ReminderCounts = { items: number; deliveries: number; mails: number };
+
+/** Who is reminded: owners, co-owners and caretakers with a confirmed address and reminders on, of homes in use. Joins home, home_member and user. */
+export const wantsReminders = () =>
+  and(
+    isNull(home.archivedAt),
+    inArray(homeMember.membership, ['owner', 'co-owner', 'caretaker']),
+    eq(user.remindersOn, true),
+    isNotNull(user.emailVerified),
+  );
+
+/** The latest calendar day anywhere on Earth at an instant (UTC+14). */
+const latestDay = (now: Date) => dayIn('Etc/GMT-14', now);
+
+/**
+ * Homes where the day of a reminder has come, by their own calendar. Reads the index on remind_on from its beginning:
+ * the cost follows what is due, not how many homes there are.
+ */
+export function homesToRemind(now: Date): { homeId: string; today: CalendarDay }[] {
+  return database()
+    .select({ homeId: workItem.homeId, first: min(workItem.remindOn), timeZone: home.timeZone })
+    .from(workItem)
+    .innerJoin(home, eq(home.id, workItem.homeId))
+    .where(lte(workItem.remindOn, latestDay(now)))
+    .groupBy(workItem.homeId)
+    .all()
+    .map(({ homeId, first, timeZone }) => ({ homeId, first: first ?? '', today: dayIn(timeZone, now) }))
+    .filter(({ first, today }) => first <= today);
+}
+
+type ItemRow = typeof workItem.$inferSelect;
+type Recipient = { userId: string; email: string };
+type Wanted = { key: string; item: ItemRow; stage: string };
+
+/**
+ * Queues the reminders of one home for one day, in one immediate transaction: a delivery row with a unique key for each
+ * person and stage, new ones gathered into one mail per person, and the day of each item's next stage.
+ */
+export function remindHome(homeId: string, today: CalendarDay, now: Date): ReminderCounts {
+  return transaction(() => {
+    const rows = database()
+      .select({ item: workItem, removedAt: wall.removedAt })
+      .from(workItem)
+      .innerJoin(wall, eq(wall.id, workItem.wallId))
+      .where(and(eq(workItem.homeId, homeId), lte(workItem.remindOn, today)))
+      .orderBy(wall.position, workItem.kind)
+      .all();
+    const standing = rows.filter((row) => row.removedAt === null).map((row) => row.item);
+    const counts: ReminderCounts = { items: rows.length, deliveries: 0, mails: 0 };
+    for (const recipient of recipientsOf(homeId)) {
+      const added = remindPerson(recipient, homeId, standing, today, now);
+      counts.deliveries += added;
+      counts.mails += added > 0 ? 1 : 0;
+    }
+    for (const { item } of rows) {
+      database()
+        .update(workItem)
+        .set({ remindOn: nextStageDay(toWorkItem(item), today) })
+        .where(and(eq(workItem.wallId, item.wallId), eq(workItem.kind, item.kind)))
+        .run();
+    }
+    return counts;
+  });
+}
+
+const recipientsOf = (homeId: string): Recipient[] =>
+  database()
+    .select({ userId: user.id, email: user.email })
+    .from(homeMember)
+    .innerJoin(user, eq(user.id, homeMember.userId))
+    .innerJoin(home, eq(home.id, homeMember.homeId))
+    .where(and(eq(homeMember.homeId, homeId), wantsReminders()))
+    .all();
+
+/** Returns how many deliveries are new. */
+function remindPerson(recipient: Recipient, homeId: string, items: ItemRow[], today: CalendarDay, now: Date): number {
+  const wanted = items.flatMap((item): Wanted[] => {
+    const reached = stageOn(toWorkItem(item), today);
+    return reached ? [{ key: deliveryKey(toWorkItem(item), reached, recipient.userId), item, stage: reached.stage }] : [];
+  });
+  const known = new Set(existingKeys(wanted.map((one) => one.key)));
+  const fresh = wanted.filter((one) => !known.has(one.key));
+  if (fresh.length === 0) return 0;
+  const digest = createHash('sha256').update(fresh.map((one) => one.key).sort().join('\n')).digest('hex').slice(0, 24);
+  const mailId = enqueueMail({
+    kind: 'reminder',
+    idempotencyKey: `reminder:${homeId}:${recipient.userId}:${today}:${digest}`,
+    toAddress: recipient.email,
+    userId: recipient.userId,
+    homeId,
+    props: {},
+    now,
+  });
+  const values = fresh.map(({ key, stage, item }) => ({ key, stage, homeId, userId: recipient.userId, wallId: item.wallId, kind: item.kind, dueOn: item.dueOn, mailId }));
+  return database().insert(delivery).values(values).onConflictDoNothing({ target: delivery.key }).run().changes;
+}
+
+const existingKeys = (keys: string[]): string[] =>
+  keys.length === 0 ? [] : database().select({ key: delivery.key }).from(delivery).where(inArray(delivery.key, keys)).all().map((row) => row.key);
