@@ -1,50 +1,42 @@
-// Builds the application unless the last build was made from the same sources. Plain Node, no packages.
+// Builds the application when its sources changed since the last build. Plain Node; needs the packages to be installed.
 import { spawnSync } from 'node:child_process';
 import { createHash } from 'node:crypto';
-import { existsSync, mkdirSync, readdirSync, readFileSync, writeFileSync } from 'node:fs';
+import { existsSync, readdirSync, readFileSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
-import { pathToFileURL } from 'node:url';
 
 const root = path.resolve(import.meta.dirname, '..');
-const sources = ['app', 'components', 'db', 'jobs', 'lib', 'public', 'package-lock.json', 'next.config.mjs', 'tailwind.config.ts', 'postcss.config.mjs', 'tsconfig.json', 'instrumentation.ts', 'proxy.ts'];
-const stamp = path.join(root, '.next', 'built-from');
+const mark = path.join(root, '.next', 'built-from');
+const folders = ['app', 'components', 'lib', 'db', 'jobs', 'public'];
 
-function* filesBelow(entry) {
-  const full = path.join(root, entry);
-  if (!existsSync(full)) return;
-  const children = readdirSync(full, { withFileTypes: true }).sort((a, b) => (a.name < b.name ? -1 : 1));
-  for (const child of children) {
-    const inner = path.join(entry, child.name);
-    if (child.isDirectory()) yield* filesBelow(inner);
-    else yield inner;
+function* filesUnder(folder) {
+  for (const entry of readdirSync(folder, { withFileTypes: true })) {
+    const full = path.join(folder, entry.name);
+    if (entry.isDirectory()) yield* filesUnder(full);
+    else if (entry.isFile()) yield full;
   }
 }
 
 function fingerprint() {
-  const hash = createHash('sha256');
-  for (const source of sources) {
-    const isFile = path.extname(source) !== '';
-    for (const file of isFile ? [source] : filesBelow(source)) {
-      if (existsSync(path.join(root, file))) hash.update(file).update('\0').update(readFileSync(path.join(root, file))).update('\0');
-    }
-  }
+  const loose = readdirSync(root, { withFileTypes: true })
+    .filter((entry) => entry.isFile() && /\.(m?[jt]s|json)$/.test(entry.name) && entry.name !== 'next-env.d.ts')
+    .map((entry) => path.join(root, entry.name));
+  const files = [...loose, ...folders.map((name) => path.join(root, name)).filter((full) => existsSync(full)).flatMap((full) => [...filesUnder(full)])];
+  const hash = createHash('sha256').update(process.version);
+  for (const file of files.sort()) hash.update(`\0${path.relative(root, file)}\0`).update(readFileSync(file));
   return hash.digest('hex');
 }
 
-/** Returns false when the build failed. */
-export function buildIfChanged(env = process.env) {
-  const wanted = fingerprint();
-  const isBuilt = existsSync(path.join(root, '.next', 'BUILD_ID')) && existsSync(stamp) && readFileSync(stamp, 'utf8') === wanted;
-  if (isBuilt) {
-    console.log('The application is built already.');
-    return true;
-  }
-  const next = path.join(root, 'node_modules', 'next', 'dist', 'bin', 'next');
-  const built = spawnSync(process.execPath, [next, 'build'], { cwd: root, stdio: ['ignore', 'inherit', 'inherit'], env: { ...env, NEXT_TELEMETRY_DISABLED: '1' } });
-  if (built.status !== 0) return false;
-  mkdirSync(path.dirname(stamp), { recursive: true });
-  writeFileSync(stamp, wanted);
-  return true;
+const now = fingerprint();
+const built = existsSync(path.join(root, '.next', 'BUILD_ID')) && existsSync(mark) ? readFileSync(mark, 'utf8') : '';
+if (built === now) {
+  console.log('Build: nothing changed since the last one.');
+} else {
+  console.log('Build: sources changed, building (about half a minute)…');
+  const done = spawnSync(process.execPath, [path.join('node_modules', 'next', 'dist', 'bin', 'next'), 'build'], {
+    cwd: root,
+    stdio: ['ignore', 'inherit', 'inherit'],
+    env: { ...process.env, NODE_ENV: 'production', NEXT_TELEMETRY_DISABLED: '1' },
+  });
+  if (done.status !== 0) process.exit(done.status ?? 1);
+  writeFileSync(mark, now);
 }
-
-if (process.argv[1] && import.meta.url === pathToFileURL(process.argv[1]).href) process.exit(buildIfChanged() ? 0 : 1);

@@ -6,7 +6,7 @@ import { logUrl, planUrl, settingsUrl } from '@/lib/mail/links';
 import { database } from '../client';
 import { delivery, home, homeMember, user, workItem } from '../schema';
 import { type MailRow } from './mail';
-import { wantsReminders } from './reminders';
+import { wantsReminders } from './reminder-people';
 import { type WallDetail, wallsOfHome } from './walls';
 
 type Of = Pick<MailRow, 'id' | 'userId' | 'homeId'>;

@@ -1,22 +1,14 @@
 import { createHash } from 'node:crypto';
-import { and, eq, inArray, isNotNull, isNull, lte, min } from 'drizzle-orm';
+import { and, eq, inArray, lte, min } from 'drizzle-orm';
 import { type CalendarDay, dayIn } from '@/lib/calendar';
 import { deliveryKey, nextStageDay, stageOn } from '@/lib/care/stages';
 import { database, transaction } from '../client';
-import { delivery, home, homeMember, user, wall, workItem } from '../schema';
+import { delivery, home, wall, workItem } from '../schema';
 import { toWorkItem } from './home-view';
 import { enqueueMail } from './mail';
+import { type Recipient, recipientsOf } from './reminder-people';
 
 export type ReminderCounts = { items: number; deliveries: number; mails: number };
-
-/** Who is reminded: owners, co-owners and caretakers with a confirmed address and reminders on, of homes in use. Joins home, home_member and user. */
-export const wantsReminders = () =>
-  and(
-    isNull(home.archivedAt),
-    inArray(homeMember.membership, ['owner', 'co-owner', 'caretaker']),
-    eq(user.remindersOn, true),
-    isNotNull(user.emailVerified),
-  );
 
 /** The latest calendar day anywhere on Earth at an instant (UTC+14). */
 const latestDay = (now: Date) => dayIn('Etc/GMT-14', now);
@@ -38,7 +30,6 @@ export function homesToRemind(now: Date): { homeId: string; today: CalendarDay }
 }
 
 type ItemRow = typeof workItem.$inferSelect;
-type Recipient = { userId: string; email: string };
 type Wanted = { key: string; item: ItemRow; stage: string };
 
 /**
@@ -71,15 +62,6 @@ export function remindHome(homeId: string, today: CalendarDay, now: Date): Remin
     return counts;
   });
 }
-
-const recipientsOf = (homeId: string): Recipient[] =>
-  database()
-    .select({ userId: user.id, email: user.email })
-    .from(homeMember)
-    .innerJoin(user, eq(user.id, homeMember.userId))
-    .innerJoin(home, eq(home.id, homeMember.homeId))
-    .where(and(eq(homeMember.homeId, homeId), wantsReminders()))
-    .all();
 
 /** Returns how many deliveries are new. */
 function remindPerson(recipient: Recipient, homeId: string, items: ItemRow[], today: CalendarDay, now: Date): number {
