@@ -3,6 +3,9 @@
 import { type ReactNode, useId } from 'react';
 import { FieldError } from '@/components/ui/field-frame';
 import { useAnswer } from '@/components/ui/form-context';
+import { type FormValue } from '@/lib/schemas/action-state';
+
+const texts = (sent: FormValue | undefined): string[] => (Array.isArray(sent) ? [...sent].filter((one) => typeof one === 'string') : []);
 
 export type Choice = { value: string; label: ReactNode; hint?: ReactNode; mark?: ReactNode };
 
@@ -67,6 +70,5 @@ export function RadioCourses({ defaultValue, onPick, ...props }: ChoiceProps & {
 /** Pick any number; name it 'wallIds[]' to send a list. */
 export function CheckCourses({ defaultValues = [], onPick, ...props }: ChoiceProps & { defaultValues?: readonly string[]; onPick?: (value: string, checked: boolean) => void }) {
   const { sent, wasSent } = useAnswer(props.name);
-  const chosen = wasSent ? (Array.isArray(sent) ? sent.filter((one): one is string => typeof one === 'string') : []) : defaultValues;
-  return <Rows {...props} type="checkbox" chosen={chosen} onPick={onPick} />;
+  return <Rows {...props} type="checkbox" chosen={wasSent ? texts(sent) : defaultValues} onPick={onPick} />;
 }
