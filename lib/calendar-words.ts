@@ -44,3 +44,6 @@ export function fromToday(day: CalendarDay, today: CalendarDay): string {
     : count(Math.round(size / 365.25), 'year');
   return days > 0 ? `in ${length}` : `${length} ago`;
 }
+
+/** '2027-05-15 09:30 UTC', for people who run the service. */
+export const utcMinute = (at: Date): string => `${at.toISOString().slice(0, 16).replace('T', ' ')} UTC`;
