@@ -72,6 +72,8 @@ const config = [
       { regex: '^@/db/(?!queries/|auth-adapter$)', message: 'app reads and writes through db/queries, never tables or the client.' },
     ],
   ),
+  // `useFreshDatabase` is a test set-up, not a React hook.
+  { files: ['tests/integration/**', 'tests/bench/**'], rules: { 'react-hooks/rules-of-hooks': 'off' } },
   { files: ['jobs/**', 'tests/setup/**', 'db/migrate.ts', 'db/seed.ts'], rules: { 'no-console': 'off' } },
 ];
 
