@@ -1,0 +1,51 @@
+import { type WorkKind, workKinds } from '@/lib/schemas/vocabulary';
+
+type Drawn = { path: string; open: string };
+
+/** 16 by 16, around (0, 0). Restain: a brush-wide bar; recaulk: a bead; wash: a drop; walkaround: an eye. */
+const marks: Record<WorkKind, Drawn> = {
+  restain: { path: 'M-4-13h8v26h-8z', open: 'M-4-13h8v26h-8z' },
+  recaulk: { path: 'M-5 0a5 5 0 1 0 10 0a5 5 0 1 0-10 0', open: 'M-5 0a5 5 0 1 0 10 0a5 5 0 1 0-10 0' },
+  wash: { path: 'M0-6C3-2 4 0 4 2a4 4 0 0 1-8 0c0-2 1-4 4-8z', open: 'M0-6C3-2 4 0 4 2a4 4 0 0 1-8 0c0-2 1-4 4-8z' },
+  walkaround: { path: 'M0-4.5 4.5 0 0 4.5-4.5 0z', open: 'M0-4.5 4.5 0 0 4.5-4.5 0z' },
+};
+
+type FadeMarkProps = { kind: WorkKind; done: boolean };
+
+/** Done work is filled, coming work an outline. */
+export function FadeMark({ kind, done }: FadeMarkProps) {
+  const { path, open } = marks[kind];
+  return done ? (
+    <path d={path} fill="var(--ink)" stroke="var(--snow)" strokeWidth="1.5" />
+  ) : (
+    <path d={open} fill="var(--snow)" stroke="var(--ink)" strokeWidth="2" strokeDasharray={kind === 'restain' ? '4 2.5' : undefined} />
+  );
+}
+
+export function FadeLegend() {
+  const item = (kind: WorkKind, done: boolean) => (
+    <svg width="18" height="30" viewBox="-9 -15 18 30" aria-hidden="true" className="shrink-0">
+      <FadeMark kind={kind} done={done} />
+    </svg>
+  );
+  return (
+    <ul aria-hidden="true" className="mt-2 flex flex-wrap items-center gap-x-5 text-sm text-quiet">
+      {(Object.keys(workKinds) as WorkKind[]).map((kind) => (
+        <li key={kind} className="flex items-center gap-1">
+          {item(kind, true)}
+          {workKinds[kind]}
+        </li>
+      ))}
+      <li className="flex items-center gap-1">
+        {item('recaulk', false)}
+        Outline: to come
+      </li>
+      <li className="flex items-center gap-2">
+        <svg width="26" height="8" aria-hidden="true">
+          <rect width="26" height="5" y="1.5" fill="var(--lichen)" />
+        </svg>
+        Caulk
+      </li>
+    </ul>
+  );
+}

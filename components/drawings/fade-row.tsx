@@ -1,0 +1,105 @@
+import { type Route } from 'next';
+import Link from 'next/link';
+import { FadeMark } from '@/components/drawings/fade-marks';
+import { type Stretch, stretches, usedUpOn } from '@/components/drawings/fade-stretches';
+import { type FadeWall, type Scale, weathered } from '@/components/drawings/fade-time';
+import { type CalendarDay, dayOf } from '@/lib/calendar';
+
+/** Heights within a row, px. */
+export const row = { height: 92, name: 22, strip: 34, stripHeight: 28, seal: 68, care: 80 };
+
+type RowProps = { wall: FadeWall; scale: Scale; top: number; defs: string };
+
+const percent = (value: number) => `${value.toFixed(3)}%`;
+
+export function FadeRow({ wall, scale, top, defs }: RowProps) {
+  const from = dayOf(scale.fromYear, 1, 1);
+  const to = dayOf(scale.toYear, 1, 1);
+  const name = (
+    <text x="0" y={top + row.name} fontSize="17" fontWeight="700" fill="var(--ink)">
+      {wall.name}
+    </text>
+  );
+  return (
+    <g>
+      <line x1="0" x2="100%" y1={top + row.height - 0.5} y2={top + row.height - 0.5} stroke="var(--line)" />
+      {wall.href ? (
+        <Link href={wall.href as Route} className="fade-link">
+          <rect x="0" y={top} width="100%" height={row.height} fill="transparent" className="fade-hit" />
+          {name}
+        </Link>
+      ) : (
+        name
+      )}
+      <g pointerEvents="none">
+        {stretches(wall, from, to).map((stretch, i) => (
+          <StretchBar key={stretch.from} stretch={stretch} scale={scale} y={top + row.strip} defs={defs} fade={`${defs}-${wall.id}-${i}`} />
+        ))}
+        <SealLine wall={wall} scale={scale} y={top + row.seal} to={to} defs={defs} />
+        <Marks wall={wall} scale={scale} top={top} from={from} to={to} />
+      </g>
+    </g>
+  );
+}
+
+type StretchProps = { stretch: Stretch; scale: Scale; y: number; defs: string; fade: string };
+
+function StretchBar({ stretch, scale, y, defs, fade }: StretchProps) {
+  const [x, end] = [scale.at(stretch.from), scale.at(stretch.to)];
+  const box = { x: percent(x), y, width: percent(Math.max(0, end - x)), height: row.stripHeight };
+  if (stretch.what === 'not known') {
+    return (
+      <>
+        <rect {...box} fill={`url(#${defs}-hatch)`} stroke="var(--lichen)" strokeDasharray="4 3" />
+        {end - x > 22 ? (
+          <svg x={box.x} y={y} width={box.width} height={row.stripHeight}>
+            <text x="50%" y="19" textAnchor="middle" fontSize="15" fill="var(--ink)" stroke="var(--snow)" strokeWidth="6" paintOrder="stroke">
+              not known
+            </text>
+          </svg>
+        ) : null}
+      </>
+    );
+  }
+  if (stretch.what === 'used up') {
+    return (
+      <>
+        <rect {...box} fill={weathered} />
+        <rect {...box} fill={`url(#${defs}-checks)`} />
+      </>
+    );
+  }
+  return (
+    <>
+      <linearGradient id={fade}>
+        <stop offset="0" stopColor={stretch.start} />
+        <stop offset="1" stopColor={stretch.end} />
+      </linearGradient>
+      <rect {...box} fill={`url(#${fade})`} />
+    </>
+  );
+}
+
+function SealLine({ wall, scale, y, to, defs }: { wall: FadeWall; scale: Scale; y: number; to: CalendarDay; defs: string }) {
+  if (wall.seal.startedOn === null) return <rect x="0" y={y} width={percent(scale.at(to))} height="5" fill={`url(#${defs}-hatch)`} />;
+  const [x, end] = [scale.at(wall.seal.startedOn), scale.at(usedUpOn(wall.seal.startedOn, wall.seal.lifeMonths))];
+  return (
+    <>
+      <rect x={percent(x)} y={y} width={percent(Math.max(0, end - x))} height="5" fill="var(--lichen)" />
+      <line x1={percent(end)} x2={percent(end)} y1={y - 3} y2={y + 8} stroke="var(--lichen)" strokeWidth="2" />
+    </>
+  );
+}
+
+function Marks({ wall, scale, top, from, to }: { wall: FadeWall; scale: Scale; top: number; from: CalendarDay; to: CalendarDay }) {
+  const lane = { restain: row.strip + row.stripHeight / 2, recaulk: row.seal + 2.5, wash: row.care, walkaround: row.care };
+  const done = wall.past.filter((work) => work.doneOn >= from).map((work) => ({ kind: work.kind, at: scale.at(work.doneOn), done: true }));
+  const coming = wall.coming
+    .filter((work) => work.opensOn < to)
+    .map((work) => ({ kind: work.kind, at: (scale.at(work.opensOn) + scale.at(work.closesOn)) / 2, done: false }));
+  return [...done, ...coming].map((mark) => (
+    <svg key={`${mark.kind}-${mark.at}-${mark.done}`} x={percent(mark.at)} y={top + lane[mark.kind]} overflow="visible">
+      <FadeMark kind={mark.kind} done={mark.done} />
+    </svg>
+  ));
+}
