@@ -1,5 +1,5 @@
 import { asc, count, eq, sql } from 'drizzle-orm';
-import { type Actor } from '@/lib/permissions';
+import { type Actor, type HomeVerb } from '@/lib/permissions';
 import { type Membership } from '@/lib/schemas/vocabulary';
 import { database, transaction } from '../client';
 import { demand, homeFor, memberOf } from '../scope';
@@ -34,6 +34,9 @@ export function listHomes(actor: Actor): HomeSummary[] {
     .all();
 }
 
+/** One home that the actor may do `verb` to. */
+export const homeOf = (actor: Actor, homeId: string, verb: HomeVerb): { home: HomeRow; membership: Membership } => homeFor(actor, homeId, verb);
+
 /** Makes a home owned by the actor. The caller adds walls and plans it in the same transaction. */
 export function createHome(actor: Actor, facts: HomeFacts): HomeRow {
   demand(actor, 'home.create');
@@ -55,15 +58,20 @@ export function archiveHome(actor: Actor, homeId: string, now: Date): void {
   database().update(home).set({ archivedAt: now }).where(eq(home.id, homeId)).run();
 }
 
-/** Brings back a home that its owner took out. */
-export function restoreHome(actor: Actor, homeId: string): boolean {
-  const owned = database()
-    .select({ id: home.id })
+/** A home that the actor owns and took out, so that it can be brought back. */
+export function archivedHome(actor: Actor, homeId: string | undefined): { id: string; name: string } | undefined {
+  if (!homeId) return undefined;
+  return database()
+    .select({ id: home.id, name: home.name })
     .from(home)
     .innerJoin(homeMember, eq(homeMember.homeId, home.id))
     .where(sql`${home.id} = ${homeId} and ${homeMember.userId} = ${actor.id} and ${homeMember.membership} = 'owner' and ${home.archivedAt} is not null`)
     .get();
-  if (!owned) return false;
+}
+
+/** Brings back a home that its owner took out. */
+export function restoreHome(actor: Actor, homeId: string): boolean {
+  if (!archivedHome(actor, homeId)) return false;
   database().update(home).set({ archivedAt: null }).where(eq(home.id, homeId)).run();
   return true;
 }

@@ -1,5 +1,5 @@
 import { and, asc, eq, isNull, max } from 'drizzle-orm';
-import { type Actor } from '@/lib/permissions';
+import { type Actor, type HomeVerb, Refused } from '@/lib/permissions';
 import { database, transaction } from '../client';
 import { homeFor, wallFor } from '../scope';
 import { opening, wall, wallExposure } from '../schema';
@@ -20,6 +20,13 @@ export function wallsOfHome(homeId: string): WallDetail[] {
   const walls = database().select({ wall, exposure: wallExposure }).from(wall).leftJoin(wallExposure, eq(wallExposure.wallId, wall.id)).where(standing).orderBy(asc(wall.position)).all();
   const openings = database().select({ opening }).from(opening).innerJoin(wall, eq(wall.id, opening.wallId)).where(standing).all();
   return walls.map((row) => ({ ...row, openings: openings.flatMap((one) => (one.opening.wallId === row.wall.id ? [one.opening] : [])) }));
+}
+
+/** A wall of this home that the actor may do `verb` to; a wall of another home is not found. */
+export function wallOf(actor: Actor, homeId: string, wallId: string, verb: HomeVerb) {
+  const scoped = wallFor(actor, wallId, verb);
+  if (scoped.home.id !== homeId) throw new Refused('not found', 'That wall');
+  return scoped;
 }
 
 /** Adds a wall at the end of the round, or at a given position when a home is set up. */

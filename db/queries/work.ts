@@ -1,5 +1,5 @@
-import { and, desc, eq, inArray, isNull } from 'drizzle-orm';
-import { type Actor, Refused } from '@/lib/permissions';
+import { and, desc, eq, inArray, isNotNull, isNull } from 'drizzle-orm';
+import { type Actor, can, Refused } from '@/lib/permissions';
 import { type LogWorkInput } from '@/lib/schemas/work';
 import { database, transaction } from '../client';
 import { homeFor, recordFor } from '../scope';
@@ -59,6 +59,21 @@ function earlierSubmission(actor: Actor, submissionKey: string): RecordRow {
   const row = database().select().from(workRecord).where(and(eq(workRecord.submissionKey, submissionKey), eq(workRecord.createdBy, actor.id))).get();
   if (!row) throw new Refused('not found', 'That submission');
   return row;
+}
+
+/** The home that a record, taken back or not, belongs to, if the actor may see it. */
+export function homeOfRecord(actor: Actor, recordId: string): string {
+  const row = database().select({ homeId: workRecord.homeId }).from(workRecord).where(eq(workRecord.id, recordId)).get();
+  if (!row) throw new Refused('not found', 'That work record');
+  return homeFor(actor, row.homeId, 'home.view').home.id;
+}
+
+/** A record of this home that was taken back and may be put back by the actor. */
+export function removedRecord(actor: Actor, homeId: string, recordId: string | undefined): RecordRow | undefined {
+  if (!recordId) return undefined;
+  const row = database().select().from(workRecord).where(and(eq(workRecord.id, recordId), eq(workRecord.homeId, homeId), isNotNull(workRecord.removedAt))).get();
+  const { membership } = homeFor(actor, homeId, 'home.view');
+  return row && (row.removedBy === actor.id || can(actor, 'work.remove', { membership, createdBy: row.createdBy })) ? row : undefined;
 }
 
 /** Takes a logged record back; it stays in the table with who and when. Returns its home. */

@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { choice, neededText, readLength, shortText } from '@/lib/schemas/measures';
 import { azimuth, coatSchema, recalledDay, sizes } from '@/lib/schemas/wall';
-import { keysOf, unitSystems, woods } from '@/lib/schemas/vocabulary';
+import { climateZones, keysOf, unitSystems, woods } from '@/lib/schemas/vocabulary';
 
 export const postalCode = z
   .string({ error: 'The postal code is missing.' })
@@ -26,7 +26,6 @@ const yearBuilt = z
 const elevation = z.string().trim().optional();
 
 export const sidingNominals = ['6', '8', '10'] as const;
-export const climateZones = ['1A', '2A', '2B', '3A', '3B', '3C', '4A', '4B', '4C', '5A', '5B', '5C', '6A', '6B', '7', '8'] as const;
 const zoneOverride = z.union([z.enum(climateZones), z.literal('')]).optional().transform((zone) => zone || undefined);
 
 const aboutHome = z.object({

@@ -1,0 +1,38 @@
+import { workState } from '@/lib/care';
+import { type WorkItem, type WorkState } from '@/lib/care/types';
+import { type CalendarDay } from '@/lib/calendar';
+import { type WorkKind } from '@/lib/schemas/vocabulary';
+
+type Named = { id: string; name: string };
+
+/** The same kind of work on several walls in the same window. */
+export type WorkGroup = { kind: WorkKind; state: WorkState; opensOn: CalendarDay; closesOn: CalendarDay; walls: Named[]; items: WorkItem[] };
+
+const urgency: Record<WorkState, number> = { overdue: 0, due: 1, 'due soon': 2, later: 3 };
+/** Caulk goes before stain; the yearly rounds come last. */
+const order: Record<WorkKind, number> = { recaulk: 0, restain: 1, wash: 2, walkaround: 3 };
+
+/** What is to be done on a home, most pressing first. Walls keep their plan order inside a group. */
+export function workGroups(items: readonly WorkItem[], walls: readonly Named[], today: CalendarDay): WorkGroup[] {
+  const groups = new Map<string, WorkGroup>();
+  for (const wall of walls) {
+    for (const item of items.filter((one) => one.wallId === wall.id)) {
+      const { opensOn, closesOn } = item.window;
+      const state = workState(item, today);
+      const key = [item.kind, state, opensOn, closesOn].join(' ');
+      const group = groups.get(key) ?? { kind: item.kind, state, opensOn, closesOn, walls: [], items: [] };
+      group.walls.push(wall);
+      group.items.push(item);
+      groups.set(key, group);
+    }
+  }
+  return [...groups.values()].sort((a, b) => urgency[a.state] - urgency[b.state] || (a.opensOn < b.opensOn ? -1 : a.opensOn > b.opensOn ? 1 : order[a.kind] - order[b.kind]));
+}
+
+/** 'Front', 'Front and Back', 'Front, Left side and Back', 'all walls'. */
+export function wallWords(chosen: readonly Named[], all: number): string {
+  if (chosen.length > 1 && chosen.length === all) return `all ${all} walls`;
+  const names = chosen.map(({ name }) => name);
+  const last = names.pop() ?? '';
+  return names.length > 0 ? `${names.join(', ')} and ${last}` : last;
+}

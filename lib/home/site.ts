@@ -1,0 +1,72 @@
+import { climateZone, nearestStation, timeZoneAt } from '@/lib/climate';
+import { climateZones } from '@/lib/schemas/vocabulary';
+
+/** A postal code as the table holds it. Degrees north and east. */
+export type PostalPlace = { code: string; place: string; state: string; county: string; countyFips: string; latitude: number; longitude: number };
+
+/** What somebody typed: the postal code, and where asked, the place on the map and the climate zone. */
+export type TypedPlace = {
+  postalCode: string;
+  latitude?: number | undefined;
+  longitude?: number | undefined;
+  elevationM?: number | undefined;
+  climateZoneOverride?: string | undefined;
+};
+
+/** Where a home is, as it is stored. The zone is null where the table of counties has none and the owner chose it. */
+export type SiteFacts = {
+  postalCode: string;
+  place: string;
+  state: string;
+  county: string;
+  countyFips: string;
+  latitude: number;
+  longitude: number;
+  timeZone: string;
+  climateZone: string | null;
+  stationId: string;
+};
+
+export type Site = { facts: SiteFacts; station: { name: string; distanceKm: number } };
+/** What has to be answered before the home has a climate. */
+export type SiteQuestion = { ask: 'coordinates' | 'zone'; why: string };
+
+const military = ['AA', 'AE', 'AP'];
+
+/** Where to go on the map: what was typed wins over the middle of the postal code. Null when neither says. */
+function spotOf(typed: TypedPlace, found: PostalPlace | undefined): { latitude: number; longitude: number } | null {
+  if (typed.latitude !== undefined && typed.longitude !== undefined) return { latitude: typed.latitude, longitude: typed.longitude };
+  if (!found || military.includes(found.state)) return null;
+  return { latitude: found.latitude, longitude: found.longitude };
+}
+
+function whyCoordinates(code: string, found: PostalPlace | undefined): string {
+  if (found) return `${code} is a military address, which moves around the world. Say where the home stands: degrees north, like 49.44.`;
+  return `The postal code ${code} is not in our table. Check its digits, or say where the home stands: degrees north, like 45.68.`;
+}
+
+/** Place, time zone, climate zone and station of a home, or the question that is still open. `found` is the postal code's row, if there is one. */
+export function resolveSite(typed: TypedPlace, found: PostalPlace | undefined): Site | SiteQuestion {
+  const spot = spotOf(typed, found);
+  if (!spot) return { ask: 'coordinates', why: whyCoordinates(typed.postalCode, found) };
+  const zone = found?.countyFips ? climateZone(found.countyFips) : undefined;
+  if (!zone && !(climateZones as readonly string[]).includes(typed.climateZoneOverride ?? '')) {
+    const where = found?.county ? `${found.county}, ${found.state}` : `the postal code ${typed.postalCode}`;
+    return { ask: 'zone', why: `The county table has no climate zone for ${where}. Choose the one on your building permit, or one from the map of your energy code.` };
+  }
+  const { station, distanceKm } = nearestStation({ ...spot, elevationM: typed.elevationM });
+  return {
+    facts: {
+      postalCode: typed.postalCode,
+      place: found?.place ?? `Postal code ${typed.postalCode}`,
+      state: found?.state ?? '',
+      county: found?.county ?? '',
+      countyFips: found?.countyFips ?? '',
+      ...spot,
+      timeZone: timeZoneAt(spot.latitude, spot.longitude),
+      climateZone: zone ?? null,
+      stationId: station.id,
+    },
+    station: { name: station.name, distanceKm },
+  };
+}
