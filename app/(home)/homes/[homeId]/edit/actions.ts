@@ -1,0 +1,47 @@
+'use server';
+
+import { redirect } from 'next/navigation';
+import { z } from 'zod';
+import { defineAction, FieldFault } from '@/app/_server/action';
+import { say } from '@/app/_server/said';
+import { siteFault } from '@/app/_server/site-fault';
+import { homeOf, updateHome } from '@/db/queries/homes';
+import { changeHome } from '@/db/queries/replan';
+import { siteFor } from '@/db/queries/site';
+import { turnWalls } from '@/db/queries/walls';
+import { homeSchema } from '@/lib/schemas/home';
+import { homeTarget, turnSchema } from '@/lib/schemas/targets';
+
+export const saveHome = defineAction({
+  verb: 'home.edit',
+  schema: z.intersection(homeTarget, homeSchema),
+  run: (actor, input) => {
+    homeOf(actor, input.homeId, 'home.edit');
+    const site = siteFor(input);
+    if ('ask' in site) return new FieldFault(siteFault(site));
+    const { name, wood, sidingNominalIn } = input;
+    const facts = { name, wood, sidingNominalIn, elevationM: input.elevationM ?? null, yearBuilt: input.yearBuilt ?? null, climateZoneOverride: input.climateZoneOverride ?? null };
+    return changeHome(input.homeId, new Date(), () => updateHome(actor, input.homeId, { ...site.facts, ...facts }));
+  },
+  after: async (home) => {
+    await say(`${home.name} is saved and planned anew.`);
+    redirect(`/homes/${home.id}`);
+  },
+});
+
+/** Turns the whole house: every wall keeps its place and takes the new direction. */
+export const turnHome = defineAction({
+  verb: 'home.edit',
+  schema: turnSchema,
+  run: (actor, { homeId, compassDeg }) => {
+    const { home } = homeOf(actor, homeId, 'home.edit');
+    changeHome(homeId, new Date(), () => {
+      turnWalls(actor, homeId, compassDeg - home.compassDeg);
+      updateHome(actor, homeId, { compassDeg });
+    });
+  },
+  after: async (_, { homeId }) => {
+    await say('The house is turned; the sun on every wall was worked out anew.');
+    redirect(`/homes/${homeId}`);
+  },
+});

@@ -1,0 +1,20 @@
+import { type CalendarDay } from '@/lib/calendar';
+import { type Finish, type Sealant, type StainBase, type WorkKind } from '@/lib/schemas/vocabulary';
+
+/** A piece of work as the record shows it. */
+export type ShownRecord = {
+  id: string;
+  kind: WorkKind;
+  doneOn: CalendarDay;
+  origin: 'logged' | 'recalled';
+  wallIds: readonly string[];
+  product: string | null;
+  amountL: number | null;
+  costCents: number | null;
+  note: string | null;
+  finish: Finish | null;
+  stainBase: StainBase | null;
+  colorHex: string | null;
+  sealant: Sealant | null;
+  byName: string | null;
+};
