@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto';
-import { and, eq, inArray, lte, min } from 'drizzle-orm';
+import { and, eq, inArray, lte } from 'drizzle-orm';
 import { type CalendarDay, dayIn } from '@/lib/calendar';
 import { deliveryKey, nextStageDay, stageOn } from '@/lib/care/stages';
 import { database, transaction } from '../client';
@@ -13,20 +13,24 @@ export type ReminderCounts = { items: number; deliveries: number; mails: number 
 /** The latest calendar day anywhere on Earth at an instant (UTC+14). */
 const latestDay = (now: Date) => dayIn('Etc/GMT-14', now);
 
-/**
- * Homes where the day of a reminder has come, by their own calendar. Reads the index on remind_on from its beginning:
- * the cost follows what is due, not how many homes there are.
- */
-export function homesToRemind(now: Date): { homeId: string; today: CalendarDay }[] {
-  return database()
-    .select({ homeId: workItem.homeId, first: min(workItem.remindOn), timeZone: home.timeZone })
+/** Work whose day has come at least somewhere on Earth; read from the index on remind_on. */
+export const itemsNearlyDue = (now: Date) =>
+  database()
+    .select({ homeId: workItem.homeId, remindOn: workItem.remindOn, timeZone: home.timeZone })
     .from(workItem)
     .innerJoin(home, eq(home.id, workItem.homeId))
-    .where(lte(workItem.remindOn, latestDay(now)))
-    .groupBy(workItem.homeId)
-    .all()
-    .map(({ homeId, first, timeZone }) => ({ homeId, first: first ?? '', today: dayIn(timeZone, now) }))
-    .filter(({ first, today }) => first <= today);
+    .where(lte(workItem.remindOn, latestDay(now)));
+
+/** Homes where the day of a reminder has come, by their own calendar. The cost follows what is due, not how many homes there are. */
+export function homesToRemind(now: Date): { homeId: string; today: CalendarDay }[] {
+  const due = new Map<string, CalendarDay>();
+  const days = new Map<string, CalendarDay>();
+  for (const { homeId, remindOn, timeZone } of itemsNearlyDue(now).all()) {
+    const today = days.get(timeZone) ?? dayIn(timeZone, now);
+    days.set(timeZone, today);
+    if (remindOn !== null && remindOn <= today) due.set(homeId, today);
+  }
+  return [...due].map(([homeId, today]) => ({ homeId, today }));
 }
 
 type ItemRow = typeof workItem.$inferSelect;
