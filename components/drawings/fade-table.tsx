@@ -9,7 +9,8 @@ const film = (one: FadeWall['coat']) => (one.startedOn ? `from ${exactDay(one.st
 /** The same facts as the strips, for those who do not see them. */
 export function FadeTable({ today, walls }: { today: CalendarDay; walls: readonly FadeWall[] }) {
   return (
-    <table className="sr-only">
+    <div className="sr-only">
+    <table>
       <caption>Coat, caulk, past and coming work of each wall; today is {exactDay(today)}</caption>
       <thead>
         <tr>
@@ -32,5 +33,6 @@ export function FadeTable({ today, walls }: { today: CalendarDay; walls: readonl
         ))}
       </tbody>
     </table>
+    </div>
   );
 }
