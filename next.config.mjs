@@ -2,6 +2,8 @@
 const config = {
   typedRoutes: true,
   poweredByHeader: false,
+  /** forbidden() answers 403 with the page app/**/forbidden.tsx. */
+  experimental: { authInterrupts: true },
   serverExternalPackages: ['better-sqlite3', '@node-rs/argon2', 'nodemailer', 'mailparser'],
 };
 
