@@ -2,7 +2,7 @@
 const config = {
   typedRoutes: true,
   poweredByHeader: false,
-  /** forbidden() answers 403 with the page app/**/forbidden.tsx. */
+  // forbidden() answers 403 with the nearest forbidden.tsx.
   experimental: { authInterrupts: true },
   serverExternalPackages: ['better-sqlite3', '@node-rs/argon2', 'nodemailer', 'mailparser'],
 };
