@@ -24,6 +24,15 @@ async function end(code, words) {
   process.exit(code);
 }
 
+/** A signal sent to npm alone does not reach this process: notice that the parent is gone. */
+function endWithNpm() {
+  const parent = process.ppid;
+  if (!process.env.npm_lifecycle_event) return;
+  setInterval(() => {
+    if (process.ppid !== parent) void end(0, 'npm was stopped: stopping the demo.');
+  }, 500).unref();
+}
+
 const isFree = (port, host) =>
   new Promise((resolve) => {
     const probe = net.createServer().once('error', () => resolve(false));
@@ -104,6 +113,7 @@ async function main() {
     process.exit(0);
   }
   for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, () => void end(0, 'Stopping the demo.'));
+  endWithNpm();
   await install();
   const appPort = await freePort(Number(process.env.PORT) || 3000, 'the application');
   const mailPort = await freePort(2525, 'the mail fake');
