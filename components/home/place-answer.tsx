@@ -15,13 +15,13 @@ export function PlaceAnswer({ answer, loading, failed, started, units }: PlaceAn
       {!started ? <p className="text-quiet">Five digits: from them come the place, its time, its climate and the sun.</p> : null}
       {started && failed ? <p className="text-quiet">The look-up did not answer. Go on: it is done again when you save.</p> : null}
       {started && !answer && loading ? <p className="text-quiet">Looking it up…</p> : null}
-      {started && answer && 'ask' in answer ? <FormMessage tone="note">{answer.why}</FormMessage> : null}
-      {started && answer && 'facts' in answer ? <Found site={answer} units={units} /> : null}
+      {started && answer?.found === false ? <FormMessage tone="note">{answer.why}</FormMessage> : null}
+      {started && answer?.found ? <Found site={answer} units={units} /> : null}
     </div>
   );
 }
 
-function Found({ site: { facts, station }, units }: { site: Site; units: UnitSystem }) {
+function Found({ site: { site: facts, station }, units }: { site: Site; units: UnitSystem }) {
   const where = [facts.place, facts.state].filter(Boolean).join(', ');
   return (
     <div>

@@ -28,7 +28,7 @@ export function PlaceFields({ units, defaults = empty }: PlaceFieldsProps) {
   const [typed, setTyped] = useState(defaults);
   const faults = [useAnswer('latitude').error, useAnswer('longitude').error, useAnswer('climateZoneOverride').error, useAnswer('elevation').error];
   const { data, error, isLoading } = useSWR<Site | SiteQuestion, Error>(address(typed), readJson, { keepPreviousData: true, revalidateOnFocus: false });
-  const asks = data !== undefined && 'ask' in data;
+  const asks = data?.found === false;
   const note = (name: keyof typeof empty) => (event: { currentTarget: HTMLInputElement | HTMLSelectElement }) => {
     const value = event.currentTarget.value.trim();
     setTyped((before) => ({ ...before, [name]: name === 'postalCode' ? value.slice(0, 5) : value }));

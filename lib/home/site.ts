@@ -15,7 +15,6 @@ export type TypedPlace = {
 
 /** Where a home is, as it is stored. The zone is null where the table of counties has none and the owner chose it. */
 export type SiteFacts = {
-  postalCode: string;
   place: string;
   state: string;
   county: string;
@@ -27,9 +26,9 @@ export type SiteFacts = {
   stationId: string;
 };
 
-export type Site = { facts: SiteFacts; station: { name: string; distanceKm: number } };
+export type Site = { found: true; site: SiteFacts; station: { name: string; distanceKm: number } };
 /** What has to be answered before the home has a climate. */
-export type SiteQuestion = { ask: 'coordinates' | 'zone'; why: string };
+export type SiteQuestion = { found: false; ask: 'coordinates' | 'zone'; why: string };
 
 const military = ['AA', 'AE', 'AP'];
 
@@ -48,16 +47,16 @@ function whyCoordinates(code: string, found: PostalPlace | undefined): string {
 /** Place, time zone, climate zone and station of a home, or the question that is still open. `found` is the postal code's row, if there is one. */
 export function resolveSite(typed: TypedPlace, found: PostalPlace | undefined): Site | SiteQuestion {
   const spot = spotOf(typed, found);
-  if (!spot) return { ask: 'coordinates', why: whyCoordinates(typed.postalCode, found) };
+  if (!spot) return { found: false, ask: 'coordinates', why: whyCoordinates(typed.postalCode, found) };
   const zone = found?.countyFips ? climateZone(found.countyFips) : undefined;
   if (!zone && !(climateZones as readonly string[]).includes(typed.climateZoneOverride ?? '')) {
     const where = found?.county ? `${found.county}, ${found.state}` : `the postal code ${typed.postalCode}`;
-    return { ask: 'zone', why: `The county table has no climate zone for ${where}. Choose the one on your building permit, or one from the map of your energy code.` };
+    return { found: false, ask: 'zone', why: `The county table has no climate zone for ${where}. Choose the one on your building permit, or one from the map of your energy code.` };
   }
   const { station, distanceKm } = nearestStation({ ...spot, elevationM: typed.elevationM });
   return {
-    facts: {
-      postalCode: typed.postalCode,
+    found: true,
+    site: {
       place: found?.place ?? `Postal code ${typed.postalCode}`,
       state: found?.state ?? '',
       county: found?.county ?? '',
@@ -67,6 +66,6 @@ export function resolveSite(typed: TypedPlace, found: PostalPlace | undefined): 
       climateZone: zone ?? null,
       stationId: station.id,
     },
-    station: { name: station.name, distanceKm },
+    station: { name: `${station.name}, ${station.state}`, distanceKm },
   };
 }

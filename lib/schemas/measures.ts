@@ -61,7 +61,7 @@ export const neededText = (what: string, most: number) =>
   z.string({ error: `${what} is missing.` }).trim().min(1, `${what} is missing.`).max(most, `${what} may have at most ${most} characters.`);
 
 /** A closed choice with a plain message. */
-export const choice = <T extends readonly [string, ...string[]]>(values: T, what: string) => z.enum(values, { error: `Choose ${what}.` });
+export const choice = <const T extends readonly [string, ...string[]]>(values: T, what: string) => z.enum(values, { error: `Choose ${what}.` });
 
 /** A money amount in dollars as typed ('1,250.50', '$40'), in cents. Empty is undefined. */
 export const dollars = (what: string) =>

@@ -20,11 +20,11 @@ export const create = defineAction({
   run: (actor, input) => {
     const now = new Date();
     const site = siteFor(input);
-    if ('ask' in site) return new FieldFault(siteFault(site));
-    const early = notYet(input, dayIn(site.timeZone, now));
+    if (!site.found) return new FieldFault(siteFault(site));
+    const early = notYet(input, dayIn(site.site.timeZone, now));
     if (early) return new FieldFault(early);
-    const { name, elevationM, climateZoneOverride, compassDeg, wood, sidingNominalIn, yearBuilt } = input;
-    const home = createHome(actor, { ...site.facts, name, elevationM, climateZoneOverride, compassDeg, wood, sidingNominalIn, yearBuilt });
+    const { name, postalCode, elevationM, climateZoneOverride, compassDeg, wood, sidingNominalIn, yearBuilt } = input;
+    const home = createHome(actor, { ...site.site, name, postalCode, elevationM, climateZoneOverride, compassDeg, wood, sidingNominalIn, yearBuilt });
     const { finish, stainBase, colorHex, colorName, texture, sealant, stained, caulked } = input;
     for (const wall of fourWalls(input)) {
       addWall(actor, home.id, { ...wall, finish, stainBase, colorHex, colorName, texture, sealant, stained, caulked, openings: [] }, wall.position);

@@ -18,10 +18,10 @@ export const saveHome = defineAction({
   run: (actor, input) => {
     homeOf(actor, input.homeId, 'home.edit');
     const site = siteFor(input);
-    if ('ask' in site) return new FieldFault(siteFault(site));
-    const { name, wood, sidingNominalIn } = input;
-    const facts = { name, wood, sidingNominalIn, elevationM: input.elevationM ?? null, yearBuilt: input.yearBuilt ?? null, climateZoneOverride: input.climateZoneOverride ?? null };
-    return changeHome(input.homeId, new Date(), () => updateHome(actor, input.homeId, { ...site.facts, ...facts }));
+    if (!site.found) return new FieldFault(siteFault(site));
+    const { name, postalCode, wood, sidingNominalIn } = input;
+    const facts = { name, postalCode, wood, sidingNominalIn, elevationM: input.elevationM ?? null, yearBuilt: input.yearBuilt ?? null, climateZoneOverride: input.climateZoneOverride ?? null };
+    return changeHome(input.homeId, new Date(), () => updateHome(actor, input.homeId, { ...site.site, ...facts }));
   },
   after: async (home) => {
     await say(`${home.name} is saved and planned anew.`);
