@@ -1,0 +1,55 @@
+export type ContainerSize = { gal: number; priceCents: number };
+export type ContainerCount = { gal: number; count: number };
+
+/** Sizes are whole numbers of this: an eighth of a pint, so that quarts and metric cans come out whole enough. */
+const unitGal = 1 / 128;
+const mostUnits = 400_000;
+
+/**
+ * The cheapest mix of containers that holds at least the need; among equally cheap ones the fewest containers, then the least left over.
+ * Exact: dynamic programming over fluid ounces (1/128 gal), sizes rounded down and the need up to whole ounces.
+ * @param neededGal US gallons, 0 to 3,000
+ * @param sizes container sizes in US gallons (at least an ounce) with prices in cents ≥ 0
+ * @returns counts above 0, largest size first; empty for no need
+ * @throws RangeError for a need or size out of range, or no sizes
+ */
+export function cheapestContainers(neededGal: number, sizes: ContainerSize[]): ContainerCount[] {
+  if (!(neededGal >= 0) || neededGal > mostUnits * unitGal) throw new RangeError('the need must be between 0 and 3,125 gallons');
+  if (sizes.length === 0) throw new RangeError('at least one container size is needed');
+  const units = sizes.map(({ gal, priceCents }) => {
+    if (!(gal >= unitGal) || !(priceCents >= 0) || !Number.isFinite(gal + priceCents)) throw new RangeError('a container needs a size and a price');
+    return Math.floor(gal / unitGal + 1e-6);
+  });
+  const need = Math.ceil(neededGal / unitGal - 1e-6);
+  return need === 0 ? [] : cheapestFor(need, units, sizes);
+}
+
+function cheapestFor(need: number, units: number[], sizes: ContainerSize[]): ContainerCount[] {
+  // best[k]: least (price, containers, −contents) to hold at least k units; `last` is the container put in last.
+  const price = new Float64Array(need + 1);
+  const containers = new Int32Array(need + 1);
+  const contents = new Float64Array(need + 1);
+  const last = new Int16Array(need + 1).fill(-1);
+  for (let k = 1; k <= need; k += 1) {
+    price[k] = Infinity;
+    for (let i = 0; i < sizes.length; i += 1) {
+      const before = Math.max(0, k - (units[i] as number));
+      const p = (price[before] as number) + (sizes[i] as ContainerSize).priceCents;
+      const n = (containers[before] as number) + 1;
+      const c = (contents[before] as number) + (units[i] as number);
+      const better = p < (price[k] as number) || (p === price[k] && (n < (containers[k] as number) || (n === containers[k] && c < (contents[k] as number))));
+      if (!better) continue;
+      price[k] = p;
+      containers[k] = n;
+      contents[k] = c;
+      last[k] = i;
+    }
+  }
+  const counts = new Map<number, number>();
+  for (let k = need; k > 0; ) {
+    const i = last[k] as number;
+    counts.set(i, (counts.get(i) ?? 0) + 1);
+    k = Math.max(0, k - (units[i] as number));
+  }
+  return [...counts].map(([i, count]) => ({ gal: (sizes[i] as ContainerSize).gal, count })).sort((a, b) => b.gal - a.gal);
+}
