@@ -3,8 +3,9 @@ import { type CalendarDay } from '@/lib/calendar';
 import { aboutRange, exactDay, exactRange, fromToday } from '@/lib/calendar-words';
 import { cautionsDefer, cautionsFor } from '@/lib/cautions';
 import { keysOf, memberships, sealants, stainBases, unitSystems, workKinds } from '@/lib/schemas/vocabulary';
+import { areaText } from '@/lib/units';
 import { type Course, defineMail, type Part } from '../letter';
-import { areaInWords } from './area-words';
+
 import { mostUrgent, reminderStages, stageWords } from './reminder-stages';
 
 const item = z.object({
@@ -69,7 +70,7 @@ function opening(props: ReminderProps, count: number): Course {
 }
 
 function wallCourse(of: ReminderProps['walls'][number], props: ReminderProps): Course {
-  const title = { title: of.name, aside: areaInWords(of.areaM2, props.units) };
+  const title = { title: of.name, aside: areaText(of.areaM2, props.units) };
   if (of.items.length === 0) return { ...title, parts: [{ as: 'text', text: 'Nothing new in this reminder.', look: 'quiet' }] };
   const overdue = of.items.some((it) => it.stage === 'overdue');
   return { ...title, mark: overdue ? 'overdue' : 'due soon', parts: of.items.flatMap((it) => itemParts(it, props.today)) };
