@@ -3,11 +3,12 @@ import { dayIn } from '@/lib/calendar';
 import { type ReminderItem, type ReminderProps } from '@/lib/mail/kinds/reminder';
 import { isReminderStage } from '@/lib/mail/kinds/reminder-stages';
 import { logUrl, planUrl, settingsUrl } from '@/lib/mail/links';
+import { wallAreaM2 } from '@/lib/takeoff';
 import { database } from '../client';
 import { delivery, home, homeMember, user, workItem } from '../schema';
 import { type MailRow } from './mail';
 import { wantsReminders } from './reminder-people';
-import { type WallDetail, wallsOfHome } from './walls';
+import { wallsOfHome } from './walls';
 
 type Of = Pick<MailRow, 'id' | 'userId' | 'homeId'>;
 
@@ -41,7 +42,7 @@ export function reminderPropsOf(mail: Of, site: string, now: Date): ReminderProp
     sealants: [...new Set(concerned.map(({ wall }) => wall.sealant))],
     walls: details.map((detail) => ({
       name: detail.wall.name,
-      areaM2: faceAreaM2(detail),
+      areaM2: wallAreaM2({ ...detail.wall, openings: detail.openings }),
       items: items.filter((item) => item.wallId === detail.wall.id).map(({ wallId: _, ...item }) => item),
     })),
     planUrl: planUrl(site, homeId),
@@ -61,11 +62,4 @@ function standingItems(mailId: string, site: string, homeId: string): (ReminderI
   return rows.flatMap(({ stage, item: { wallId, kind, dueOn, opensOn, closesOn, because } }) =>
     isReminderStage(stage) ? [{ wallId, kind, stage, dueOn, opensOn, closesOn, because, logUrl: logUrl(site, homeId, kind, wallId) }] : [],
   );
-}
-
-/** Flat face with its gable, less doors and windows. */
-function faceAreaM2({ wall, openings }: WallDetail): number {
-  const face = wall.widthM * (wall.heightM + wall.gableHeightM / 2);
-  const holes = openings.reduce((sum, one) => sum + one.widthM * one.heightM * one.count, 0);
-  return Math.max(face - holes, 0);
 }

@@ -5,7 +5,6 @@ import { cautionsDefer, cautionsFor } from '@/lib/cautions';
 import { keysOf, memberships, sealants, stainBases, unitSystems, workKinds } from '@/lib/schemas/vocabulary';
 import { areaText } from '@/lib/units';
 import { type Course, defineMail, type Part } from '../letter';
-
 import { mostUrgent, reminderStages, stageWords } from './reminder-stages';
 
 const item = z.object({
