@@ -30,17 +30,18 @@ export type Site = { found: true; site: SiteFacts; station: { name: string; dist
 /** What has to be answered before the home has a climate. */
 export type SiteQuestion = { found: false; ask: 'coordinates' | 'zone'; why: string };
 
-const military = ['AA', 'AE', 'AP'];
+/** A code without a state is a military post office (APO, FPO): its place on the map is only where the mail goes. */
+const isMilitary = (found: PostalPlace) => found.state === '';
 
 /** Where to go on the map: what was typed wins over the middle of the postal code. Null when neither says. */
 function spotOf(typed: TypedPlace, found: PostalPlace | undefined): { latitude: number; longitude: number } | null {
   if (typed.latitude !== undefined && typed.longitude !== undefined) return { latitude: typed.latitude, longitude: typed.longitude };
-  if (!found || military.includes(found.state)) return null;
+  if (!found || isMilitary(found)) return null;
   return { latitude: found.latitude, longitude: found.longitude };
 }
 
 function whyCoordinates(code: string, found: PostalPlace | undefined): string {
-  if (found) return `${code} is a military address, which moves around the world. Say where the home stands: degrees north, like 49.44.`;
+  if (found) return `${code} is a military post office, not a place. Say where the home stands: degrees north, like 45.68.`;
   return `The postal code ${code} is not in our table. Check its digits, or say where the home stands: degrees north, like 45.68.`;
 }
 
