@@ -1,0 +1,50 @@
+import { shadeHorizon } from '@/lib/home/shade';
+import { type Shade } from '@/lib/schemas/vocabulary';
+import { directSunHoursOn, type Place, sunDose, type SunPath, sunPath } from '@/lib/sun';
+
+export type ExposedWall = { azimuthDeg: number; heightM: number; eaveDepthM: number; eaveDropM: number; shade: Shade; shadeHeightDeg: number };
+
+export type Exposure = { sunHours: number; sunHoursMonthly: number[]; doseKwhM2: number; doseMonthly: number[] };
+
+/** What the sun does at a home's place in a mean year, shared by its walls. */
+export type SunSite = { place: Place; ghiKwhM2Day: number[]; leafOnMonths: boolean[] };
+
+/** Sun hours are counted in this year; another differs by less than two hours. Our rule. */
+const countedYear = 2026;
+
+/** Trees carry leaves in months with a mean of at least this, °C. Our rule. */
+const leafC = 10;
+
+export const sunSite = (place: Place, climate: { meanC: number[]; ghiKwhM2Day: number[] }): SunSite => ({
+  place,
+  ghiKwhM2Day: climate.ghiKwhM2Day,
+  leafOnMonths: climate.meanC.map((celsius) => celsius >= leafC),
+});
+
+/** The year's sun positions at a home; about a hundred milliseconds, so made once for all of its walls. */
+export const pathOf = (site: SunSite): SunPath => sunPath(site.place, countedYear);
+
+const rounded = (values: number[]) => values.map((value) => Number(value.toFixed(2)));
+
+/** Direct sun hours and sun dose (kWh/m²) of a wall in a mean year, rounded to hundredths. */
+export function exposureOf(wall: ExposedWall, site: SunSite, path: SunPath): Exposure {
+  const face = { azimuthDeg: wall.azimuthDeg, heightM: wall.heightM, eaveDepthM: wall.eaveDepthM, eaveDropM: wall.eaveDropM, horizon: shadeHorizon(wall) };
+  const hours = directSunHoursOn(path, face, site.leafOnMonths);
+  const dose = sunDose(site.place, face, site.ghiKwhM2Day, { leafOnMonths: site.leafOnMonths });
+  return {
+    sunHours: Number(hours.annual.toFixed(2)),
+    sunHoursMonthly: rounded(hours.monthly),
+    doseKwhM2: Number(dose.annual.toFixed(2)),
+    doseMonthly: rounded(dose.monthly),
+  };
+}
+
+/** Everything that a wall's exposure depends on, as text: equal text, equal exposure. Raise the edition when the method changes. */
+export const exposureInputs = (wall: ExposedWall, site: SunSite, stationId: string): string =>
+  JSON.stringify({
+    edition: 1,
+    at: [site.place.latitude, site.place.longitude],
+    stationId,
+    leaves: site.leafOnMonths.map(Number).join(''),
+    wall: [wall.azimuthDeg, wall.heightM, wall.eaveDepthM, wall.eaveDropM, wall.shade, wall.shadeHeightDeg],
+  });
