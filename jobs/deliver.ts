@@ -43,48 +43,53 @@ export async function deliverMail(mailId: string, transport?: MailTransport): Pr
 }
 
 async function deliverOne(claimed: ClaimedMail, transport: MailTransport, clock: () => Date): Promise<Outcome> {
-  const written = write(claimed, clock());
+  const later = (error: string, subject?: string): Outcome => ({ state: markRetry(claimed, error, clock(), Math.random(), subject) === 'queued' ? 'retried' : 'refused' });
+  const contents = contentsOf(claimed, clock());
+  if ('trouble' in contents) return later(contents.trouble);
+  if ('nothing' in contents) {
+    markCancelled(claimed, contents.nothing);
+    return { state: 'cancelled' };
+  }
+  const written = write(claimed.kind, contents.props);
   if ('fault' in written) {
     markRefused(claimed, `It could not be written: ${written.fault}`);
     return { state: 'refused' };
   }
-  if ('nothing' in written) {
-    markCancelled(claimed, written.nothing);
-    return { state: 'cancelled' };
-  }
   try {
-    await transport.sendMail({
-      from: environment().MAIL_FROM,
-      to: { name: '', address: claimed.toAddress },
-      messageId: claimed.messageId,
-      headers: { 'Auto-Submitted': 'auto-generated' },
-      ...written,
-    });
+    const to = { name: '', address: contents.to };
+    await transport.sendMail({ from: environment().MAIL_FROM, to, messageId: claimed.messageId, headers: { 'Auto-Submitted': 'auto-generated' }, ...written });
   } catch (error) {
     const failure = failureOf(error);
-    if (failure.kind === 'refused') {
-      markRefused(claimed, failure.message, written.subject);
-      return { state: 'refused' };
-    }
-    const next = markRetry(claimed, failure.message, clock(), Math.random(), written.subject);
-    return { state: next === 'queued' ? 'retried' : 'refused', noConnection: failure.kind === 'no connection' };
+    if (failure.kind !== 'refused') return { ...later(failure.message, written.subject), noConnection: failure.kind === 'no connection' };
+    markRefused(claimed, failure.message, written.subject);
+    return { state: 'refused' };
   }
   markSent(claimed, written.subject, clock());
   return { state: 'sent' };
 }
 
-type Written = Rendered | { nothing: string } | { fault: string };
+type Contents = { to: string; props: unknown } | { nothing: string } | { trouble: string };
 
-/** Writes the mail; a reminder from the plan as it stands at this moment. A fault in one mail must not hold up the others. */
-function write(claimed: ClaimedMail, now: Date): Written {
+/** What the mail is written from; for a reminder, the plan as it stands at this moment. */
+function contentsOf(claimed: ClaimedMail, now: Date): Contents {
+  if (claimed.kind !== 'reminder') return { to: claimed.toAddress, props: claimed.props };
   try {
-    if (claimed.kind !== 'reminder') return renderMail(claimed.kind, claimed.props);
-    const props = reminderPropsOf(claimed, environment().NEXTAUTH_URL, now);
-    return 'nothing' in props ? props : renderMail('reminder', props);
+    return reminderPropsOf(claimed, environment().NEXTAUTH_URL, now);
   } catch (error) {
-    return { fault: error instanceof Error ? error.message.slice(0, 500) : String(error) };
+    return { trouble: `The plan could not be read: ${messageOf(error)}` };
   }
 }
+
+/** A fault in one mail must not hold up the others. */
+function write(kind: string, props: unknown): Rendered | { fault: string } {
+  try {
+    return renderMail(kind, props);
+  } catch (error) {
+    return { fault: messageOf(error) };
+  }
+}
+
+const messageOf = (error: unknown) => (error instanceof Error ? error.message : String(error)).slice(0, 500);
 
 async function main() {
   environment();

@@ -14,13 +14,13 @@ type Of = Pick<MailRow, 'id' | 'userId' | 'homeId'>;
 
 /**
  * What a reminder says, from the plan as it stands now: work that was logged or moved since the mail was queued is left out.
- * `nothing` (with the reason) when nobody should get it any more.
+ * `to` is the person's address now. `nothing` (with the reason) when nobody should get it any more.
  */
-export function reminderPropsOf(mail: Of, site: string, now: Date): ReminderProps | { nothing: string } {
+export function reminderPropsOf(mail: Of, site: string, now: Date): { to: string; props: ReminderProps } | { nothing: string } {
   const { userId, homeId } = mail;
   if (!userId || !homeId) return { nothing: 'The person or the home is gone.' };
   const who = database()
-    .select({ home, membership: homeMember.membership, personName: user.name, units: user.units })
+    .select({ home, membership: homeMember.membership, personName: user.name, units: user.units, to: user.email })
     .from(homeMember)
     .innerJoin(home, eq(home.id, homeMember.homeId))
     .innerJoin(user, eq(user.id, homeMember.userId))
@@ -31,7 +31,7 @@ export function reminderPropsOf(mail: Of, site: string, now: Date): ReminderProp
   const details = wallsOfHome(homeId);
   const concerned = details.filter(({ wall }) => items.some((item) => item.wallId === wall.id));
   if (concerned.length === 0) return { nothing: 'Everything in it was done or moved before it was sent.' };
-  return {
+  const props = {
     homeName: who.home.name,
     personName: who.personName,
     membership: who.membership,
@@ -48,6 +48,7 @@ export function reminderPropsOf(mail: Of, site: string, now: Date): ReminderProp
     planUrl: planUrl(site, homeId),
     settingsUrl: settingsUrl(site),
   };
+  return { to: who.to, props };
 }
 
 /** The mail's work whose date is still the one it was queued for. */

@@ -4,7 +4,7 @@ import { deliverDue, deliverMail } from '@/jobs/deliver';
 import { smtpTransport } from '@/jobs/transport';
 import { setEnvironment } from '@/tests/fixtures/environment';
 import { allMail } from '@/tests/fixtures/home';
-import { startSmtp, type TestSmtp } from '@/tests/fixtures/smtp';
+import { addresseeOf, startSmtp, type TestSmtp } from '@/tests/fixtures/smtp';
 import { useFreshDatabase } from '@/tests/setup/fresh-database';
 
 setEnvironment();
@@ -34,7 +34,7 @@ describe('delivery to a real mail server', () => {
     expect(got?.subject).toBe('Confirm your address for Eavewright');
     expect(got?.messageId).toBe(row?.messageId);
     expect(got?.from?.value).toEqual([{ name: 'Eavewright', address: 'reminders@eavewright.example' }]);
-    expect(got?.to && 'value' in got.to && got.to.value[0]?.address).toBe('zoe@example.test');
+    expect(addresseeOf(got)).toBe('zoe@example.test');
     expect(got?.headers.get('auto-submitted')).toBe('auto-generated');
     expect(got?.html).toContain('href="https://eavewright.example/confirm?token=abc&amp;x=1"');
     expect(got?.text?.split('\n')).toContain(link);
@@ -46,7 +46,7 @@ describe('delivery to a real mail server', () => {
     const keys = Array.from({ length: 23 }, (_, i) => `person${i}`);
     for (const key of keys) enqueue(key);
     expect(await deliverDue(now, smtp.transport)).toEqual({ ...none, sent: 23 });
-    const to = smtp.received.map((got) => (got.to && 'value' in got.to ? got.to.value[0]?.address : ''));
+    const to = smtp.received.map(addresseeOf);
     expect(to.sort()).toEqual(keys.map((key) => `${key}@example.test`).sort());
   });
 

@@ -9,7 +9,7 @@ import { type Membership } from '@/lib/schemas/vocabulary';
 import { setEnvironment } from '@/tests/fixtures/environment';
 import { allDeliveries, allMail, allWorkItems, insertFourWalls, insertHome, insertMember, insertUser, insertWorkItem } from '@/tests/fixtures/home';
 import { runScript } from '@/tests/fixtures/run-script';
-import { startSmtp, type TestSmtp } from '@/tests/fixtures/smtp';
+import { addresseeOf, startSmtp, type TestSmtp } from '@/tests/fixtures/smtp';
 import { useFreshDatabase } from '@/tests/setup/fresh-database';
 
 setEnvironment();
@@ -40,7 +40,7 @@ describe('a reminder run', () => {
     expect(await run()).toMatchObject({ homes: 1, items: 2, deliveries: 2, mails: 1, sent: 1 });
     const [got] = smtp.received;
     expect(smtp.received).toHaveLength(1);
-    expect(got?.to && 'value' in got.to && got.to.value[0]?.address).toBe(owner.email);
+    expect(addresseeOf(got)).toBe(owner.email);
     expect(got?.subject).toBe('Spring Creek: time to restain (South) and 1 more');
     const at = ['North (', 'East (', 'South (', 'West ('].map((title) => got?.text?.indexOf(`\n${title}`) ?? -1);
     expect(at.every((position, i) => position > (at[i - 1] ?? 0))).toBe(true);
@@ -101,7 +101,7 @@ describe('two runs at the same time, in two processes', () => {
     const runs = printed.map((text) => JSON.parse(text) as Record<string, number>);
     const sum = (name: string) => runs.reduce((total, one) => total + (one[name] ?? 0), 0);
     expect([sum('mails'), sum('deliveries'), sum('sent')]).toEqual([12, 24, 12]);
-    const addressees = smtp.received.map((got) => (got.to && 'value' in got.to ? got.to.value[0]?.address : ''));
+    const addressees = smtp.received.map(addresseeOf);
     expect([addressees.length, new Set(addressees).size]).toEqual([12, 12]);
   });
 });
@@ -109,7 +109,7 @@ describe('two runs at the same time, in two processes', () => {
 describe('who is reminded', () => {
   const reached = async () => {
     await run();
-    return smtp.received.map((got) => (got.to && 'value' in got.to ? got.to.value[0]?.address : '')).sort();
+    return smtp.received.map(addresseeOf).sort();
   };
 
   it('is every owner, co-owner and caretaker, not a contractor', async () => {
@@ -164,6 +164,23 @@ describe('between queueing and sending', () => {
     database().update(user).set({ remindersOn: false }).where(eq(user.id, owner.id)).run();
     database().update(home).set({ archivedAt: now }).where(eq(home.id, second.place.id)).run();
     expect(await deliverDue(now, smtp.transport)).toMatchObject({ sent: 0, cancelled: 2 });
+  });
+
+  it('a person who has moved to another confirmed address gets it there', async () => {
+    const { owner } = springHome();
+    await queue();
+    database().update(user).set({ email: 'new@example.test' }).where(eq(user.id, owner.id)).run();
+    expect(await deliverDue(now, smtp.transport)).toMatchObject({ sent: 1 });
+    expect(addresseeOf(smtp.received[0])).toBe('new@example.test');
+  });
+
+  it('a plan that cannot be read for a moment is tried again, not given up', async () => {
+    springHome();
+    await queue();
+    database().run('alter table opening rename to opening_elsewhere');
+    expect(await deliverDue(now, smtp.transport)).toMatchObject({ retried: 1, refused: 0 });
+    database().run('alter table opening_elsewhere rename to opening');
+    expect(await deliverDue(new Date(now.getTime() + 120_000), smtp.transport)).toMatchObject({ sent: 1 });
   });
 
   it('a deleted person takes the mail along', async () => {
