@@ -19,7 +19,7 @@ export function Opening() {
           </LinkButton>
         </div>
         <figure className="mt-10">
-          <ol className="grid grid-cols-2 items-end gap-x-5 gap-y-7 lg:grid-cols-4 lg:gap-x-8">
+          <ol className="grid grid-cols-[11fr_8fr] items-end gap-x-5 gap-y-7 lg:grid-cols-[11fr_8fr_11fr_8fr] lg:gap-x-8">
             {exampleWalls.map((wall) => (
               <WallAfterFiveYears key={wall.plan.id} wall={wall} />
             ))}
@@ -41,13 +41,14 @@ function WallAfterFiveYears({ wall }: { wall: ExampleWall }) {
         heightM={2.9}
         gableHeightM={wall.gableHeightM}
         eaveDepthM={plan.eaveDepthM}
+        roofRiseM={2.2}
         courseM={0.24}
         openings={wall.openings}
         colorHex={exampleColor}
         used={wall.used}
         words={`${plan.name} wall from the front, ${Math.round(wall.used * 100)} percent faded`}
       />
-      <div className="min-h-[4.5em]">
+      <div>
         <p className="flex flex-wrap items-center justify-between gap-x-3">
           <b>{plan.name}</b> {plan.state ? <StateMark state={plan.state} /> : null}
         </p>

@@ -1,9 +1,9 @@
 import { type Metadata } from 'next';
-import { exampleDay, exampleFade, exampleMonths, exampleWalls } from './example';
+import { exampleDay, exampleFade, exampleMonths, examplePlace, exampleWalls } from './example';
 import { Opening } from './opening';
 import { WhatItDoes } from './what-it-does';
 import { FadeStrip } from '@/components/drawings/fade-strip';
-import { HousePlan } from '@/components/drawings/house-plan';
+import { SunSlider } from '@/components/drawings/sun-slider';
 import { YearBand } from '@/components/drawings/year-band';
 import { LinkButton } from '@/components/ui/button';
 import { Course } from '@/components/ui/course';
@@ -14,8 +14,8 @@ export default function FirstPage() {
   return (
     <>
       <Opening />
-      <Course heading="Where the sun works" aside="The house plan: your home from above, north up.">
-        <HousePlan walls={exampleWalls.map((wall) => wall.plan)} label="House plan of the example, from above, north up" />
+      <Course heading="Where the sun works" aside="The house plan: your home from above, north up. Move the sun and see which walls it strikes.">
+        <SunSlider walls={exampleWalls.map((wall) => wall.plan)} place={examplePlace} day={exampleDay} label="House plan of the example, from above, north up" />
       </Course>
       <Course heading="Which wall is next" aside="The fade strip: each coat from its own color to grey.">
         <FadeStrip today={exampleDay} walls={exampleFade} />

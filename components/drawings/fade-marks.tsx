@@ -1,24 +1,22 @@
 import { type WorkKind, workKinds } from '@/lib/schemas/vocabulary';
 
-type Drawn = { path: string; open: string };
-
 /** 16 by 16, around (0, 0). Restain: a brush-wide bar; recaulk: a bead; wash: a drop; walkaround: an eye. */
-const marks: Record<WorkKind, Drawn> = {
-  restain: { path: 'M-4-13h8v26h-8z', open: 'M-4-13h8v26h-8z' },
-  recaulk: { path: 'M-5 0a5 5 0 1 0 10 0a5 5 0 1 0-10 0', open: 'M-5 0a5 5 0 1 0 10 0a5 5 0 1 0-10 0' },
-  wash: { path: 'M0-6C3-2 4 0 4 2a4 4 0 0 1-8 0c0-2 1-4 4-8z', open: 'M0-6C3-2 4 0 4 2a4 4 0 0 1-8 0c0-2 1-4 4-8z' },
-  walkaround: { path: 'M0-4.5 4.5 0 0 4.5-4.5 0z', open: 'M0-4.5 4.5 0 0 4.5-4.5 0z' },
+const marks: Record<WorkKind, string> = {
+  restain: 'M-4-13h8v26h-8z',
+  recaulk: 'M-5 0a5 5 0 1 0 10 0a5 5 0 1 0-10 0',
+  wash: 'M0-8C4-2.5 5 0 5 2.5a5 5 0 0 1-10 0C-5 0-4-2.5 0-8z',
+  walkaround: 'M0-6 6 0 0 6-6 0z',
 };
 
 type FadeMarkProps = { kind: WorkKind; done: boolean };
 
 /** Done work is filled, coming work an outline. */
 export function FadeMark({ kind, done }: FadeMarkProps) {
-  const { path, open } = marks[kind];
+  const path = marks[kind];
   return done ? (
     <path d={path} fill="var(--ink)" stroke="var(--snow)" strokeWidth="1.5" />
   ) : (
-    <path d={open} fill="var(--snow)" stroke="var(--ink)" strokeWidth="2" strokeDasharray={kind === 'restain' ? '4 2.5' : undefined} />
+    <path d={path} fill="var(--snow)" stroke="var(--ink)" strokeWidth="2" strokeDasharray={kind === 'restain' ? '4 2.5' : undefined} />
   );
 }
 

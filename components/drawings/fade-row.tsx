@@ -8,11 +8,11 @@ import { type CalendarDay, dayOf } from '@/lib/calendar';
 /** Heights within a row, px. */
 export const row = { height: 92, name: 22, strip: 34, stripHeight: 28, seal: 68, care: 80 };
 
-type RowProps = { wall: FadeWall; scale: Scale; top: number; defs: string };
+type RowProps = { wall: FadeWall; scale: Scale; today: CalendarDay; top: number; defs: string };
 
 const percent = (value: number) => `${value.toFixed(3)}%`;
 
-export function FadeRow({ wall, scale, top, defs }: RowProps) {
+export function FadeRow({ wall, scale, today, top, defs }: RowProps) {
   const from = dayOf(scale.fromYear, 1, 1);
   const to = dayOf(scale.toYear, 1, 1);
   const name = (
@@ -35,8 +35,7 @@ export function FadeRow({ wall, scale, top, defs }: RowProps) {
         {stretches(wall, from, to).map((stretch, i) => (
           <StretchBar key={stretch.from} stretch={stretch} scale={scale} y={top + row.strip} defs={defs} fade={`${defs}-${wall.id}-${i}`} />
         ))}
-        <SealLine wall={wall} scale={scale} y={top + row.seal} to={to} defs={defs} />
-        <Marks wall={wall} scale={scale} top={top} from={from} to={to} />
+        <SealLine wall={wall} scale={scale} y={top + row.seal} today={today} defs={defs} />
       </g>
     </g>
   );
@@ -72,16 +71,17 @@ function StretchBar({ stretch, scale, y, defs, fade }: StretchProps) {
   return (
     <>
       <linearGradient id={fade}>
-        <stop offset="0" stopColor={stretch.start} />
-        <stop offset="1" stopColor={stretch.end} />
+        {stretch.colors.map((color, i) => (
+          <stop key={i} offset={i / (stretch.colors.length - 1)} stopColor={color} />
+        ))}
       </linearGradient>
       <rect {...box} fill={`url(#${fade})`} />
     </>
   );
 }
 
-function SealLine({ wall, scale, y, to, defs }: { wall: FadeWall; scale: Scale; y: number; to: CalendarDay; defs: string }) {
-  if (wall.seal.startedOn === null) return <rect x="0" y={y} width={percent(scale.at(to))} height="5" fill={`url(#${defs}-hatch)`} />;
+function SealLine({ wall, scale, y, today, defs }: { wall: FadeWall; scale: Scale; y: number; today: CalendarDay; defs: string }) {
+  if (wall.seal.startedOn === null) return <rect x="0" y={y} width={percent(scale.at(today))} height="5" fill={`url(#${defs}-hatch)`} />;
   const [x, end] = [scale.at(wall.seal.startedOn), scale.at(usedUpOn(wall.seal.startedOn, wall.seal.lifeMonths))];
   return (
     <>
@@ -91,14 +91,16 @@ function SealLine({ wall, scale, y, to, defs }: { wall: FadeWall; scale: Scale; 
   );
 }
 
-function Marks({ wall, scale, top, from, to }: { wall: FadeWall; scale: Scale; top: number; from: CalendarDay; to: CalendarDay }) {
+/** Past and coming work of one wall, above the line of today. */
+export function FadeMarks({ wall, scale, top }: Omit<RowProps, 'defs' | 'today'>) {
+  const [from, to] = [dayOf(scale.fromYear, 1, 1), dayOf(scale.toYear, 1, 1)];
   const lane = { restain: row.strip + row.stripHeight / 2, recaulk: row.seal + 2.5, wash: row.care, walkaround: row.care };
   const done = wall.past.filter((work) => work.doneOn >= from).map((work) => ({ kind: work.kind, at: scale.at(work.doneOn), done: true }));
   const coming = wall.coming
     .filter((work) => work.opensOn < to)
     .map((work) => ({ kind: work.kind, at: (scale.at(work.opensOn) + scale.at(work.closesOn)) / 2, done: false }));
   return [...done, ...coming].map((mark) => (
-    <svg key={`${mark.kind}-${mark.at}-${mark.done}`} x={percent(mark.at)} y={top + lane[mark.kind]} overflow="visible">
+    <svg pointerEvents="none" key={`${mark.kind}-${mark.at}-${mark.done}`} x={percent(mark.at)} y={top + lane[mark.kind]} overflow="visible">
       <FadeMark kind={mark.kind} done={mark.done} />
     </svg>
   ));

@@ -3,7 +3,7 @@ import { type FadeWall, faded } from '@/components/drawings/fade-time';
 
 /** A stretch of a wall's strip: a coat that fades, a used-up coat, or a time of which nothing is known. */
 export type Stretch =
-  | { what: 'coat'; from: CalendarDay; to: CalendarDay; start: string; end: string }
+  | { what: 'coat'; from: CalendarDay; to: CalendarDay; colors: string[] }
   | { what: 'used up'; from: CalendarDay; to: CalendarDay }
   | { what: 'not known'; from: CalendarDay; to: CalendarDay };
 
@@ -28,6 +28,7 @@ export function stretches(wall: FadeWall, from: CalendarDay, to: CalendarDay): S
 function coat(wall: FadeWall, from: CalendarDay, to: CalendarDay): Stretch[] {
   const gone = usedUpOn(from, wall.coat.lifeMonths);
   if (to <= from) return [];
-  const fades: Stretch = { what: 'coat', from, to: gone < to ? gone : to, start: faded(wall.colorHex, 0), end: faded(wall.colorHex, daysBetween(from, to) / Math.max(1, daysBetween(from, gone))) };
+  const used = Math.min(1, daysBetween(from, to) / Math.max(1, daysBetween(from, gone)));
+  const fades: Stretch = { what: 'coat', from, to: gone < to ? gone : to, colors: [0, 0.25, 0.5, 0.75, 1].map((share) => faded(wall.colorHex, share * used)) };
   return gone < to ? [fades, { what: 'used up', from: gone, to }] : [fades];
 }

@@ -1,6 +1,6 @@
 import { useId } from 'react';
 import { FadeLegend } from '@/components/drawings/fade-marks';
-import { FadeRow, row } from '@/components/drawings/fade-row';
+import { FadeMarks, FadeRow, row } from '@/components/drawings/fade-row';
 import { FadeTable } from '@/components/drawings/fade-table';
 import { fadeScale, type FadeWall, type Scale } from '@/components/drawings/fade-time';
 import { type CalendarDay, dayOf } from '@/lib/calendar';
@@ -23,9 +23,12 @@ export function FadeStrip({ today, walls, legend = true }: FadeStripProps) {
         <Patterns defs={defs} />
         <Years scale={scale} height={height} />
         {walls.map((wall, i) => (
-          <FadeRow key={wall.id} wall={wall} scale={scale} top={axis + i * row.height} defs={defs} />
+          <FadeRow key={wall.id} wall={wall} scale={scale} today={today} top={axis + i * row.height} defs={defs} />
         ))}
-        <line x1={now} x2={now} y1={axis - 14} y2={height} stroke="var(--ink)" strokeWidth="2.5" pointerEvents="none" />
+        <line x1={now} x2={now} y1={axis - 5} y2={height} stroke="var(--ink)" strokeWidth="2.5" pointerEvents="none" />
+        {walls.map((wall, i) => (
+          <FadeMarks key={wall.id} wall={wall} scale={scale} top={axis + i * row.height} />
+        ))}
         <text x={now} y="14" textAnchor="middle" fontSize="15" fontWeight="700" fill="var(--ink)">
           today
         </text>
@@ -43,8 +46,8 @@ function Patterns({ defs }: { defs: string }) {
         <rect width="8" height="8" fill="var(--snow)" />
         <rect width="2.5" height="8" fill="var(--lichen)" />
       </pattern>
-      <pattern id={`${defs}-checks`} width="34" height="28" patternUnits="userSpaceOnUse">
-        <path d="M2 8.5h13l3-1.5h8M14 20h12l4 1.5M0 22h5" fill="none" stroke="#4d4c46" strokeWidth="1.5" strokeLinecap="round" />
+      <pattern id={`${defs}-checks`} width="22" height="28" patternUnits="userSpaceOnUse">
+        <path d="M1 8.5h9l3-1.5h4M9 20.5h9l3 1.5M1 26h5M14 4h6M2 15h7" fill="none" stroke="#4d4c46" strokeWidth="1.5" strokeLinecap="round" />
       </pattern>
     </defs>
   );
@@ -61,7 +64,7 @@ function Years({ scale, height }: { scale: Scale; height: number }) {
         return (
           <g key={year}>
             <line x1={x} x2={x} y1={axis - 6} y2={height} stroke="var(--line)" />
-            <text x={x} dx="3" y={axis - 10} fontSize="14" fill="var(--quiet)" className={`figures ${label}`}>
+            <text x={x} dx="3" y={axis - 10} fontSize="14" fill="var(--quiet)" className={label}>
               {year}
             </text>
           </g>

@@ -37,9 +37,9 @@ const channel = (hex: string, i: number) => parseInt(hex.slice(1 + 2 * i, 3 + 2 
 /** The colour of weathered wood: a coat ends there in light and in dark. */
 export const weathered = '#9b9a92';
 
-/** A coat's colour when a share of its life (0–1) is used up: straight from its own colour to weathered grey. */
+/** A coat's colour when a share of its life (0–1) is used up: it holds at first, then goes to weathered grey. Our rule, for drawing only. */
 export function faded(colorHex: string, used: number): string {
-  const share = Math.min(1, Math.max(0, used));
+  const share = Math.min(1, Math.max(0, used)) ** 1.6;
   const mix = [0, 1, 2].map((i) => Math.round(channel(colorHex, i) + share * (channel(weathered, i) - channel(colorHex, i))));
   return `#${mix.map((value) => value.toString(16).padStart(2, '0')).join('')}`;
 }

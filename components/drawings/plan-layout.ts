@@ -19,7 +19,9 @@ export type HousePlanWall = {
 /** The drawing is 400 by 400; the compass ring runs at `ring` around its middle. */
 export const size = 400;
 export const ring = 180;
-const reach = 150;
+const reach = 154;
+/** Radius of the state's mark on a wall. */
+export const badge = 14;
 const letter = { size: 17, width: 9.4, line: 20 };
 
 export type DrawnWall = {
@@ -56,9 +58,8 @@ function drawWall(wall: HousePlanWall, edge: PlanEdge, place: (p: Point) => Poin
   const middle = { x: (from.x + to.x) / 2, y: (from.y + to.y) / 2 };
   const outward = { x: edge.outward.x, y: -edge.outward.y };
   const thickness = 6 + 3 * doseClass(wall.doseKwhM2);
-  const lines = (named ? 2 : 1) + (named && wall.state ? 1 : 0);
-  const width = named ? Math.max(short(wall.name).length, 5) * letter.width : 26;
-  const box = { width, height: named ? lines * letter.line : 26 };
-  const back = inset(box, outward, thickness / 2 + 6);
+  const width = Math.max(short(wall.name).length, 4.5) * letter.width;
+  const box = named ? { width, height: 2 * letter.line } : { width: 26, height: 26 };
+  const back = inset(box, outward, wall.state ? badge + 4 : thickness / 2 + 6);
   return { wall, from, to, middle, outward, thickness, label: { x: middle.x - outward.x * back, y: middle.y - outward.y * back, ...box } };
 }

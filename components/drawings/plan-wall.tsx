@@ -1,8 +1,8 @@
 import { type Route } from 'next';
 import Link from 'next/link';
 import { type ReactNode } from 'react';
-import { type DrawnWall, planLabel } from '@/components/drawings/plan-layout';
-import { StateShape } from '@/components/ui/state-shape';
+import { badge, type DrawnWall, planLabel } from '@/components/drawings/plan-layout';
+import { type MarkedState, StateShape } from '@/components/ui/state-shape';
 import { directionWord } from '@/lib/home/direction';
 import { doseClass, doseWords } from '@/lib/plan/dose-class';
 
@@ -31,6 +31,7 @@ export function PlanWallMark({ drawn, index, named, lit }: PlanWallProps) {
       <line {...line} stroke="transparent" strokeWidth="46" />
       <line {...line} stroke="var(--ink)" strokeWidth={thickness + 3} className="plan-edge" />
       <line {...line} stroke={`var(--dose-${doseClass(wall.doseKwhM2)})`} strokeWidth={thickness} />
+      {wall.state ? <Badge at={drawn.middle} state={wall.state} /> : null}
       <Label drawn={drawn} index={index} named={named} />
     </>
   );
@@ -45,6 +46,15 @@ export function PlanWallMark({ drawn, index, named, lit }: PlanWallProps) {
     <Link href={wall.href as Route} aria-label={words} className="plan-link">
       {content}
     </Link>
+  );
+}
+
+function Badge({ at, state }: { at: { x: number; y: number }; state: MarkedState }) {
+  return (
+    <>
+      <circle cx={at.x} cy={at.y} r={badge} fill="var(--snow)" stroke="var(--ink)" strokeWidth="2" />
+      <StateShape state={state} x={at.x - 9} y={at.y - (state === 'overdue' ? 10 : 9)} size={18} />
+    </>
   );
 }
 
@@ -70,7 +80,6 @@ function Label({ drawn, index, named }: { drawn: DrawnWall; index: number; named
       <text x={label.x} y={top + 20} textAnchor="middle" fontSize="17" fill="var(--ink)" className="figures">
         {round(wall.doseKwhM2)}
       </text>
-      {wall.state ? <StateShape state={wall.state} x={label.x - 9} y={top + 26} size={18} /> : null}
     </>
   );
 }

@@ -8,6 +8,8 @@ type WallElevationProps = {
   heightM: number;
   gableHeightM?: number;
   eaveDepthM?: number;
+  /** How far the roof rises behind a wall without a gable, m. */
+  roofRiseM?: number;
   /** Exposed face of one course, m. */
   courseM?: number;
   openings?: readonly OpeningKind[];
@@ -21,12 +23,13 @@ type WallElevationProps = {
 const per = 40;
 
 /** A wall from the front, to scale: courses, log ends, gable, doors and windows, the edge of the eave. */
-export function WallElevation({ name, widthM, heightM, gableHeightM = 0, eaveDepthM = 0.45, courseM = 0.19, openings = [], colorHex = '#8a5a32', used = 0, words }: WallElevationProps) {
+export function WallElevation({ name, widthM, heightM, gableHeightM = 0, eaveDepthM = 0.45, roofRiseM = 0, courseM = 0.19, openings = [], colorHex = '#8a5a32', used = 0, words }: WallElevationProps) {
   const clip = useId().replace(/[^a-zA-Z0-9-]/g, '');
   const [w, h, g] = [widthM * per, heightM * per, gableHeightM * per];
   const over = Math.min(eaveDepthM, 1.2) * per;
   const margin = Math.max(over, 14) + 10;
-  const top = -h - g - 16;
+  const rise = g > 0 ? 0 : roofRiseM * per;
+  const top = -h - g - rise - 16;
   const face = `M0 0V${-h}${g > 0 ? `L${w / 2} ${-h - g}L${w} ${-h}` : `H${w}`}V0Z`;
   return (
     <svg viewBox={`${-margin} ${top} ${w + 2 * margin} ${-top + 12}`} className="block h-auto w-full" role="img" aria-label={words ?? `${name} from the front`}>
@@ -46,7 +49,7 @@ export function WallElevation({ name, widthM, heightM, gableHeightM = 0, eaveDep
       {placeOpenings({ widthM, heightM }, openings).map((opening) => (
         <Opening key={opening.x} opening={opening} />
       ))}
-      <Roof w={w} h={h} g={g} over={over} />
+      <Roof w={w} h={h} g={g} over={over} rise={rise} />
       <line x1={-margin} x2={w + margin} y1="1" y2="1" stroke="var(--ink)" strokeWidth="3" />
     </svg>
   );
@@ -78,7 +81,7 @@ function Opening({ opening }: { opening: PlacedOpening }) {
   );
 }
 
-function Roof({ w, h, g, over }: { w: number; h: number; g: number; over: number }) {
+function Roof({ w, h, g, over, rise }: { w: number; h: number; g: number; over: number; rise: number }) {
   if (g > 0) {
     const slope = g / (w / 2);
     return <path d={`M${-over} ${-h + over * slope}L${w / 2} ${-h - g}L${w + over} ${-h + over * slope}`} fill="none" stroke="var(--ink)" strokeWidth="11" strokeLinejoin="miter" />;
@@ -86,6 +89,11 @@ function Roof({ w, h, g, over }: { w: number; h: number; g: number; over: number
   return (
     <>
       <rect x="0" y={-h} width={w} height={Math.min(over, h / 4)} fill="rgb(0 0 0 / 25%)" />
+      {rise > 0 ? <rect x={-over} y={-h - rise - 5} width={w + 2 * over} height={rise + 5} fill="var(--lichen)" /> : null}
+      {Array.from({ length: Math.max(0, Math.floor(rise / 12) - 1) }, (_, i) => (
+        <line key={i} x1={-over} x2={w + over} y1={-h - (i + 1.5) * 12} y2={-h - (i + 1.5) * 12} stroke="rgb(0 0 0 / 22%)" />
+      ))}
+      {rise > 0 ? <line x1={-over} x2={w + over} y1={-h - rise - 5} y2={-h - rise - 5} stroke="var(--ink)" strokeWidth="5" /> : null}
       <rect x={-over} y={-h - 9} width={w + 2 * over} height="11" fill="var(--ink)" />
     </>
   );
