@@ -1,7 +1,7 @@
 import 'server-only';
 import { forbidden, notFound } from 'next/navigation';
 import { cache } from 'react';
-import { type HomeView, homeView } from '@/db/queries/home-view';
+import { type HomeView, homeView, type PlannedWall } from '@/db/queries/home-view';
 import { type Actor, Refused } from '@/lib/permissions';
 import { requireActor } from './actor';
 
@@ -19,4 +19,10 @@ export function pageData<T>(read: () => T): T {
 export const pageHome = cache(async (homeId: string): Promise<{ actor: Actor; view: HomeView }> => {
   const actor = await requireActor(['homeowner']);
   return { actor, view: pageData(() => homeView(actor, homeId)) };
+});
+
+/** One standing wall of that home, planned; otherwise the not-found page. */
+export const pageWall = cache(async (homeId: string, wallId: string): Promise<PlannedWall> => {
+  const { view } = await pageHome(homeId);
+  return view.walls.find(({ wall }) => wall.id === wallId) ?? notFound();
 });

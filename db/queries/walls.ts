@@ -1,4 +1,4 @@
-import { and, asc, eq, isNull, max } from 'drizzle-orm';
+import { and, asc, eq, isNotNull, isNull, max } from 'drizzle-orm';
 import { type Actor, type HomeVerb, Refused } from '@/lib/permissions';
 import { database, transaction } from '../client';
 import { homeFor, wallFor } from '../scope';
@@ -61,13 +61,15 @@ export function removeWall(actor: Actor, wallId: string, now: Date): WallRow {
 
 export function restoreWall(actor: Actor, homeId: string, wallId: string): void {
   homeFor(actor, homeId, 'home.edit');
-  database().update(wall).set({ removedAt: null }).where(and(eq(wall.id, wallId), eq(wall.homeId, homeId))).run();
+  const { changes } = database().update(wall).set({ removedAt: null }).where(and(eq(wall.id, wallId), eq(wall.homeId, homeId))).run();
+  if (changes === 0) throw new Refused('not found', 'That wall');
 }
 
-/** Walls that were taken out and can come back. */
-export function removedWalls(actor: Actor, homeId: string): WallRow[] {
+/** A wall of this home that was taken out and can come back. */
+export function takenOutWall(actor: Actor, homeId: string, wallId: string | undefined): WallRow | undefined {
+  if (!wallId) return undefined;
   homeFor(actor, homeId, 'home.edit');
-  return database().select().from(wall).where(eq(wall.homeId, homeId)).orderBy(asc(wall.position)).all().filter((row) => row.removedAt !== null);
+  return database().select().from(wall).where(and(eq(wall.id, wallId), eq(wall.homeId, homeId), isNotNull(wall.removedAt))).get();
 }
 
 /** Turns the whole house: every wall's direction by the same angle, degrees clockwise. */

@@ -1,0 +1,73 @@
+import { type Metadata } from 'next';
+import { pageHome, pageWall } from '@/app/_server/page-data';
+import { whatWasSaid } from '@/app/_server/said';
+import { WallElevation } from '@/components/drawings/wall-elevation';
+import { MonthsOfSun } from '@/components/home/months-of-sun';
+import { Neighbours } from '@/components/home/neighbours';
+import { RecordCourse } from '@/components/home/record-course';
+import { Said } from '@/components/home/said';
+import { WallFigures } from '@/components/home/wall-figures';
+import { WallWork } from '@/components/home/wall-work';
+import { LinkButton } from '@/components/ui/button';
+import { Course } from '@/components/ui/course';
+import { PageHead } from '@/components/ui/page-head';
+import { unitsOf } from '@/db/queries/units';
+import { dayIn } from '@/lib/calendar';
+import { stationById } from '@/lib/climate';
+import { coatLeft } from '@/lib/coat';
+import { directionWord } from '@/lib/home/direction';
+import { wallMeasures } from '@/lib/home/wall-measures';
+import { can } from '@/lib/permissions';
+
+type Props = { params: Promise<{ homeId: string; wallId: string }> };
+
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  const { homeId, wallId } = await params;
+  return { title: (await pageWall(homeId, wallId)).wall.name };
+}
+
+export default async function WallPage({ params }: Props) {
+  const { homeId, wallId } = await params;
+  const { actor, view } = await pageHome(homeId);
+  const planned = await pageWall(homeId, wallId);
+  const { home, membership, walls } = view;
+  const { wall, openings, exposure, coat, items } = planned;
+  const units = unitsOf(actor);
+  const today = dayIn(home.timeZone, new Date());
+  const records = view.records.filter((record) => record.wallIds.includes(wallId));
+  const { words, courseM } = wallMeasures(wall, openings, home.sidingNominalIn, units);
+  const used = coat.startedOn ? 1 - coatLeft(coat.startedOn, coat.lifeMonths, today) : 0;
+  const mayEdit = can(actor, 'home.edit', { membership });
+  return (
+    <main id="main">
+      <PageHead title={wall.name} lead={`Faces ${directionWord(wall.azimuthDeg)}. ${words}`} path={[{ href: '/homes', label: 'Homes' }, { href: `/homes/${homeId}`, label: home.name }]} actions={mayEdit ? <LinkButton href={`/homes/${homeId}/walls/${wallId}/edit`} look="quiet">Edit this wall</LinkButton> : null} />
+      <Said words={await whatWasSaid()} />
+      <Course as="div">
+        <WallElevation name={wall.name} widthM={wall.widthM} heightM={wall.heightM} gableHeightM={wall.gableHeightM} eaveDepthM={wall.eaveDepthM} courseM={courseM} openings={openings} colorHex={wall.colorHex} used={used} words={`${wall.name} from the front. ${words}`} />
+      </Course>
+      <Course heading="Next work">
+        <WallWork homeId={homeId} wallId={wallId} items={items} today={today} mayLog={can(actor, 'work.log', { membership })} />
+      </Course>
+      <Course heading="Coat and caulk" aside="Open a figure to see how it comes about.">
+        <div className="flex flex-wrap gap-x-10">
+          <WallFigures planned={{ ...planned, exposure: null }} home={home} station={undefined} today={today} units={units} films={['coat', 'seal']} />
+        </div>
+      </Course>
+      <Course heading="Sun">
+        <div className="flex flex-wrap gap-x-10">
+          <WallFigures planned={planned} home={home} station={stationById(home.stationId)} today={today} units={units} films={[]} hours />
+        </div>
+        {exposure ? <MonthsOfSun doseKwhM2={exposure.doseMonthly} hours={exposure.sunHoursMonthly} /> : null}
+      </Course>
+      <Course heading="Done on this wall" aside={<LinkButton href={`/homes/${homeId}/record`} look="plain">The whole record</LinkButton>}>
+        {records.length === 0 ? <p className="text-quiet">Nothing yet.</p> : null}
+      </Course>
+      <ul>
+        {records.map((record) => (
+          <RecordCourse key={record.id} record={record} walls={walls.map((one) => one.wall)} units={units} />
+        ))}
+      </ul>
+      <Neighbours homeId={homeId} walls={walls.map((one) => one.wall)} wallId={wallId} />
+    </main>
+  );
+}

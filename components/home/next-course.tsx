@@ -1,0 +1,54 @@
+import { type ReactNode } from 'react';
+import { When } from '@/components/plan/when';
+import { LinkButton } from '@/components/ui/button';
+import { Course, type Tone } from '@/components/ui/course';
+import { StateMark } from '@/components/ui/state-mark';
+import { type CalendarDay } from '@/lib/calendar';
+import { type WorkState } from '@/lib/care/types';
+import { wallWords, type WorkGroup } from '@/lib/home/next-work';
+import { workKinds } from '@/lib/schemas/vocabulary';
+
+const tones: Record<WorkState, Tone> = { overdue: 'ember', due: 'honey', 'due soon': 'honey', later: 'plain' };
+
+type NextCourseProps = {
+  homeId: string;
+  /** The most pressing work and what falls into the same window with it. */
+  groups: readonly WorkGroup[];
+  wallCount: number;
+  today: CalendarDay;
+  mayLog: boolean;
+  /** Figures of the wall that decides. */
+  children: ReactNode;
+};
+
+/** What is next and why, in one sentence. */
+export function NextCourse({ homeId, groups, wallCount, today, mayLog, children }: NextCourseProps) {
+  const [first] = groups;
+  if (!first) return null;
+  const query = new URLSearchParams([['kind', first.kind], ...first.walls.map(({ id }) => ['wall', id])]);
+  const because = first.items[0]?.because;
+  return (
+    <Course heading="Next" tone={tones[first.state]} aside={<StateMark state={first.state} />}>
+      <p className="figures max-w-4xl text-2xl md:text-3xl">
+        {groups.map((group, i) => (
+          <span key={`${group.kind} ${group.opensOn}`}>
+            {i > 0 ? ', ' : ''}
+            {i === 0 ? workKinds[group.kind] : workKinds[group.kind].toLowerCase()} {wallWords(group.walls, wallCount)}
+          </span>
+        ))}
+        : <When spell={first} today={today} />.
+      </p>
+      {because ? <p className="mt-3 max-w-prose text-lg">{because}</p> : null}
+      <div className="mt-3 flex flex-wrap gap-x-10">{children}</div>
+      <div className="no-print mt-5 flex flex-wrap gap-3">
+        {mayLog ? <LinkButton href={`/homes/${homeId}/log?${query}`}>Log it</LinkButton> : null}
+        <LinkButton href={`/homes/${homeId}/buy`} look="quiet">
+          What to buy
+        </LinkButton>
+        <LinkButton href={`/homes/${homeId}/plan`} look="quiet">
+          The whole plan
+        </LinkButton>
+      </div>
+    </Course>
+  );
+}

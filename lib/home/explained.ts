@@ -1,0 +1,67 @@
+import { coatLeft, monthsInWords } from '@/lib/coat';
+import { exactDay } from '@/lib/calendar-words';
+import { type CalendarDay } from '@/lib/calendar';
+import { type FilmLife } from '@/lib/care/types';
+import { type Explanation } from '@/lib/explain';
+import { directionWord } from '@/lib/home/direction';
+import { shades, type Shade, type UnitSystem } from '@/lib/schemas/vocabulary';
+import { lengthText } from '@/lib/units';
+
+type SunlitWall = { azimuthDeg: number; eaveDepthM: number; shade: Shade; shadeHeightDeg: number };
+type Where = { latitude: number; longitude: number };
+type Radiation = { name: string; state: string };
+
+const whole = (value: number) => Math.round(value).toLocaleString('en-US');
+
+const wallInputs = (wall: SunlitWall, units: UnitSystem) => [
+  { label: 'Faces', value: `${whole(wall.azimuthDeg)}°, ${directionWord(wall.azimuthDeg)}` },
+  { label: 'Depth of the eave', value: lengthText(wall.eaveDepthM, units) },
+  { label: 'In front', value: wall.shade === 'open' ? shades.open : `${shades[wall.shade]}, ${whole(wall.shadeHeightDeg)}° high` },
+];
+
+const placeInput = ({ latitude, longitude }: Where) => ({ label: 'Place', value: `${latitude.toFixed(2)}° N, ${longitude.toFixed(2)}° E` });
+
+export const sunHoursExplained = (hours: number, wall: SunlitWall, where: Where, units: UnitSystem): Explanation => ({
+  figure: 'Direct sun in a year',
+  value: `${whole(hours)} hours`,
+  formula: 'the time in which the sun stands above the horizon and in front of the wall, weighted by the share of the wall that the eave and what stands in front leave in the sun',
+  inputs: [placeInput(where), ...wallInputs(wall, units)],
+  sources: [
+    { text: 'Sun position: suncalc 2, after Meeus, Astronomical Algorithms, ch. 25; its refraction taken out', ground: 'published' },
+    { text: 'Clouds do not count here: they count in the sun dose', ground: 'our rule' },
+  ],
+});
+
+export const sunDoseExplained = (dose: number, wall: SunlitWall, where: Where, station: Radiation | undefined, units: UnitSystem): Explanation => ({
+  figure: 'Sun dose of a mean year',
+  value: `${whole(dose)} kWh/m²`,
+  formula: 'direct sun + light of the sky + light from the ground onto the wall, hour by hour on the mean day of each month, with the clouds of a mean year',
+  inputs: [placeInput(where), ...wallInputs(wall, units), { label: 'Reflected by the ground', value: '20 %' }, ...(station ? [{ label: 'Sunshine measured for', value: `${station.name}, ${station.state}` }] : [])],
+  sources: [
+    { text: 'Radiation by month: NREL TMY3, credit NREL / US DOE', ground: 'published' },
+    { text: 'Diffuse share: Erbs, Klein & Duffie (1982), Solar Energy 28:293', ground: 'published' },
+    { text: 'Hours of a day: Collares-Pereira & Rabl (1979); Liu & Jordan (1960)', ground: 'published' },
+    { text: 'Sky over a tilted surface: Hay & Davies (1980)', ground: 'published' },
+    { text: 'Shade from trees and buildings', ground: 'our rule' },
+  ],
+});
+
+/** The share of a coat or seal that remains today, as whole percent; null when its start is not known. */
+export function leftExplained(film: FilmLife, today: CalendarDay): { percent: number; explanation: Explanation } | null {
+  if (film.startedOn === null) return null;
+  const percent = Math.round(100 * coatLeft(film.startedOn, film.lifeMonths, today));
+  return {
+    percent,
+    explanation: {
+      figure: film.film === 'coat' ? 'Coat left' : 'Seal left',
+      value: `${percent} %`,
+      formula: '1 − days since it was put on ÷ days that it is expected to last',
+      inputs: [
+        { label: 'Put on', value: exactDay(film.startedOn) },
+        { label: film.film === 'coat' ? 'Coat life of this wall' : 'Seal life of this wall', value: monthsInWords(film.lifeMonths) },
+        { label: 'Today', value: exactDay(today) },
+      ],
+      sources: [{ text: 'A film wears evenly over its life', ground: 'our rule' }],
+    },
+  };
+}
