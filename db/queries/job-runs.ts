@@ -9,8 +9,8 @@ export type JobRun = typeof jobRun.$inferSelect;
 export const startJobRun = (job: string, now: Date): string =>
   database().insert(jobRun).values({ job, startedAt: now }).returning({ id: jobRun.id }).get().id;
 
-export function finishJobRun(runId: string, at: Date, ended: { outcome: Record<string, number> } | { error: string }): void {
-  database().update(jobRun).set({ finishedAt: at, ...ended }).where(eq(jobRun.id, runId)).run();
+export function finishJobRun(runId: string, at: Date, outcome: Record<string, number>, error: string | null): void {
+  database().update(jobRun).set({ finishedAt: at, outcome, error }).where(eq(jobRun.id, runId)).run();
 }
 
 /** Newest first. */

@@ -1,4 +1,4 @@
-import { eq } from 'drizzle-orm';
+import { eq, sql } from 'drizzle-orm';
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { database } from '@/db/client';
 import { homesToRemind, itemsNearlyDue, remindHome } from '@/db/queries/reminders';
@@ -79,9 +79,18 @@ describe('a reminder run', () => {
     database().update(workItem).set({ remindOn: '2027-05-15' }).run();
     await expect(run()).rejects.toThrow('delivery');
     const [, failed] = database().select().from(jobRun).all();
-    expect(failed?.outcome).toBeNull();
+    expect(failed?.outcome).toMatchObject({ homes: 0, mails: 0 });
     expect(failed?.error).toContain('delivery');
     expect(failed?.finishedAt).not.toBeNull();
+  });
+
+  it('goes on with the other homes when one fails', async () => {
+    const { place } = springHome({ name: 'Bad' });
+    springHome({ name: 'Good' });
+    database().run(sql.raw(`create trigger no_delivery before insert on delivery when new.home_id = '${place.id}' begin select raise(abort, 'disk trouble'); end`));
+    await expect(run()).rejects.toThrow();
+    expect(smtp.received.map((got) => got.subject)).toEqual(['Good: time to restain (South) and 1 more']);
+    expect(database().select().from(jobRun).all()).toMatchObject([{ outcome: { homes: 1, mails: 1, sent: 1 }, error: expect.stringContaining('disk trouble') as string }]);
   });
 
   it('leaves no trace of a home whose transaction fails', async () => {

@@ -14,10 +14,10 @@ const words: Record<string, string> = {
 };
 
 function outcomeOf(run: JobRun): string {
-  if (run.error) return `Failed: ${run.error}`;
   if (!run.outcome) return 'Still running, or cut off before its end.';
   const counted = Object.entries(run.outcome).filter(([, n]) => n > 0);
-  return counted.length === 0 ? 'Nothing was due.' : counted.map(([name, n]) => `${n} ${words[name] ?? name}`).join(', ');
+  if (counted.length === 0) return run.error ? '' : 'Nothing was due.';
+  return `${counted.map(([name, n]) => `${n} ${words[name] ?? name}`).join(', ')}.`;
 }
 
 const seconds = (run: JobRun) => (run.finishedAt ? `${((run.finishedAt.getTime() - run.startedAt.getTime()) / 1000).toFixed(1)} s` : '–');
@@ -39,7 +39,10 @@ export function JobRuns({ runs }: { runs: JobRun[] }) {
             <tr key={run.id} className="border-b border-line align-top">
               <td className="py-2 pr-6 whitespace-nowrap">{utcMinute(run.startedAt)}</td>
               <td className="py-2 pr-6 whitespace-nowrap">{seconds(run)}</td>
-              <td className={`py-2 ${run.error ? 'font-semibold text-ember' : ''}`}>{outcomeOf(run)}</td>
+              <td className="py-2">
+                {run.error ? <p className="font-semibold text-ember">Something failed: {run.error}</p> : null}
+                {outcomeOf(run)}
+              </td>
             </tr>
           ))}
         </tbody>
