@@ -1,0 +1,56 @@
+import { Body, Equator, Horizon, MakeTime, Observer } from 'astronomy-engine';
+import fc from 'fast-check';
+import { describe, expect, test } from 'vitest';
+import { sunPosition } from '@/lib/sun';
+import { readCsv } from '../fixtures/csv';
+
+/**
+ * Tolerance 0.05° on elevation and on azimuth·cos(elevation): the sun moves that far in 12 s, and a wall's hours cannot tell.
+ * suncalc's own documentation promises about 0.01° for the sun; the larger of the two counts.
+ */
+const toleranceDeg = 0.05;
+const radians = Math.PI / 180;
+const turned = (a: number, b: number) => Math.abs(((a - b + 540) % 360) - 180);
+
+describe('published example, NREL/TP-560-34302 (Reda & Andreas)', () => {
+  const published = new Map(readCsv('spa_published_example.csv').map((row) => [row.quantity, Number(row['published_NREL_TP-560-34302'])]));
+  const at = sunPosition(new Date('2003-10-17T19:30:30Z'), { latitude: 39.742476, longitude: -105.1786, elevationM: 1830.14 });
+
+  test('elevation without refraction', () => {
+    expect(Math.abs(at.elevationDeg - (published.get('topocentric elevation without refraction (deg)') ?? NaN))).toBeLessThan(toleranceDeg);
+  });
+
+  test('azimuth clockwise from north', () => {
+    expect(turned(at.azimuthDeg, published.get('azimuth clockwise from north (deg)') ?? NaN)).toBeLessThan(toleranceDeg);
+  });
+});
+
+describe('NREL SPA at six places through 2027', () => {
+  const rows = readCsv('solar_position.csv');
+
+  test('the table is there', () => expect(rows.length).toBe(30));
+
+  test.each(rows)('$place $utc', (row) => {
+    const at = sunPosition(new Date(row.utc ?? ''), { latitude: Number(row.lat), longitude: Number(row.lon) });
+    const elevation = Number(row.elevation_true_deg);
+    expect(Math.abs(at.elevationDeg - elevation)).toBeLessThan(toleranceDeg);
+    expect(turned(at.azimuthDeg, Number(row.azimuth_deg)) * Math.cos(elevation * radians)).toBeLessThan(toleranceDeg);
+  });
+});
+
+describe('a second ephemeris, astronomy-engine', () => {
+  test('any instant of 2000–2060 at any inhabited place', () => {
+    const instants = fc.date({ min: new Date('2000-01-01T00:00:00Z'), max: new Date('2060-01-01T00:00:00Z'), noInvalidDate: true });
+    fc.assert(
+      fc.property(instants, fc.double({ min: -72, max: 72, noNaN: true }), fc.double({ min: -180, max: 180, noNaN: true }), (instant, latitude, longitude) => {
+        const observer = new Observer(latitude, longitude, 0);
+        const { ra, dec } = Equator(Body.Sun, MakeTime(instant), observer, true, true);
+        const truth = Horizon(MakeTime(instant), observer, ra, dec);
+        const at = sunPosition(instant, { latitude, longitude });
+        expect(Math.abs(at.elevationDeg - truth.altitude)).toBeLessThan(toleranceDeg);
+        expect(turned(at.azimuthDeg, truth.azimuth) * Math.cos(truth.altitude * radians)).toBeLessThan(toleranceDeg);
+      }),
+      { numRuns: 500 },
+    );
+  });
+});
