@@ -19,7 +19,7 @@ export function Opening() {
           </LinkButton>
         </div>
         <figure className="mt-10">
-          <ol className="grid grid-cols-[11fr_8fr] items-end gap-x-5 gap-y-7 lg:grid-cols-[11fr_8fr_11fr_8fr] lg:gap-x-8">
+          <ol className="grid grid-cols-[127fr_97fr] gap-x-5 gap-y-7 lg:grid-cols-[127fr_97fr_127fr_97fr] lg:gap-x-8">
             {exampleWalls.map((wall) => (
               <WallAfterFiveYears key={wall.plan.id} wall={wall} />
             ))}
@@ -34,7 +34,7 @@ export function Opening() {
 function WallAfterFiveYears({ wall }: { wall: ExampleWall }) {
   const { plan } = wall;
   return (
-    <li className="grid min-w-0 gap-2">
+    <li className="grid min-w-0 content-start gap-2">
       <WallElevation
         name={plan.name}
         widthM={plan.widthM}
@@ -52,7 +52,7 @@ function WallAfterFiveYears({ wall }: { wall: ExampleWall }) {
         <p className="flex flex-wrap items-center justify-between gap-x-3">
           <b>{plan.name}</b> {plan.state ? <StateMark state={plan.state} /> : null}
         </p>
-        <p className="text-quiet">Coat {wall.left}</p>
+        <p className="text-quiet">{wall.left}</p>
       </div>
     </li>
   );

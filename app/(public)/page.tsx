@@ -17,7 +17,7 @@ export default function FirstPage() {
       <Course heading="Where the sun works" aside="The house plan: your home from above, north up. Move the sun and see which walls it strikes.">
         <SunSlider walls={exampleWalls.map((wall) => wall.plan)} place={examplePlace} day={exampleDay} label="House plan of the example, from above, north up" />
       </Course>
-      <Course heading="Which wall is next" aside="The fade strip: each coat from its own color to grey.">
+      <Course heading="Which wall is next" aside="The fade strip: each coat from its own color to weathered gray.">
         <FadeStrip today={exampleDay} walls={exampleFade} />
       </Course>
       <Course heading="When a coat can cure" aside="The year band: from the climate normals of the nearest station.">

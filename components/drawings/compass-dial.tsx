@@ -69,7 +69,7 @@ export function CompassDial({ name, defaultValue = 180, label = 'Which way does 
           onChange={(event) => turnTo(event.target.valueAsNumber)}
           aria-valuetext={`${degrees} degrees, front faces ${directionWord(degrees)}`}
           aria-describedby={[hint ? `${id}-hint` : null, error ? `${id}-error` : null].filter(Boolean).join(' ') || undefined}
-          className="h-11 min-w-0 flex-1 accent-spruce"
+          className="slider min-w-0 flex-1"
         />
         <output htmlFor={id} className="figures w-14 text-right text-xl">
           {degrees}°

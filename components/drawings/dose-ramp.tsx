@@ -1,7 +1,17 @@
 import { doseBounds } from '@/lib/plan/dose-class';
 
+/** The ramp with what it means. */
+export function DoseLegend() {
+  return (
+    <div className="text-sm text-quiet">
+      <DoseRamp />
+      Sun dose of a mean year, kWh/m². Dashed line: edge of the eaves.
+    </div>
+  );
+}
+
 /** Legend of the sun-dose ramp: five steps, thicker and redder with more sun. */
-export function DoseRamp() {
+function DoseRamp() {
   return (
     <svg viewBox="0 0 312 44" className="block h-auto w-full max-w-80" role="img" aria-label={`Sun dose of a mean year in kWh/m², five steps from ${doseBounds[0]} to ${doseBounds[5]}`}>
       {[1, 2, 3, 4, 5].map((step) => {

@@ -1,5 +1,5 @@
 import { CompassRing } from '@/components/drawings/compass-ring';
-import { DoseRamp } from '@/components/drawings/dose-ramp';
+import { DoseLegend } from '@/components/drawings/dose-ramp';
 import { drawPlan, type HousePlanWall, size } from '@/components/drawings/plan-layout';
 import { Rays, strikes, SunMark, type SunNow } from '@/components/drawings/plan-sun';
 import { PlanWallMark } from '@/components/drawings/plan-wall';
@@ -48,9 +48,8 @@ export function HousePlan({ walls, sun, label = 'House plan from above, north up
         </ol>
       )}
       {legend ? (
-        <figcaption className="mx-auto mt-3 max-w-[28rem] text-sm text-quiet">
-          <DoseRamp />
-          Sun dose of a mean year, kWh/m². Dashed line: edge of the eaves.
+        <figcaption className="mx-auto mt-3 max-w-[28rem]">
+          <DoseLegend />
         </figcaption>
       ) : null}
     </figure>

@@ -84,17 +84,17 @@ function Opening({ opening }: { opening: PlacedOpening }) {
 function Roof({ w, h, g, over, rise }: { w: number; h: number; g: number; over: number; rise: number }) {
   if (g > 0) {
     const slope = g / (w / 2);
-    return <path d={`M${-over} ${-h + over * slope}L${w / 2} ${-h - g}L${w + over} ${-h + over * slope}`} fill="none" stroke="var(--ink)" strokeWidth="11" strokeLinejoin="miter" />;
+    return <path d={`M${-over} ${-h + over * slope}L${w / 2} ${-h - g}L${w + over} ${-h + over * slope}`} fill="none" stroke="var(--eave)" strokeWidth="11" strokeLinejoin="miter" />;
   }
   return (
     <>
       <rect x="0" y={-h} width={w} height={Math.min(over, h / 4)} fill="rgb(0 0 0 / 25%)" />
-      {rise > 0 ? <rect x={-over} y={-h - rise - 5} width={w + 2 * over} height={rise + 5} fill="var(--lichen)" /> : null}
+      {rise > 0 ? <rect x={-over} y={-h - rise - 5} width={w + 2 * over} height={rise + 5} fill="var(--roofing)" /> : null}
       {Array.from({ length: Math.max(0, Math.floor(rise / 12) - 1) }, (_, i) => (
         <line key={i} x1={-over} x2={w + over} y1={-h - (i + 1.5) * 12} y2={-h - (i + 1.5) * 12} stroke="rgb(0 0 0 / 22%)" />
       ))}
-      {rise > 0 ? <line x1={-over} x2={w + over} y1={-h - rise - 5} y2={-h - rise - 5} stroke="var(--ink)" strokeWidth="5" /> : null}
-      <rect x={-over} y={-h - 9} width={w + 2 * over} height="11" fill="var(--ink)" />
+      {rise > 0 ? <line x1={-over} x2={w + over} y1={-h - rise - 5} y2={-h - rise - 5} stroke="var(--eave)" strokeWidth="5" /> : null}
+      <rect x={-over} y={-h - 9} width={w + 2 * over} height="11" fill="var(--eave)" />
     </>
   );
 }
