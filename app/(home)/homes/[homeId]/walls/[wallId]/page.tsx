@@ -1,8 +1,8 @@
 import { type Metadata } from 'next';
 import { pageHome, pageWall } from '@/app/_server/page-data';
 import { whatWasSaid } from '@/app/_server/said';
+import { MonthlySun } from '@/components/charts/monthly-sun';
 import { WallElevation } from '@/components/drawings/wall-elevation';
-import { MonthsOfSun } from '@/components/home/months-of-sun';
 import { Neighbours } from '@/components/home/neighbours';
 import { RecordCourse } from '@/components/home/record-course';
 import { Said } from '@/components/home/said';
@@ -57,7 +57,7 @@ export default async function WallPage({ params }: Props) {
         <div className="flex flex-wrap gap-x-10">
           <WallFigures planned={planned} home={home} station={stationById(home.stationId)} today={today} units={units} films={[]} hours />
         </div>
-        {exposure ? <MonthsOfSun doseKwhM2={exposure.doseMonthly} hours={exposure.sunHoursMonthly} /> : null}
+        {exposure ? <MonthlySun wallName={wall.name} doseMonthly={exposure.doseMonthly} /> : null}
       </Course>
       <Course heading="Done on this wall" aside={<LinkButton href={`/homes/${homeId}/record`} look="plain">The whole record</LinkButton>}>
         {records.length === 0 ? <p className="text-quiet">Nothing yet.</p> : null}
