@@ -24,7 +24,7 @@ export function planChange(before: readonly WorkItem[], after: readonly WorkItem
     (Object.keys(next) as WorkKind[]).flatMap((kind) => {
       const find = (items: readonly WorkItem[]) => items.find((item) => item.wallId === wall.id && item.kind === kind);
       const [old, now] = [find(before), find(after)];
-      if (!now) return old ? [`${wall.name}: no ${next[kind]} is planned any more.`] : [];
+      if (!now) return old ? [`${wall.name}: no ${kind} is planned any more.`] : [];
       if (!old) return [`${wall.name}: ${next[kind]} in ${aboutDay(now.window.opensOn)}.`];
       if (aboutDay(old.window.opensOn) === aboutDay(now.window.opensOn)) return [];
       return [`${wall.name}: ${next[kind]} moves ${move(old.window.opensOn, now.window.opensOn)}.`];
