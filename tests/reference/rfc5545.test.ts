@@ -36,10 +36,10 @@ const part = (name: string, values: fc.Arbitrary<(string | number)[]>) => values
 const interval = fc.integer({ min: 1, max: 6 }).map((n) => `;INTERVAL=${n}`);
 const end = fc.oneof(fc.constant(''), fc.integer({ min: 1, max: 30 }).map((n) => `;COUNT=${n}`), fc.constant(';UNTIL=20270615'));
 // ical.js counts days from a month's end in monthly rules only, lets days past it run over in yearly ones, and takes
-// a day of the year that is named twice for two: such rules are left out here.
+// a day of the year that is named twice for two, and can lose the first of two fifth weekdays: such rules are left out here.
 const dates = fc.tuple(fc.integer({ min: 1, max: 28 }), some(upTo(31), 3)).map(([sure, more]) => `;BYMONTHDAY=${[...new Set([sure, ...more])].join(',')}`);
 const monthDays = part('BYMONTHDAY', some([...upTo(31), -1, -2, -3, -15, -31], 4));
-const nth = fc.tuple(fc.constantFrom(1, 2, 3, 4, 5, -1, -2, -4), fc.constantFrom(...weekdays)).map(([n, day]) => `${n}${day}`);
+const nth = fc.tuple(fc.constantFrom(1, 2, 3, 4, -1, -2, -4), fc.constantFrom(...weekdays)).map(([n, day]) => `${n}${day}`);
 const months = part('BYMONTH', some(upTo(12), 3));
 
 const rules = fc
