@@ -1,4 +1,5 @@
 import { type z } from 'zod';
+import { alreadyKnownMail } from './kinds/already-known';
 import { reminderMail } from './kinds/reminder';
 import { resetMail } from './kinds/reset';
 import { sharedMail } from './kinds/shared';
@@ -15,6 +16,7 @@ const definitions = {
   'sign-in': signInMail,
   reset: resetMail,
   shared: sharedMail,
+  'already-known': alreadyKnownMail,
 };
 
 export type MailKind = keyof typeof definitions;
