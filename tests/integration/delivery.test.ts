@@ -75,6 +75,20 @@ describe('delivery to a real mail server', () => {
     expect(smtp.received).toEqual([]);
   });
 
+  it('does not blame the recipient when our own address or sign-in is refused', async () => {
+    enqueue('innocent');
+    smtp.answers.push({ from: 550 });
+    expect(await deliverDue(now, smtp.transport)).toEqual({ ...none, retried: 1 });
+    const soon = (minutes: number) => new Date(now.getTime() + minutes * minute);
+    expect(await deliverDue(soon(5), smtpTransport(smtp.url.replace('smtp://', 'smtp://user:password@')))).toEqual({ ...none, retried: 1 });
+    expect(await deliverDue(soon(15), smtp.transport)).toEqual({ ...none, sent: 1 });
+  });
+
+  it('gives up on an address that no mail server could take', async () => {
+    enqueueMail({ kind: 'verify', idempotencyKey: 'odd', toAddress: 'nobody\r\n@ex ample', props: { name: null, url: link, hours: 24 }, now });
+    expect(await deliverDue(now, smtp.transport)).toEqual({ ...none, refused: 1 });
+  });
+
   it('tries again when the line is cut in the middle of a message', async () => {
     enqueue('cut');
     smtp.answers.push('drop');

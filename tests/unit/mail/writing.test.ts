@@ -1,6 +1,7 @@
 // @vitest-environment jsdom
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import { framed } from '@/lib/mail/framed';
 import { escapeHtml, html, webAddress } from '@/lib/mail/html';
 import { oneLine } from '@/lib/mail/letter';
 import { isSecret, renderMail } from '@/lib/mail/registry';
@@ -70,6 +71,17 @@ describe('the html template', () => {
   it('links to web addresses only', () => {
     expect(() => webAddress('javascript:alert(1)')).toThrow('not a web address');
     expect(webAddress('https://eavewright.example/x')).toBe('https://eavewright.example/x');
+  });
+});
+
+describe('a message in a frame', () => {
+  it('may load nothing from elsewhere and opens its links outside the frame, with or without a head', () => {
+    for (const page of ['<html><head lang="en"><title>t</title></head><body><a href="https://example.test">x</a></body></html>', '<a href="https://example.test">x</a>']) {
+      const document = read(framed(page));
+      expect(document.head.querySelector('meta')?.content).toMatch(/^default-src 'none'/);
+      expect(document.head.querySelector('base')?.target).toBe('_blank');
+      expect(document.body.querySelector('a')?.textContent).toBe('x');
+    }
   });
 });
 
