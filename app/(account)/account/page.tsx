@@ -1,0 +1,49 @@
+import { type Metadata } from 'next';
+import { requireActor } from '@/app/_server/actor';
+import { ActionForm } from '@/components/ui/action-form';
+import { CheckField } from '@/components/ui/check-field';
+import { RadioCourses } from '@/components/ui/choice-courses';
+import { Course } from '@/components/ui/course';
+import { Field } from '@/components/ui/field';
+import { PageHead } from '@/components/ui/page-head';
+import { SubmitButton } from '@/components/ui/submit-button';
+import { profileOf } from '@/db/queries/people';
+import { changePassword, saveProfile, signOutEverywhere } from './actions';
+
+export const metadata: Metadata = { title: 'Your account' };
+
+const units = [
+  { value: 'us', label: 'Feet, gallons, °F' },
+  { value: 'metric', label: 'Metres, litres, °C' },
+];
+
+export default async function AccountPage() {
+  const actor = await requireActor();
+  const profile = profileOf(actor);
+  return (
+    <>
+      <PageHead title="Your account" lead={profile.email} />
+      <Course heading="You">
+        <ActionForm action={saveProfile} saved="Saved.">
+          <Field label="Your name" name="name" defaultValue={profile.name} autoComplete="name" required />
+          {actor.role === 'contractor' ? <Field label="Company" name="company" defaultValue={profile.company ?? ''} autoComplete="organization" optional /> : null}
+          <RadioCourses legend="Units" name="units" options={units} defaultValue={profile.units} inRow />
+          <CheckField label="Remind me by mail" name="remindersOn" defaultChecked={profile.remindersOn} hint="One mail a home, only when something is due" />
+          <SubmitButton>Save</SubmitButton>
+        </ActionForm>
+      </Course>
+      <Course heading={profile.hasPassword ? 'Change the password' : 'Set a password'} aside="You then sign in anew everywhere">
+        <ActionForm action={changePassword}>
+          {profile.hasPassword ? <Field label="Password of today" name="current" type="password" autoComplete="current-password" required /> : null}
+          <Field label="New password" name="password" type="password" autoComplete="new-password" hint="At least 10 characters. Three words in a row are easy to remember." required />
+          <SubmitButton look="quiet">{profile.hasPassword ? 'Change it' : 'Set it'}</SubmitButton>
+        </ActionForm>
+      </Course>
+      <Course heading="Lost a phone?" tone="quiet">
+        <ActionForm action={signOutEverywhere}>
+          <SubmitButton look="quiet" pendingLabel="Signing out…">Sign out everywhere</SubmitButton>
+        </ActionForm>
+      </Course>
+    </>
+  );
+}

@@ -1,0 +1,29 @@
+import { type Metadata } from 'next';
+import { buttonClass } from '@/components/ui/button';
+import { Course } from '@/components/ui/course';
+import { PageHead } from '@/components/ui/page-head';
+import { safePath } from '@/lib/schemas/account';
+
+export const metadata: Metadata = { title: 'Sign in with the link', referrer: 'no-referrer' };
+
+type Props = { searchParams: Promise<{ token?: string; email?: string; callbackUrl?: string }> };
+
+const pathOf = (url: string | undefined) => (url && URL.canParse(url) ? new URL(url).pathname : url);
+
+/** The link in the mail leads here; only the button uses it up. */
+export default async function SignInLinkPage({ searchParams }: Props) {
+  const { token = '', email = '', callbackUrl } = await searchParams;
+  return (
+    <>
+      <PageHead title="Sign in" lead={email ? `as ${email}` : undefined} />
+      <Course>
+        <form method="get" action="/api/auth/callback/email">
+          <input type="hidden" name="token" value={token} />
+          <input type="hidden" name="email" value={email} />
+          <input type="hidden" name="callbackUrl" value={safePath(pathOf(callbackUrl))} />
+          <button type="submit" className={buttonClass('primary')}>Sign in on this device</button>
+        </form>
+      </Course>
+    </>
+  );
+}
