@@ -8,7 +8,7 @@ type MonthlySunBarsProps = { months: readonly { name: string; dose: number }[] }
 export default function MonthlySunBars({ months }: MonthlySunBarsProps) {
   return (
     <ResponsiveContainer width="100%" height="100%">
-      <BarChart data={[...months]} margin={{ top: 24, right: 4, bottom: 0, left: -12 }} barCategoryGap="12%">
+      <BarChart accessibilityLayer={false} data={[...months]} margin={{ top: 24, right: 4, bottom: 0, left: -12 }} barCategoryGap="12%">
         <CartesianGrid vertical={false} stroke="var(--line)" />
         <XAxis dataKey="name" tickFormatter={(name: string) => name.slice(0, 1)} interval={0} tickLine={false} stroke="var(--ink)" tick={{ fill: 'var(--ink)', fontSize: 15 }} />
         <YAxis tickLine={false} axisLine={false} tick={{ fill: 'var(--quiet)', fontSize: 14 }} width={52} />

@@ -71,9 +71,9 @@ export function CompassDial({ name, defaultValue = 180, label = 'Which way does 
           aria-describedby={[hint ? `${id}-hint` : null, error ? `${id}-error` : null].filter(Boolean).join(' ') || undefined}
           className="slider min-w-0 flex-1"
         />
-        <output htmlFor={id} className="figures w-14 text-right text-xl">
+        <span aria-hidden="true" className="figures w-14 text-right text-xl">
           {degrees}°
-        </output>
+        </span>
       </div>
       <p aria-hidden="true" className="font-semibold">
         Front faces {directionWord(degrees)}

@@ -3,6 +3,7 @@ import { DoseLegend } from '@/components/drawings/dose-ramp';
 import { drawPlan, type HousePlanWall, size } from '@/components/drawings/plan-layout';
 import { Rays, strikes, SunMark, type SunNow } from '@/components/drawings/plan-sun';
 import { PlanWallMark } from '@/components/drawings/plan-wall';
+import { StateShape } from '@/components/ui/state-shape';
 
 export type { HousePlanWall } from '@/components/drawings/plan-layout';
 
@@ -41,8 +42,8 @@ export function HousePlan({ walls, sun, label = 'House plan from above, north up
       {plan.named ? null : (
         <ol className="mx-auto mt-3 max-w-[28rem] columns-2 gap-6">
           {plan.walls.map((drawn, i) => (
-            <li key={drawn.wall.id} className="break-inside-avoid py-0.5">
-              <span className="figures">{i + 1}</span> {drawn.wall.name} <span className="figures whitespace-nowrap">{Math.round(drawn.wall.doseKwhM2).toLocaleString('en-US')}</span>
+            <li key={drawn.wall.id} className="flex break-inside-avoid items-center gap-1.5 py-0.5">
+              <span className="figures">{i + 1}</span> {drawn.wall.state ? <StateShape state={drawn.wall.state} size={18} /> : null} {drawn.wall.name} <span className="figures whitespace-nowrap">{Math.round(drawn.wall.doseKwhM2).toLocaleString('en-US')}</span>
             </li>
           ))}
         </ol>

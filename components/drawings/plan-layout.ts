@@ -49,7 +49,7 @@ export function drawPlan(walls: readonly HousePlanWall[]): DrawnPlan {
   const corners = edges.map((edge) => place(edge.from));
   const draw = (named: boolean) => edges.flatMap((edge, i) => (walls[i] ? [drawWall(walls[i], edge, place, named)] : []));
   const withNames = draw(true);
-  const named = closed && labelsFit(withNames.map((wall) => wall.label), corners);
+  const named = labelsFit(withNames.map((wall) => wall.label), closed ? corners : undefined);
   return { walls: named ? withNames : draw(false), corners, eave: eave.map(place), closed, named };
 }
 
@@ -60,6 +60,6 @@ function drawWall(wall: HousePlanWall, edge: PlanEdge, place: (p: Point) => Poin
   const thickness = 6 + 3 * doseClass(wall.doseKwhM2);
   const width = Math.max(short(wall.name).length, 4.5) * letter.width;
   const box = named ? { width, height: 2 * letter.line } : { width: 26, height: 26 };
-  const back = inset(box, outward, wall.state ? badge + 4 : thickness / 2 + 6);
+  const back = !named ? 0 : inset(box, outward, wall.state ? badge + 4 : thickness / 2 + 6);
   return { wall, from, to, middle, outward, thickness, label: { x: middle.x - outward.x * back, y: middle.y - outward.y * back, ...box } };
 }

@@ -31,7 +31,7 @@ export function PlanWallMark({ drawn, index, named, lit }: PlanWallProps) {
       <line {...line} stroke="transparent" strokeWidth="46" />
       <line {...line} stroke="var(--ink)" strokeWidth={thickness + 3} className="plan-edge" />
       <line {...line} stroke={`var(--dose-${doseClass(wall.doseKwhM2)})`} strokeWidth={thickness} />
-      {wall.state ? <Badge at={drawn.middle} state={wall.state} /> : null}
+      {wall.state && named ? <Badge at={drawn.middle} state={wall.state} /> : null}
       <Label drawn={drawn} index={index} named={named} />
     </>
   );

@@ -12,9 +12,9 @@ export function Slider({ label, words, max, step, value, onChange }: SliderProps
         <label htmlFor={id} className="font-semibold">
           {label}
         </label>
-        <output htmlFor={id} className="figures text-lg">
+        <span aria-hidden="true" className="figures text-lg">
           {words}
-        </output>
+        </span>
       </div>
       <input id={id} type="range" min="0" max={max} step={step} value={value} aria-valuetext={words} onChange={(event) => onChange(event.target.valueAsNumber)} className="slider" />
     </div>

@@ -17,12 +17,16 @@ export function PageHead({ title, lead, path = [], actions }: PageHeadProps) {
       {path.length > 0 ? (
         <nav aria-label="Where you are" className="no-print -mt-2">
           <ol className="flex flex-wrap text-sm text-quiet">
-            {path.map((step) => (
+            {path.map((step, i) => (
               <li key={step.href} className="flex items-center">
                 <Link href={step.href as Route} className="link inline-flex min-h-11 items-center">
                   {step.label}
                 </Link>
-                <span aria-hidden="true" className="px-2">/</span>
+                {i < path.length - 1 ? (
+                  <span aria-hidden="true" className="px-2">
+                    /
+                  </span>
+                ) : null}
               </li>
             ))}
           </ol>

@@ -6,7 +6,7 @@ type StateMarkProps = { state: MarkedState; children?: ReactNode };
 /** How work stands: a shape and a word, so that neither colour nor sight is needed. */
 export function StateMark({ state, children }: StateMarkProps) {
   return (
-    <span className="inline-flex items-center gap-2 font-semibold whitespace-nowrap">
+    <span className="inline-flex items-center gap-2 align-bottom font-semibold whitespace-nowrap">
       <StateShape state={state} />
       {children ?? state.charAt(0).toUpperCase() + state.slice(1)}
     </span>
