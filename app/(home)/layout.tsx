@@ -1,20 +1,6 @@
 import { type ReactNode } from 'react';
-import { requireActor } from '@/app/_server/actor';
-import { SiteFooter } from '@/components/ui/site-footer';
-import { SiteHeader } from '@/components/ui/site-header';
+import { SignedInFrame } from '@/app/_server/signed-in-frame';
 
-const links = [
-  { href: '/homes', label: 'Homes' },
-  { href: '/settings', label: 'Settings' },
-];
-
-export default async function HomeownerLayout({ children }: { children: ReactNode }) {
-  const actor = await requireActor(['homeowner']);
-  return (
-    <>
-      <SiteHeader links={links} home="/homes" signedInAs={actor.name ?? actor.email} />
-      {children}
-      <SiteFooter />
-    </>
-  );
+export default function HomeownerLayout({ children }: { children: ReactNode }) {
+  return <SignedInFrame roles={['homeowner']}>{children}</SignedInFrame>;
 }

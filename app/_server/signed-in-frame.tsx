@@ -22,7 +22,7 @@ export async function SignedInFrame({ roles, children }: { roles?: Role[]; child
       <SiteHeader links={linksOf[actor.role]} home={homePageOf(actor.role)} signedInAs={actor.name ?? actor.email}>
         <SignOutButton />
       </SiteHeader>
-      <main id="main">{children}</main>
+      {children}
       <SiteFooter />
     </>
   );

@@ -21,7 +21,7 @@ export default async function AccountPage() {
   const actor = await requireActor();
   const profile = profileOf(actor);
   return (
-    <>
+    <main id="main">
       <PageHead title="Your account" lead={profile.email} />
       <Course heading="You">
         <ActionForm action={saveProfile} saved="Saved.">
@@ -44,6 +44,6 @@ export default async function AccountPage() {
           <SubmitButton look="quiet" pendingLabel="Signing out…">Sign out everywhere</SubmitButton>
         </ActionForm>
       </Course>
-    </>
+    </main>
   );
 }
