@@ -34,7 +34,7 @@ const wall = (id: string, name: string, azimuthDeg: number, widthM: number, dose
 export const exampleWalls: ExampleWall[] = [
   { plan: wall('s', 'South', 200, 11, 1080, 'overdue'), gableHeightM: 0, openings: [window(3), door], used: 1, left: 'Used up last fall' },
   { plan: wall('w', 'West', 290, 8, 910, 'due'), gableHeightM: 2.2, openings: [window(2)], used: 0.86, left: '9 months left' },
-  { plan: wall('n', 'North', 20, 11, 350, 'later'), gableHeightM: 0, openings: [window(4)], used: 0.5, left: '4 years left' },
+  { plan: wall('n', 'North', 20, 11, 350, 'later'), gableHeightM: 0, openings: [window(4)], used: 0.5, left: 'Nearly 5 years left' },
   { plan: wall('e', 'East', 110, 8, 760, 'due soon'), gableHeightM: 2.2, openings: [window(1), door], used: 0.74, left: '17 months left' },
 ];
 

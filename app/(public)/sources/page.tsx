@@ -8,7 +8,7 @@ export const metadata: Metadata = { title: 'Sources of the figures', description
 export default function SourcesPage() {
   return (
     <>
-      <PageHead title="Sources of the figures" lead="What was published by others, with thanks, and what is our own judgement. Every computed figure in the product opens to show its inputs, its formula and its source." />
+      <PageHead title="Sources of the figures" lead="What was published by others, with thanks, and what is our own judgment. Every computed figure in the product opens to show its inputs, its formula and its source." />
       {sources.map((group) => (
         <Course key={group.heading} heading={group.heading}>
           <dl className="grid max-w-3xl gap-5">
