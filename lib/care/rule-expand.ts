@@ -1,4 +1,4 @@
-import { addDays, addMonths, type CalendarDay, toUtcDate } from '@/lib/calendar';
+import { addMonths, type CalendarDay, toUtcDate } from '@/lib/calendar';
 import { readRule } from './rule-check';
 import { walkRule } from './rule-days';
 import { RuleFault } from './rule-text';
@@ -32,7 +32,7 @@ export function expandRule(rule: string, startOn: CalendarDay, fromOn: CalendarD
 }
 
 /** Plans look no further ahead than this many months. */
-const horizonMonths = 1200;
+export const horizonMonths = 1200;
 
 /** The first day of a rule after a day; null when the rule has ended, or has none in the next hundred years. */
 export function nextOfRule(rule: string, startOn: CalendarDay, after: CalendarDay): CalendarDay | null {
@@ -43,6 +43,3 @@ export function nextOfRule(rule: string, startOn: CalendarDay, after: CalendarDa
   });
   return found;
 }
-
-/** The first day of a rule on or after a day. */
-export const firstOfRule = (rule: string, startOn: CalendarDay, from: CalendarDay): CalendarDay | null => nextOfRule(rule, startOn, addDays(from, -1));

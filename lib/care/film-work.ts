@@ -1,0 +1,92 @@
+import { addMonths, type CalendarDay } from '@/lib/calendar';
+import { aboutDay, exactDay, exactRange, monthNames } from '@/lib/calendar-words';
+import { monthsInWords } from '@/lib/coat';
+import { type Explanation, type Source } from '@/lib/explain';
+import { workKinds } from '@/lib/schemas/vocabulary';
+import { type KnownWall } from './films';
+import { monthlyRule, withSafeDay } from './rule-build';
+import { readRule } from './rule-check';
+import { walkRule } from './rule-days';
+import { horizonMonths, nextOfRule } from './rule-expand';
+import { type CareHome, type FilmLife, type OwnRule, type SeasonMonths, type Window, type WorkItem } from './types';
+import { windowFor } from './window';
+
+type FilmKind = 'restain' | 'recaulk';
+
+export const windowSource: Source = { text: 'Window: the coating season that holds the date, else the next if it opens within 60 days, else the one before; at most 60 days past the date', ground: 'our rule' };
+const ruleSource: Source = { text: 'RFC 5545 (2009), §3.3.10, recurrence rules', ground: 'published' };
+const caulkSeason: Source = { text: 'Caulk keeps to the coating season; ASTM C1193 gives 40 to 100 °F for sealants (recalled, not read again)', ground: 'memory' };
+
+/** The next restain or recaulk of a wall; null when there is no date to start from, or the owner's rule has ended. */
+export function filmWork(home: CareHome, known: KnownWall, kind: FilmKind): WorkItem | null {
+  const film = kind === 'restain' ? known.coat : known.seal;
+  const own = home.ownRules.find((rule) => rule.wallId === known.wall.id && rule.kind === kind);
+  const season = home.seasons[known.wall.stainBase];
+  const turn = own ? ownTurn(own, film.startedOn, season.seasons) : computedTurn(film, season.seasons);
+  if (!turn) return null;
+  const because = [whyThen(kind, film, turn, own), whyWindow(turn.window), season.warning].filter(Boolean).join(' ');
+  return {
+    wallId: known.wall.id,
+    kind,
+    ...turn,
+    lapsesOn: null,
+    basis: own ? 'own rule' : 'computed',
+    lifeMonths: film.lifeMonths,
+    because,
+    explanation: explain(kind, film, turn, season.seasons),
+  };
+}
+
+type Turn = { rule: string; startOn: CalendarDay; dueOn: CalendarDay; window: Window };
+
+function computedTurn({ startedOn, lifeMonths }: FilmLife, seasons: SeasonMonths[]): Turn | null {
+  if (!startedOn) return null;
+  const rule = monthlyRule(startedOn, lifeMonths);
+  const dueOn = nextOfRule(rule, startedOn, startedOn);
+  return dueOn ? { rule, startOn: startedOn, dueOn, window: windowFor(dueOn, seasons, dueOn) } : null;
+}
+
+/** The owner's rule, from the latest work if that is later; its first date whose window opens after that work. */
+function ownTurn(own: OwnRule, doneOn: CalendarDay | null, seasons: SeasonMonths[]): Turn | null {
+  const startOn = doneOn && doneOn > own.startOn ? doneOn : own.startOn;
+  const rule = withSafeDay(own.rule, startOn);
+  let turn: Turn | null = null;
+  walkRule(readRule(rule), startOn, addMonths(startOn, horizonMonths), (dueOn) => {
+    const window = windowFor(dueOn, seasons, dueOn);
+    if (!doneOn || window.opensOn > doneOn) turn = { rule, startOn, dueOn, window };
+    return turn === null;
+  });
+  return turn;
+}
+
+const filmWords = { restain: 'coat', recaulk: 'caulk' } as const;
+
+function whyThen(kind: FilmKind, film: FilmLife, { dueOn, startOn }: Turn, own: OwnRule | undefined): string {
+  if (own) return `The owner’s own rule, counted from ${exactDay(startOn)}, falls on ${exactDay(dueOn)}.`;
+  const month = `${monthNames[Number(startOn.slice(5, 7)) - 1]} ${startOn.slice(0, 4)}`;
+  return `The ${filmWords[kind]} of ${month} lasts about ${monthsInWords(film.lifeMonths)} on this wall, until ${aboutDay(dueOn)}.`;
+}
+
+function whyWindow({ moved }: Window): string | null {
+  if (moved === 'to the season before') return 'No coating season comes soon after that, so it is done in the season before.';
+  return moved === 'to the next season' ? 'The coating season opens soon after that.' : moved === 'no season' ? 'No month here is safely warm and dry enough.' : null;
+}
+
+const seasonWords = (seasons: SeasonMonths[]) =>
+  seasons.map(({ fromMonth, toMonth }) => (fromMonth === toMonth ? monthNames[fromMonth - 1] : `${monthNames[fromMonth - 1]} to ${monthNames[toMonth - 1]}`)).join(', ') || 'none';
+
+function explain(kind: FilmKind, film: FilmLife, { startOn, dueOn, window, rule }: Turn, seasons: SeasonMonths[]): Explanation {
+  return {
+    figure: `Next ${workKinds[kind].toLowerCase()} of this wall`,
+    value: exactRange(window.opensOn, window.closesOn),
+    formula: 'date = start + life, by the care rule; window = the coating season for that date',
+    inputs: [
+      { label: 'Counted from', value: exactDay(startOn) },
+      { label: `Expected life of the ${filmWords[kind]}`, value: `${monthsInWords(film.lifeMonths)} (range ${film.lowYears} to ${film.highYears} years, severity ${film.severity.toFixed(2)})` },
+      { label: 'Care rule (RFC 5545)', value: rule },
+      { label: 'Date', value: exactDay(dueOn) },
+      { label: 'Coating season', value: seasonWords(seasons) },
+    ],
+    sources: [...film.explanation.sources, ruleSource, windowSource, ...(kind === 'recaulk' ? [caulkSeason] : [])],
+  };
+}

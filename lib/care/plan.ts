@@ -1,0 +1,30 @@
+import { type CalendarDay } from '@/lib/calendar';
+import { filmWork } from './film-work';
+import { knownWall } from './films';
+import { type CareHome, type CareWall, type HomePlan, type WallPlan, type WorkItem } from './types';
+import { visitsOf, workOrder } from './visits';
+import { withRestain } from './with-restain';
+import { yearlyWork } from './yearly-work';
+
+const inPosition = (a: CareWall, b: CareWall) => a.position - b.position || (a.id < b.id ? -1 : 1);
+
+function planWall(home: CareHome, wall: CareWall, today: CalendarDay): WallPlan {
+  const known = knownWall(home, wall);
+  const items: (WorkItem | null)[] = [
+    filmWork(home, known, 'restain'),
+    filmWork(home, known, 'recaulk'),
+    yearlyWork(home, known, 'wash', today),
+    yearlyWork(home, known, 'walkaround', today),
+  ];
+  const found = withRestain(items.filter((item) => item !== null)).sort((a, b) => workOrder[a.kind] - workOrder[b.kind]);
+  return { wallId: wall.id, coat: known.coat, seal: known.seal, items: found };
+}
+
+/**
+ * What is next on every wall of a home, and the visits that it makes. The same home gives the same items on every day until
+ * the next `lapsesOn`; the order in which work was logged does not matter.
+ */
+export function planHome(home: CareHome, today: CalendarDay): HomePlan {
+  const walls = [...home.walls].sort(inPosition).map((wall) => planWall(home, wall, today));
+  return { homeId: home.id, walls, visits: visitsOf(walls.flatMap(({ items }) => items)) };
+}

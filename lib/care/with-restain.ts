@@ -1,0 +1,55 @@
+import { addDays, addMonths, type CalendarDay, yearOf } from '@/lib/calendar';
+import { aboutDay, exactDay, exactRange } from '@/lib/calendar-words';
+import { type Source } from '@/lib/explain';
+import { type Window, type WorkItem } from './types';
+
+/** A recaulk due this near to the wall's restain is done with it. Our rule. */
+const nearMonths = 18;
+/** Caulk is left at most this long past its life, and a shared window has at least so many days. Our rule. */
+const graceDays = 60;
+const shortestDays = 14;
+
+const caulkFirst: Source = { text: 'Caulk takes up color with the next coat and so goes on before it: common practice, no source', ground: 'common practice' };
+const nearSource: Source = { text: 'A recaulk due within 18 months of the wall’s restain joins it, if the caulk is not left more than 60 days past its life', ground: 'our rule' };
+const washSource: Source = { text: 'A restain begins with a wash, so the wash of that year is part of it', ground: 'our rule' };
+
+/** The restain's window for a recaulk, or null when the two are too far apart. */
+function sharedWindow(recaulkOn: CalendarDay, restain: WorkItem): Window | null {
+  if (recaulkOn > addMonths(restain.dueOn, nearMonths) || recaulkOn < addMonths(restain.dueOn, -nearMonths)) return null;
+  const limit = addDays(recaulkOn, graceDays);
+  if (addDays(restain.window.opensOn, shortestDays) > limit) return null;
+  return { ...restain.window, closesOn: restain.window.closesOn < limit ? restain.window.closesOn : limit };
+}
+
+function moved(item: WorkItem, window: Window, because: string, restain: WorkItem, sources: Source[]): WorkItem {
+  const { explanation } = item;
+  return {
+    ...item,
+    window,
+    basis: 'pulled to the restain',
+    because,
+    explanation: {
+      ...explanation,
+      value: exactRange(window.opensOn, window.closesOn),
+      formula: `${explanation.formula}; then the window of the wall’s restain`,
+      inputs: [...explanation.inputs, { label: 'Restain of this wall', value: exactDay(restain.dueOn) }],
+      sources: [...explanation.sources, ...sources],
+    },
+  };
+}
+
+/** Work of one wall that belongs with its restain takes the restain's window: the recaulk before it, and that year's wash. The owner's own rules stand. */
+export function withRestain(items: WorkItem[]): WorkItem[] {
+  const restain = items.find(({ kind }) => kind === 'restain');
+  if (!restain) return items;
+  return items.map((item) => {
+    if (item.basis !== 'computed') return item;
+    if (item.kind === 'recaulk') {
+      const window = sharedWindow(item.dueOn, restain);
+      const because = `Caulk goes on before stain, so it is done with this wall’s restain and left to cure as its label says; on its own the caulk would last until ${aboutDay(item.dueOn)}.`;
+      return window ? moved(item, window, because, restain, [caulkFirst, nearSource]) : item;
+    }
+    const inYear = [restain.window.opensOn, restain.window.closesOn].some((day) => yearOf(day) === yearOf(item.dueOn));
+    return item.kind === 'wash' && inYear ? moved(item, restain.window, 'The restain of this wall begins with a wash.', restain, [washSource]) : item;
+  });
+}
