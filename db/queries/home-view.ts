@@ -24,6 +24,7 @@ export const toWorkItem = (row: ItemRow): WorkItem => ({
   startOn: row.startOn,
   dueOn: row.dueOn,
   window: { opensOn: row.opensOn, closesOn: row.closesOn, moved: row.moved },
+  missedOn: row.missedOn,
   lapsesOn: row.lapsesOn,
   basis: row.basis,
   lifeMonths: row.lifeMonths,

@@ -2,7 +2,7 @@ import { and, eq } from 'drizzle-orm';
 import { dayIn } from '@/lib/calendar';
 import { type ReminderItem, type ReminderProps } from '@/lib/mail/kinds/reminder';
 import { isReminderStage } from '@/lib/mail/kinds/reminder-stages';
-import { logUrl, planUrl, settingsUrl } from '@/lib/mail/links';
+import { logUrl, planUrl, accountUrl } from '@/lib/mail/links';
 import { wallAreaM2 } from '@/lib/takeoff';
 import { database } from '../client';
 import { delivery, home, homeMember, user, workItem } from '../schema';
@@ -46,7 +46,7 @@ export function reminderPropsOf(mail: Of, site: string, now: Date): { to: string
       items: items.filter((item) => item.wallId === detail.wall.id).map(({ wallId: _, ...item }) => item),
     })),
     planUrl: planUrl(site, homeId),
-    settingsUrl: settingsUrl(site),
+    accountUrl: accountUrl(site),
   };
   return { to: who.to, props };
 }

@@ -3,7 +3,7 @@ import { type WorkKind } from '@/lib/schemas/vocabulary';
 /** Addresses that mails lead to. `site` is the public address of the application. */
 export const planUrl = (site: string, homeId: string): string => new URL(`/homes/${homeId}`, site).href;
 
-export const settingsUrl = (site: string): string => new URL('/settings', site).href;
+export const accountUrl = (site: string): string => new URL('/account', site).href;
 
 /** The form for logging work, with kind and wall filled in. */
 export function logUrl(site: string, homeId: string, kind: WorkKind, wallId: string): string {

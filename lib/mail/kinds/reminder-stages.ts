@@ -1,8 +1,9 @@
 import { type CalendarDay } from '@/lib/calendar';
+import { type ReachedStage } from '@/lib/care/stages';
 import { keysOf, type WorkKind, workKinds } from '@/lib/schemas/vocabulary';
 
 /** From the most to the least urgent. */
-export const reminderStages = { overdue: 0, open: 1, buy: 2, book: 3 } as const;
+export const reminderStages = { overdue: 0, open: 1, buy: 2, book: 3 } as const satisfies Record<ReachedStage['stage'], number>;
 export type ReminderStage = keyof typeof reminderStages;
 
 const verbs: Record<WorkKind, string> = { restain: 'restain', recaulk: 'recaulk', wash: 'wash', walkaround: 'walk around' };

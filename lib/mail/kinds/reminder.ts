@@ -33,7 +33,7 @@ export const reminderProps = z.object({
   sealants: z.array(z.enum(keysOf(sealants))),
   walls: z.array(wall).min(1),
   planUrl: z.url(),
-  settingsUrl: z.url(),
+  accountUrl: z.url(),
 });
 export type ReminderProps = z.output<typeof reminderProps>;
 
@@ -100,6 +100,6 @@ function cautionCourse(props: ReminderProps, kinds: ReminderItem['kind'][]): Cou
 
 const footer = (props: ReminderProps): Part[] => [
   { as: 'text', text: `You get this because you are ${props.membership === 'owner' ? 'the owner' : `a ${memberships[props.membership].toLowerCase()}`} of ${props.homeName} on Eavewright and have reminders turned on.` },
-  { as: 'link', label: 'Turn reminders off or change your address', url: props.settingsUrl },
+  { as: 'link', label: 'Turn reminders off or change your address', url: props.accountUrl },
 ];
 

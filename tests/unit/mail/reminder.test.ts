@@ -27,7 +27,7 @@ describe('a reminder', () => {
     expect(targets).toEqual([
       'https://eavewright.example/homes/h1',
       'https://eavewright.example/homes/h1/log?kind=restain&wall=w3',
-      'https://eavewright.example/settings',
+      'https://eavewright.example/account',
     ]);
     for (const target of targets) expect(text.split('\n')).toContain(target);
   });
