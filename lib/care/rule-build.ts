@@ -19,11 +19,16 @@ export function monthlyRule(startOn: CalendarDay, intervalMonths: number): strin
 /** The 15th of each of these months, every year. */
 export const yearlyRule = (months: number[]): string => `FREQ=YEARLY;BYMONTH=${months.join(',')};BYMONTHDAY=15`;
 
-/** A rule that takes its day from the start, and would skip months that lack it, gets the 28th instead. Our rule, for rules that restart with logged work. */
+/**
+ * A rule that takes its day from a start on the 29th to 31st falls on the month's last possible day where the month is short;
+ * if it names several months, on the 28th. Our rule, because rules restart with logged work, whatever its day.
+ */
 export function withSafeDay(rule: string, startOn: CalendarDay): string {
   const parts = partsOf(rule);
-  const takesDay = ['YEARLY', 'MONTHLY'].includes(parts.get('FREQ') ?? '') && !['BYMONTHDAY', 'BYDAY', 'BYYEARDAY', 'BYWEEKNO'].some((name) => parts.has(name));
+  const freq = parts.get('FREQ') ?? '';
+  const takesDay = ['YEARLY', 'MONTHLY'].includes(freq) && !['BYMONTHDAY', 'BYDAY', 'BYYEARDAY', 'BYWEEKNO', 'BYSETPOS'].some((name) => parts.has(name));
   if (!takesDay || dayOfMonth(startOn) <= 28) return rule;
-  const month = parts.get('FREQ') === 'YEARLY' && !parts.has('BYMONTH') ? `;BYMONTH=${Number(startOn.slice(5, 7))}` : '';
-  return `${rule.trim()}${month};BYMONTHDAY=28`;
+  const inMonth = freq === 'YEARLY' && !parts.has('BYMONTH') ? `;BYMONTH=${Number(startOn.slice(5, 7))}` : '';
+  const oneSet = freq === 'MONTHLY' || !parts.get('BYMONTH')?.includes(',');
+  return `${rule.trim()}${inMonth};BYMONTHDAY=${oneSet ? `${upTo(dayOfMonth(startOn))};BYSETPOS=-1` : '28'}`;
 }

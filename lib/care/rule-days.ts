@@ -3,8 +3,8 @@ import { addDays, type CalendarDay, dayOf, fromUtcDate, monthOf, toUtcDate, year
 import { type ByDay, type Rule, RuleFault } from './rule-text';
 import { isInWeek } from './week-number';
 
-/** More instants than this are not walked through; daily rules reach it after 684 years, hourly ones after 28. */
-const mostSteps = 250_000;
+/** More instants than this are not walked through; daily rules reach it after 328 years, hourly ones after 13. */
+const mostSteps = 120_000;
 
 /** Monday = 0. */
 const weekdayOf = (day: CalendarDay) => (toUtcDate(day).getUTCDay() + 6) % 7;
@@ -92,11 +92,12 @@ export function walkRule(written: Rule, startOn: CalendarDay, through: CalendarD
   engine(rule, startOn).all((date) => {
     if ((steps += 1) > mostSteps) throw new RuleFault('The rule has too many occurrences before that day.');
     const day = fromUtcDate(date);
-    if (periodOf(rule, day) > through) return false;
+    const within = rule.bySetPos.length > 0 ? periodOf(rule, day) : day;
+    if (within > through) return false;
     if (rule.byWeekNo.length > 0 && !isInWeek(day, rule.byWeekNo, rule.wkst)) return true;
-    if (rule.freq === 'HOURLY' || rule.bySetPos.length === 0) return offer(day, date.getTime());
-    if (periodOf(rule, day) !== period) close();
-    period = periodOf(rule, day);
+    if (rule.bySetPos.length === 0) return offer(day, date.getTime());
+    if (within !== period) close();
+    period = within;
     gathered.push(day);
     return !isOver;
   });
