@@ -1,3 +1,4 @@
+import { weathered } from '@/components/drawings/fade-time';
 import { type WorkKind, workKinds } from '@/lib/schemas/vocabulary';
 
 /** 16 by 16, around (0, 0). Restain: a brush-wide bar; recaulk: a bead; wash: a drop; walkaround: an eye. */
@@ -28,6 +29,14 @@ export function FadeLegend() {
   );
   return (
     <ul aria-hidden="true" className="mt-2 flex flex-wrap items-center gap-x-5 text-sm text-quiet">
+      <li className="flex items-center gap-2">
+        <svg width="34" height="16" aria-hidden="true">
+          <rect width="34" height="16" fill="#8a5a32" />
+          <path d="M0 0L34 16V0Z" fill={weathered} />
+          <path d="M0 0L34 16" stroke="#fff" strokeWidth="1.5" />
+        </svg>
+        Coat left
+      </li>
       {(Object.keys(workKinds) as WorkKind[]).map((kind) => (
         <li key={kind} className="flex items-center gap-1">
           {item(kind, true)}

@@ -76,6 +76,10 @@ function StretchBar({ stretch, scale, y, defs, fade }: StretchProps) {
         ))}
       </linearGradient>
       <rect {...box} fill={`url(#${fade})`} />
+      <svg {...box} viewBox="0 0 100 100" preserveAspectRatio="none">
+        <path d={`M0 0L100 ${100 * stretch.used}V0Z`} fill="rgb(255 255 255 / 24%)" />
+        <path d={`M0 0L100 ${100 * stretch.used}`} stroke="rgb(255 255 255 / 75%)" strokeWidth="1.5" vectorEffect="non-scaling-stroke" />
+      </svg>
     </>
   );
 }

@@ -3,7 +3,7 @@ import { type FadeWall, faded } from '@/components/drawings/fade-time';
 
 /** A stretch of a wall's strip: a coat that fades, a used-up coat, or a time of which nothing is known. */
 export type Stretch =
-  | { what: 'coat'; from: CalendarDay; to: CalendarDay; colors: string[] }
+  | { what: 'coat'; from: CalendarDay; to: CalendarDay; colors: string[]; /** Share of coat life used up at its end, 0 to 1. */ used: number }
   | { what: 'used up'; from: CalendarDay; to: CalendarDay }
   | { what: 'not known'; from: CalendarDay; to: CalendarDay };
 
@@ -29,6 +29,6 @@ function coat(wall: FadeWall, from: CalendarDay, to: CalendarDay): Stretch[] {
   const gone = usedUpOn(from, wall.coat.lifeMonths);
   if (to <= from) return [];
   const used = Math.min(1, daysBetween(from, to) / Math.max(1, daysBetween(from, gone)));
-  const fades: Stretch = { what: 'coat', from, to: gone < to ? gone : to, colors: [0, 0.25, 0.5, 0.75, 1].map((share) => faded(wall.colorHex, share * used)) };
+  const fades: Stretch = { what: 'coat', from, to: gone < to ? gone : to, colors: [0, 0.25, 0.5, 0.75, 1].map((share) => faded(wall.colorHex, share * used)), used };
   return gone < to ? [fades, { what: 'used up', from: gone, to }] : [fades];
 }

@@ -35,7 +35,13 @@ describe('stretches', () => {
 
   it('starts a coat in its own colour and ends a used-up one in weathered gray', () => {
     const last = stretches(south, '2016-01-01', '2035-01-01')[2];
-    expect(last?.what === 'coat' && [last.colors[0], last.colors.at(-1)]).toEqual(['#8a5a32', weathered]);
+    expect(last?.what === 'coat' && [last.colors[0], last.colors.at(-1), last.used]).toEqual(['#8a5a32', weathered, 1]);
+  });
+
+  it('knows what share of a coat was used up when the next came early: two of four years', () => {
+    const early = { ...south, past: [{ kind: 'restain' as const, doneOn: '2019-06-20' }] };
+    const first = stretches(early, '2018-01-01', '2035-01-01')[1];
+    expect(first?.what === 'coat' && first.used).toBeCloseTo(0.5, 2);
   });
 
   it('does not make up a coat whose day is not known', () => {
