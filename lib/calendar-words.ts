@@ -1,4 +1,4 @@
-import { type CalendarDay, daysBetween, monthOf, yearOf } from '@/lib/calendar';
+import { type CalendarDay, daysBetween, monthEnd, monthOf, yearOf } from '@/lib/calendar';
 
 export const monthNames = ['January', 'February', 'March', 'April', 'May', 'June', 'July', 'August', 'September', 'October', 'November', 'December'] as const;
 
@@ -20,12 +20,13 @@ export function exactRange(from: CalendarDay, to: CalendarDay): string {
   return `${start} – ${exactDay(to)}`;
 }
 
-/** 'mid-May to early August 2027'; one word when both ends fall in the same third of a month. */
+/** 'mid-May to early August 2027', 'June to August 2027' for whole months; one word when both ends say the same. */
 export function aboutRange(from: CalendarDay, to: CalendarDay): string {
-  const end = aboutDay(to);
-  if (aboutDay(from) === end) return end;
-  const start = yearOf(from) === yearOf(to) ? `${third(from)}${monthName(from)}` : aboutDay(from);
-  return `${start} to ${end}`;
+  const whole = dayNumber(from) === 1 && to === monthEnd(yearOf(to), monthOf(to));
+  const words = (day: CalendarDay, withYear: boolean) => `${whole ? '' : third(day)}${monthName(day)}${withYear ? ` ${yearOf(day)}` : ''}`;
+  const end = words(to, true);
+  if (words(from, true) === end) return end;
+  return `${words(from, yearOf(from) !== yearOf(to))} to ${end}`;
 }
 
 const count = (n: number, unit: string) => `${n} ${unit}${n === 1 ? '' : 's'}`;

@@ -19,6 +19,10 @@ describe('days in words', () => {
     expect(exactRange('2027-05-15', '2027-05-15')).toBe('May 15, 2027');
     expect(aboutRange('2027-11-25', '2028-02-05')).toBe('late November 2027 to early February 2028');
     expect(aboutRange('2027-05-12', '2027-05-19')).toBe('mid-May 2027');
+    expect(aboutRange('2027-04-01', '2027-04-30')).toBe('April 2027');
+    expect(aboutRange('2027-06-01', '2027-08-31')).toBe('June to August 2027');
+    expect(aboutRange('2027-11-01', '2028-02-29')).toBe('November 2027 to February 2028');
+    expect(aboutRange('2027-06-01', '2027-08-30')).toBe('early June to late August 2027');
     expect(aboutRange('2027-05-25', '2027-09-02')).toBe('late May to early September 2027');
   });
 

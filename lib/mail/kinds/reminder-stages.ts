@@ -28,7 +28,7 @@ export function stageWords(stage: ReminderStage, kind: WorkKind): Words {
     case 'overdue':
       return {
         headline: 'overdue',
-        advice: look ? 'Nobody has looked at this wall yet; without a look its dates are a guess.' : 'Do it in the next dry spell, or look at the wall and log what you find.',
+        advice: look ? 'Nobody has logged a look at this wall this season. Its dates are surer after one.' : 'Do it in the next dry spell, or look at the wall and log what you find.',
         inSubject: `${noun} is overdue`,
       };
   }
@@ -37,10 +37,9 @@ export function stageWords(stage: ReminderStage, kind: WorkKind): Words {
 type Ranked = { stage: ReminderStage; kind: WorkKind; dueOn: CalendarDay };
 const kindOrder = keysOf(workKinds);
 
+const rank = (it: Ranked) => reminderStages[it.stage] * 10 + kindOrder.indexOf(it.kind);
+
 /** Overdue first; then restain before recaulk, wash and walkaround; then the earlier date. */
-export function mostUrgent<T extends Ranked>(items: readonly T[]): T | undefined {
-  const rank = (it: Ranked) => reminderStages[it.stage] * 10 + kindOrder.indexOf(it.kind);
-  return [...items].sort((a, b) => rank(a) - rank(b) || (a.dueOn < b.dueOn ? -1 : a.dueOn > b.dueOn ? 1 : 0))[0];
-}
+export const byUrgency = (a: Ranked, b: Ranked): number => rank(a) - rank(b) || (a.dueOn < b.dueOn ? -1 : a.dueOn > b.dueOn ? 1 : 0);
 
 export const isReminderStage = (text: string): text is ReminderStage => text in reminderStages;

@@ -5,7 +5,7 @@ import { cautionsDefer, cautionsFor } from '@/lib/cautions';
 import { keysOf, memberships, sealants, stainBases, unitSystems, workKinds } from '@/lib/schemas/vocabulary';
 import { areaText } from '@/lib/units';
 import { type Course, defineMail, type Part } from '../letter';
-import { mostUrgent, reminderStages, stageWords } from './reminder-stages';
+import { byUrgency, reminderStages, stageWords } from './reminder-stages';
 
 const item = z.object({
   kind: z.enum(keysOf(workKinds)),
@@ -43,7 +43,7 @@ export const reminderMail = defineMail({
   queued: z.object({}),
   write: (props) => {
     const items = props.walls.flatMap((of) => of.items.map((it) => ({ ...it, wallName: of.name })));
-    const first = mostUrgent(items);
+    const [first] = [...items].sort(byUrgency);
     if (!first) throw new RangeError('a reminder with nothing to say');
     const more = items.length > 1 ? ` and ${items.length - 1} more` : '';
     return {
@@ -72,7 +72,7 @@ function wallCourse(of: ReminderProps['walls'][number], props: ReminderProps): C
   const title = { title: of.name, aside: areaText(of.areaM2, props.units) };
   if (of.items.length === 0) return { ...title, parts: [{ as: 'text', text: 'Nothing new in this reminder.', look: 'quiet' }] };
   const overdue = of.items.some((it) => it.stage === 'overdue');
-  return { ...title, mark: overdue ? 'overdue' : 'due soon', parts: of.items.flatMap((it) => itemParts(it, props.today)) };
+  return { ...title, mark: overdue ? 'overdue' : 'due soon', parts: [...of.items].sort(byUrgency).flatMap((it) => itemParts(it, props.today)) };
 }
 
 function itemParts(it: ReminderItem, today: CalendarDay): Part[] {

@@ -72,6 +72,12 @@ describe('a reminder', () => {
     );
   });
 
+  it('puts the most urgent work of a wall first', () => {
+    const items = [reminderItem({ kind: 'recaulk', stage: 'buy' }), reminderItem({ kind: 'walkaround', stage: 'overdue' }), reminderItem({ stage: 'buy', dueOn: '2027-09-01' })];
+    const { text } = renderMail('reminder', reminderPropsWith({ walls: wallsWith({ South: items }) }));
+    expect(text.match(/^(Walkaround|Recaulk|Restain|Wash): .*$/gm)).toEqual(['Walkaround: overdue', 'Restain: time to buy', 'Recaulk: time to buy']);
+  });
+
   it('refuses to be written about nothing', () => {
     expect(() => renderMail('reminder', reminderPropsWith({ walls: wallsWith({}) }))).toThrow('nothing to say');
   });

@@ -91,6 +91,7 @@ describe('every mail', () => {
     ['verify', { name: 'Ada', url, hours: 24 }],
     ['sign-in', { url, hours: 1 }],
     ['reset', { name: null, url, hours: 1 }],
+    ['already-known', { name: 'Ada', signInUrl: url, forgotUrl: 'https://eavewright.example/forgot' }],
     ['shared', { homeName: 'Spring Creek', place: 'Bozeman, MT', byName: 'Ada', membership: 'contractor', url }],
     ['reminder', reminderPropsWith({ planUrl: url })],
   ];
