@@ -191,6 +191,7 @@ CREATE TABLE `work_item` (
 	`opens_on` text NOT NULL,
 	`closes_on` text NOT NULL,
 	`moved` text NOT NULL,
+	`missed_on` text,
 	`lapses_on` text,
 	`remind_on` text,
 	`basis` text NOT NULL,

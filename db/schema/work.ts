@@ -81,6 +81,7 @@ export const workItem = sqliteTable(
     opensOn: text('opens_on').notNull(),
     closesOn: text('closes_on').notNull(),
     moved: text('moved').$type<WorkItem['window']['moved']>().notNull(),
+    missedOn: text('missed_on'),
     lapsesOn: text('lapses_on'),
     /** The day on which the next reminder stage begins; null when none is left. Written at planning and after each run. */
     remindOn: text('remind_on'),

@@ -29,6 +29,7 @@ export function filmWork(home: CareHome, known: KnownWall, kind: FilmKind): Work
     wallId: known.wall.id,
     kind,
     ...turn,
+    missedOn: null,
     lapsesOn: null,
     basis: own ? 'own rule' : 'computed',
     lifeMonths: film.lifeMonths,

@@ -1,4 +1,5 @@
 import { type CalendarDay } from '@/lib/calendar';
+import { carriedOver } from './carry-over';
 import { filmWork } from './film-work';
 import { knownWall } from './films';
 import { type CareHome, type CareWall, type HomePlan, type WallPlan, type WorkItem } from './types';
@@ -10,9 +11,13 @@ const inPosition = (a: CareWall, b: CareWall) => a.position - b.position || (a.i
 
 function planWall(home: CareHome, wall: CareWall, today: CalendarDay): WallPlan {
   const known = knownWall(home, wall);
+  const film = (kind: 'restain' | 'recaulk') => {
+    const item = filmWork(home, known, kind);
+    return item && carriedOver(item, home.seasons[known.wall.stainBase].seasons, today);
+  };
   const items: (WorkItem | null)[] = [
-    filmWork(home, known, 'restain'),
-    filmWork(home, known, 'recaulk'),
+    film('restain'),
+    film('recaulk'),
     yearlyWork(home, known, 'wash', today),
     yearlyWork(home, known, 'walkaround', today),
   ];

@@ -7,39 +7,44 @@ type Stage = 'book' | 'buy' | 'open' | 'overdue';
 /** A stage that has begun: which, its step where it comes more than once, and the day it began. */
 export type ReachedStage = { stage: Stage; step?: number; onDay: CalendarDay };
 
-type StageRow = { stage: Stage; step?: number; from: 'opensOn' | 'closesOn'; days: number; kinds: WorkKind[] };
+type StageRow = { stage: Stage; step?: number; from: 'opening' | 'miss'; days: number; kinds: WorkKind[] };
 
 const films: WorkKind[] = ['restain', 'recaulk'];
 const all: WorkKind[] = [...films, 'wash', 'walkaround'];
 
-/** When an owner is reminded, in order: days before (−) or after the window's opening or closing. Our rule. */
+/** When an owner is reminded: days before (−) or after the window's opening, or after a window closed without the work. Our rule. */
 const stages: StageRow[] = [
-  { stage: 'book', from: 'opensOn', days: -120, kinds: films },
-  { stage: 'buy', from: 'opensOn', days: -28, kinds: films },
-  { stage: 'open', from: 'opensOn', days: 0, kinds: all },
-  { stage: 'overdue', step: 1, from: 'closesOn', days: 14, kinds: all },
-  { stage: 'overdue', step: 2, from: 'closesOn', days: 45, kinds: films },
-  { stage: 'overdue', step: 3, from: 'closesOn', days: 105, kinds: films },
+  { stage: 'book', from: 'opening', days: -120, kinds: films },
+  { stage: 'buy', from: 'opening', days: -28, kinds: films },
+  { stage: 'open', from: 'opening', days: 0, kinds: all },
+  { stage: 'overdue', step: 1, from: 'miss', days: 14, kinds: all },
+  { stage: 'overdue', step: 2, from: 'miss', days: 45, kinds: films },
+  { stage: 'overdue', step: 3, from: 'miss', days: 105, kinds: films },
 ];
-/** So long after the window has closed, nobody is reminded any more. Our rule. */
+/** So long after the miss, being overdue alone is no longer a reason to write. Our rule. */
 const silentAfterDays = 400;
 
-type Staged = Pick<WorkItem, 'kind' | 'window'>;
+type Staged = Pick<WorkItem, 'kind' | 'window' | 'missedOn'>;
 
-const stagesOf = ({ kind, window }: Staged): ReachedStage[] =>
+const missOf = ({ window, missedOn }: Staged) => missedOn ?? window.closesOn;
+
+const stagesOf = (item: Staged): ReachedStage[] =>
   stages
-    .filter(({ kinds }) => kinds.includes(kind))
-    .map(({ stage, step, from, days }) => ({ stage, ...(step ? { step } : {}), onDay: addDays(window[from], days) }));
+    .filter(({ kinds }) => kinds.includes(item.kind))
+    .map(({ stage, step, from, days }) => ({ stage, ...(step ? { step } : {}), onDay: addDays(from === 'opening' ? item.window.opensOn : missOf(item), days) }))
+    .sort((a, b) => (a.onDay < b.onDay ? -1 : a.onDay > b.onDay ? 1 : 0));
 
 /** The stage that an item is in on a day: the latest that has begun, until the next begins. Null before the first and long after the last. */
 export function stageOn(item: Staged, today: CalendarDay): ReachedStage | null {
-  if (today > addDays(item.window.closesOn, silentAfterDays)) return null;
-  return stagesOf(item).findLast(({ onDay }) => onDay <= today) ?? null;
+  const reached = stagesOf(item).findLast(({ onDay }) => onDay <= today) ?? null;
+  return reached?.stage === 'overdue' && today > addDays(missOf(item), silentAfterDays) ? null : reached;
 }
 
 /** The day on which the next stage begins, after `today`; null when none is left. */
 export const nextStageDay = (item: Staged, today: CalendarDay): CalendarDay | null => stagesOf(item).find(({ onDay }) => onDay > today)?.onDay ?? null;
 
-/** One delivery: the same person is told of a stage of one piece of work once, whatever happens. */
-export const deliveryKey = ({ wallId, kind, dueOn }: Pick<WorkItem, 'wallId' | 'kind' | 'dueOn'>, { stage, step }: Pick<ReachedStage, 'stage' | 'step'>, userId: string): string =>
-  [wallId, kind, dueOn, step ? `${stage}-${step}` : stage, userId].join(':');
+/** One delivery: the same person is told of a stage of one piece of work once, whatever happens. A coming season has its own stages. */
+export function deliveryKey({ wallId, kind, dueOn, window }: Pick<WorkItem, 'wallId' | 'kind' | 'dueOn' | 'window'>, { stage, step }: Pick<ReachedStage, 'stage' | 'step'>, userId: string): string {
+  const which = stage === 'overdue' ? `${stage}-${step ?? 1}` : `${stage}-${window.opensOn}`;
+  return [wallId, kind, dueOn, which, userId].join(':');
+}

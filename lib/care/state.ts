@@ -4,9 +4,9 @@ import { type HomePlan, type WorkItem, type WorkState } from './types';
 /** Work is due soon when its window opens within so many days. Our rule. */
 const soonDays = 60;
 
-/** How work stands on a day: overdue once its window has closed. Our rule. */
-export function workState({ window }: Pick<WorkItem, 'window'>, today: CalendarDay): WorkState {
-  if (today > window.closesOn) return 'overdue';
+/** How work stands on a day: overdue once a window has closed without it. Our rule. */
+export function workState({ window, missedOn }: Pick<WorkItem, 'window' | 'missedOn'>, today: CalendarDay): WorkState {
+  if (missedOn || today > window.closesOn) return 'overdue';
   if (today >= window.opensOn) return 'due';
   return addDays(today, soonDays) >= window.opensOn ? 'due soon' : 'later';
 }

@@ -56,7 +56,7 @@ export type Window = {
   opensOn: CalendarDay;
   closesOn: CalendarDay;
   /** How the window came out of the raw date. */
-  moved: 'in season' | 'to the season before' | 'to the next season' | 'no season';
+  moved: 'in season' | 'to the season before' | 'to the next season' | 'to the coming season' | 'no season';
 };
 
 /** The next work of one kind on one wall, as stored. Nothing in it depends on today except through `lapsesOn`. */
@@ -69,7 +69,9 @@ export type WorkItem = {
   /** The rule's raw date: the day the film is used up, or the yearly day. */
   dueOn: CalendarDay;
   window: Window;
-  /** Yearly work that nobody did is no longer asked for from this day on; the home is planned anew then. */
+  /** The day on which an earlier window closed without the work; null while none has. Such work is overdue. */
+  missedOn: CalendarDay | null;
+  /** The home is planned anew on this day: yearly work that nobody did gives way to the next, film work moves to the coming season. */
   lapsesOn: CalendarDay | null;
   /** 'walkaround first' when a date is not known. */
   basis: 'computed' | 'own rule' | 'date not known' | 'pulled to the restain';

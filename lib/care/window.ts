@@ -13,11 +13,13 @@ const noSeasonDays = 30;
 
 type Run = { opensOn: CalendarDay; closesOn: CalendarDay };
 
+export const isAllYear = ({ fromMonth, toMonth }: SeasonMonths): boolean => (toMonth - fromMonth + 12) % 12 === 11;
+
 /** The seasons of the years around a day, in order. A season of twelve months has no edges. */
-function runsAround(day: CalendarDay, seasons: SeasonMonths[]): Run[] {
+export function runsAround(day: CalendarDay, seasons: SeasonMonths[]): Run[] {
   return seasons
     .flatMap(({ fromMonth, toMonth }) => {
-      if ((toMonth - fromMonth + 12) % 12 === 11) return [{ opensOn: addMonths(day, -12), closesOn: addMonths(day, 12) }];
+      if (isAllYear({ fromMonth, toMonth })) return [{ opensOn: addMonths(day, -12), closesOn: addMonths(day, 12) }];
       const years = [-2, -1, 0, 1].map((shift) => yearOf(day) + shift);
       return years.map((year) => ({ opensOn: dayOf(year, fromMonth, 1), closesOn: monthEnd(fromMonth <= toMonth ? year : year + 1, toMonth) }));
     })

@@ -15,7 +15,8 @@ const washSource: Source = { text: 'A restain begins with a wash, so the wash of
 
 /** The restain's window for a recaulk, or null when the two are too far apart. */
 function sharedWindow(recaulkOn: CalendarDay, restain: WorkItem): Window | null {
-  if (recaulkOn > addMonths(restain.dueOn, nearMonths) || recaulkOn < addMonths(restain.dueOn, -nearMonths)) return null;
+  const restainOn = restain.missedOn ? restain.window.opensOn : restain.dueOn;
+  if (recaulkOn > addMonths(restainOn, nearMonths) || recaulkOn < addMonths(restainOn, -nearMonths)) return null;
   const limit = addDays(recaulkOn, graceDays);
   if (addDays(restain.window.opensOn, shortestDays) > limit) return null;
   return { ...restain.window, closesOn: restain.window.closesOn < limit ? restain.window.closesOn : limit };
@@ -26,6 +27,7 @@ function moved(item: WorkItem, window: Window, because: string, restain: WorkIte
   return {
     ...item,
     window,
+    ...(item.kind === 'recaulk' ? { lapsesOn: addDays(window.closesOn, 1) } : {}),
     basis: 'pulled to the restain',
     because,
     explanation: {
@@ -43,7 +45,7 @@ export function withRestain(items: WorkItem[]): WorkItem[] {
   const restain = items.find(({ kind }) => kind === 'restain');
   if (!restain) return items;
   return items.map((item) => {
-    if (item.basis !== 'computed') return item;
+    if (item.basis !== 'computed' || item.missedOn) return item;
     if (item.kind === 'recaulk') {
       const window = sharedWindow(item.dueOn, restain);
       const because = `Caulk goes on before stain, so it is done with this wall’s restain and left to cure as its label says; on its own the caulk would last until ${aboutDay(item.dueOn)}.`;

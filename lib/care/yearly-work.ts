@@ -74,6 +74,7 @@ export function yearlyWork(home: CareHome, known: KnownWall, kind: YearlyKind, t
     startOn: byRule ? startOn : null,
     ...turn,
     basis: unknown ? 'date not known' : own ? 'own rule' : 'computed',
+    missedOn: null,
     lifeMonths: null,
     because: reason,
     explanation: {

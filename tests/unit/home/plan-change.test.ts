@@ -12,7 +12,7 @@ const item = (wallId: string, kind: WorkKind, opensOn: string): WorkItem => ({
   startOn: null,
   dueOn: opensOn,
   window: { opensOn, closesOn: opensOn, moved: 'in season' },
-  lapsesOn: null,
+  missedOn: null, lapsesOn: null,
   basis: 'computed',
   lifeMonths: null,
   because: '',
