@@ -10,8 +10,8 @@ const verbs: Record<WorkKind, string> = { restain: 'restain', recaulk: 'recaulk'
 
 type Words = { headline: string; advice: string; inSubject: string };
 
-/** What each stage says of each kind of work. */
-export function stageWords(stage: ReminderStage, kind: WorkKind): Words {
+/** What each stage says of each kind of work; `isAhead` when its window has yet to open. */
+export function stageWords(stage: ReminderStage, kind: WorkKind, isAhead: boolean): Words {
   const noun = workKinds[kind].toLowerCase();
   const look = kind === 'walkaround';
   switch (stage) {
@@ -26,13 +26,13 @@ export function stageWords(stage: ReminderStage, kind: WorkKind): Words {
         inSubject: `time to ${verbs[kind]}`,
       };
     case 'overdue':
-      return {
-        headline: 'overdue',
-        advice: look ? 'Nobody has logged a look at this wall this season. Its dates are surer after one.' : 'Do it in the next dry spell, or look at the wall and log what you find.',
-        inSubject: `${noun} is overdue`,
-      };
+      return { headline: 'overdue', advice: look ? overdueLook : isAhead ? missedSeason : nextDrySpell, inSubject: `${noun} is overdue` };
   }
 }
+
+const overdueLook = 'Nobody has logged a look at this wall this season. Its dates are surer after one.';
+const missedSeason = 'It missed its season; below is the next chance, so book it in good time. Until then look at the wall and log what you find.';
+const nextDrySpell = 'Do it in the next dry spell, or look at the wall and log what you find.';
 
 type Ranked = { stage: ReminderStage; kind: WorkKind; dueOn: CalendarDay };
 const kindOrder = keysOf(workKinds);

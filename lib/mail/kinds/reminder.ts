@@ -47,7 +47,7 @@ export const reminderMail = defineMail({
     if (!first) throw new RangeError('a reminder with nothing to say');
     const more = items.length > 1 ? ` and ${items.length - 1} more` : '';
     return {
-      subject: `${props.homeName}: ${stageWords(first.stage, first.kind).inSubject} (${first.wallName})${more}`,
+      subject: `${props.homeName}: ${stageWords(first.stage, first.kind, first.opensOn > props.today).inSubject} (${first.wallName})${more}`,
       heading: `${props.homeName}: what is next`,
       courses: [opening(props, items.length), ...props.walls.map((of) => wallCourse(of, props)), cautionCourse(props, items.map((it) => it.kind))],
       footer: footer(props),
@@ -76,7 +76,7 @@ function wallCourse(of: ReminderProps['walls'][number], props: ReminderProps): C
 }
 
 function itemParts(it: ReminderItem, today: CalendarDay): Part[] {
-  const words = stageWords(it.stage, it.kind);
+  const words = stageWords(it.stage, it.kind, it.opensOn > today);
   return [
     { as: 'text', text: `${workKinds[it.kind]}: ${words.headline}`, look: it.stage === 'overdue' ? 'overdue' : 'due soon' },
     { as: 'text', text: words.advice },

@@ -78,6 +78,14 @@ describe('a reminder', () => {
     expect(text.match(/^(Walkaround|Recaulk|Restain|Wash): .*$/gm)).toEqual(['Walkaround: overdue', 'Restain: time to buy', 'Recaulk: time to buy']);
   });
 
+  it('sends nobody out in a season in which no coat can cure', () => {
+    const textOn = (today: string) => renderMail('reminder', reminderPropsWith({ today, walls: wallsWith({ South: [reminderItem({ stage: 'overdue' })] }) })).text;
+    expect(textOn('2026-12-01')).toContain('It missed its season; below is the next chance');
+    expect(textOn('2026-12-01')).not.toContain('next dry spell');
+    expect(textOn('2027-05-15')).toContain('Do it in the next dry spell');
+    expect(textOn('2027-09-01')).not.toContain('missed its season');
+  });
+
   it('refuses to be written about nothing', () => {
     expect(() => renderMail('reminder', reminderPropsWith({ walls: wallsWith({}) }))).toThrow('nothing to say');
   });
