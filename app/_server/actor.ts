@@ -1,6 +1,5 @@
 import 'server-only';
 import { getServerSession } from 'next-auth';
-import { type Route } from 'next';
 import { redirect } from 'next/navigation';
 import { cache } from 'react';
 import { activePerson } from '@/db/queries/people';
@@ -24,4 +23,4 @@ export async function requireActor(roles?: Role[]): Promise<Actor> {
 }
 
 /** Where each role's work begins. */
-export const homePageOf = (role: Role): Route => (({ homeowner: '/homes', contractor: '/work', operator: '/operator' }) as Record<Role, Route>)[role];
+export const homePageOf = (role: Role) => (({ homeowner: '/homes', contractor: '/work', operator: '/operator' }) as const)[role];
