@@ -10,7 +10,7 @@ export const usualCoat: CoatValues = { finish: 'semitransparent', stainBase: 'oi
 /** What is on the wood and in the joints. */
 export function CoatFields({ values = usualCoat }: { values?: CoatValues }) {
   return (
-    <div className="grid gap-5 sm:grid-cols-2">
+    <div className="grid items-end gap-5 sm:grid-cols-2">
       <SelectField label="Finish on the wood" name="finish" options={finishes} defaultValue={values.finish} />
       <SelectField label="Oil or waterborne" name="stainBase" options={stainBases} defaultValue={values.stainBase} />
       <ColorField name="colorHex" label="Color of the fresh coat" defaultValue={values.colorHex} />

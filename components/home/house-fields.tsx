@@ -30,7 +30,7 @@ export function HouseFields({ units }: { units: UnitSystem }) {
     if ((name === 'frontWidth' || name === 'sideWidth') && typed > 0) setSize((before) => ({ ...before, [name]: typed }));
   };
   return (
-    <div className="grid gap-x-12 gap-y-8 lg:grid-cols-2" onInput={measure}>
+    <div className="grid items-start gap-x-12 gap-y-8 lg:grid-cols-2" onInput={measure}>
       <CompassDial name="compassDeg" hint="Turn the house until it stands as yours does. North is up." frontWidth={size.frontWidth} sideWidth={size.sideWidth} />
       <div className="grid content-start gap-5">
         <div className="grid grid-cols-2 gap-5">

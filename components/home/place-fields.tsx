@@ -41,7 +41,7 @@ export function PlaceFields({ units, defaults = empty }: PlaceFieldsProps) {
       <PlaceAnswer answer={data} loading={isLoading} failed={error !== undefined} started={typed.postalCode.length === 5} units={units} />
       <details open={asks || faults.some(Boolean) || defaults.latitude !== '' || defaults.climateZoneOverride !== ''} className="border-l-4 border-line pl-4">
         <summary className="link min-h-11 py-2 font-semibold">Exact place, height and climate zone</summary>
-        <div className="grid gap-4 pt-2 sm:grid-cols-2">
+        <div className="grid items-end gap-4 pt-2 sm:grid-cols-2">
           <Field label="Latitude" name="latitude" optional={!asks} inputMode="decimal" unit="° N" defaultValue={defaults.latitude} onInput={note('latitude')} />
           <Field label="Longitude" name="longitude" optional={!asks} inputMode="text" unit="° E" defaultValue={defaults.longitude} onInput={note('longitude')} />
           <Field label="Height above sea level" name="elevation" optional hint="Corrects temperatures where the home stands higher than the climate station." unit={units === 'us' ? 'ft' : 'm'} defaultValue={defaults.elevation} />

@@ -50,7 +50,7 @@ export function RecordCourse({ record, walls, units, children }: RecordCoursePro
           {record.note ? <p className="max-w-prose whitespace-pre-line">{record.note}</p> : null}
           <p className="text-sm text-quiet">{record.origin === 'recalled' ? 'As remembered when the wall was set up' : `Logged by ${record.byName ?? 'somebody who has left'}`}</p>
         </div>
-        {children ? <div className="no-print">{children}</div> : null}
+        {children ? <div className="no-print -ml-2 md:ml-0">{children}</div> : null}
       </div>
     </li>
   );

@@ -10,7 +10,7 @@ const nominals = { '6': '6 in nominal', '8': '8 in nominal', '10': '10 in nomina
 
 export function SidingFields({ values = usualSiding }: { values?: SidingValues }) {
   return (
-    <div className="grid gap-5 sm:grid-cols-3">
+    <div className="grid items-end gap-5 sm:grid-cols-3">
       <SelectField label="Log siding" name="sidingNominalIn" hint="As it is sold." options={nominals} defaultValue={values.sidingNominalIn} />
       <SelectField label="Wood" name="wood" hint="As far as you know." options={woods} defaultValue={values.wood} />
       <Field label="Year built" name="yearBuilt" optional inputMode="numeric" maxLength={4} hint="Before 1978: lead." defaultValue={values.yearBuilt} />

@@ -56,7 +56,7 @@ export function WallForm({ action, target, units, today, values, submit }: WallF
       </Course>
       <Course heading="Size" aside={units === 'us' ? 'Feet and inches as you say them: 30, or 30 ft 6 in.' : 'Metres, or centimetres with their unit: 9.1, or 910 cm.'}>
         <div className="grid max-w-3xl gap-6">
-          <div className="grid gap-5 sm:grid-cols-3">
+          <div className="grid items-start gap-5 sm:grid-cols-3">
             {length('Width', 'width')}
             {length('Height', 'height')}
             {length('Gable height', 'gableHeight')}
@@ -66,7 +66,7 @@ export function WallForm({ action, target, units, today, values, submit }: WallF
       </Course>
       <Course heading="Eave and shade" aside="An eave keeps sun and rain off the upper courses.">
         <div className="grid max-w-3xl gap-6">
-          <div className="grid gap-5 sm:grid-cols-2">
+          <div className="grid items-start gap-5 sm:grid-cols-2">
             <LengthField label="Depth of the eave" name="eaveDepth" units={units} defaultValue={values.eaveDepth} hint="From the wall out to the drip edge." presets={eavePresets(units)} />
             <LengthField label="Eave above the wall’s top" name="eaveDrop" units={units} defaultValue={values.eaveDrop} hint="0 where the soffit meets the wall." />
           </div>

@@ -16,10 +16,12 @@ export function WallWork({ homeId, wallId, items, today, mayLog }: WallWorkProps
     <ul>
       {items.map((item) => (
         <li key={item.kind} className="grid gap-x-6 gap-y-1 border-t border-line py-3 first:border-t-0 md:grid-cols-[8rem_minmax(0,1fr)_auto]">
-          <StateMark state={workState(item, today)} />
+          <p>
+            <StateMark state={workState(item, today)} />
+          </p>
           <div className="min-w-0">
             <p className="text-lg">
-              <strong>{workKinds[item.kind]}</strong>: <When spell={{ state: workState(item, today), ...item.window }} today={today} />
+              <strong>{workKinds[item.kind]}</strong>: <When spell={{ state: workState(item, today), missedOn: item.missedOn, ...item.window }} today={today} />
             </p>
             <p className="max-w-prose">{item.because}</p>
             <Figure explanation={withRule(item)} />

@@ -1,8 +1,7 @@
-import { exactWindow, windowWords } from '@/components/plan/window-words';
-import { type WorkState } from '@/lib/care/types';
+import { exactWindow, type Spell, windowWords } from '@/components/plan/window-words';
 import { type CalendarDay } from '@/lib/calendar';
 
-type WhenProps = { spell: { state: WorkState; opensOn: CalendarDay; closesOn: CalendarDay }; today: CalendarDay };
+type WhenProps = { spell: Spell; today: CalendarDay };
 
 /** A window in words; the exact days on hover, and in print. */
 export function When({ spell, today }: WhenProps) {

@@ -6,7 +6,16 @@ import { type WorkKind } from '@/lib/schemas/vocabulary';
 type Named = { id: string; name: string };
 
 /** The same kind of work on several walls in the same window. */
-export type WorkGroup = { kind: WorkKind; state: WorkState; opensOn: CalendarDay; closesOn: CalendarDay; walls: Named[]; items: WorkItem[] };
+export type WorkGroup = {
+  kind: WorkKind;
+  state: WorkState;
+  opensOn: CalendarDay;
+  closesOn: CalendarDay;
+  /** The earliest day on which a window closed without this work. */
+  missedOn: CalendarDay | null;
+  walls: Named[];
+  items: WorkItem[];
+};
 
 const urgency: Record<WorkState, number> = { overdue: 0, due: 1, 'due soon': 2, later: 3 };
 /** Caulk goes before stain; the yearly rounds come last. */
@@ -20,9 +29,10 @@ export function workGroups(items: readonly WorkItem[], walls: readonly Named[], 
       const { opensOn, closesOn } = item.window;
       const state = workState(item, today);
       const key = [item.kind, state, opensOn, closesOn].join(' ');
-      const group = groups.get(key) ?? { kind: item.kind, state, opensOn, closesOn, walls: [], items: [] };
+      const group = groups.get(key) ?? { kind: item.kind, state, opensOn, closesOn, missedOn: item.missedOn, walls: [], items: [] };
       group.walls.push(wall);
       group.items.push(item);
+      if (item.missedOn && item.missedOn < (group.missedOn ?? '9999')) group.missedOn = item.missedOn;
       groups.set(key, group);
     }
   }

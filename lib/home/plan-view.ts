@@ -14,6 +14,7 @@ export type PlanItem = {
   dueOn: CalendarDay;
   opensOn: CalendarDay;
   closesOn: CalendarDay;
+  missedOn: CalendarDay | null;
   because: string;
   /** With the care rule among its inputs. */
   explanation: Explanation;
@@ -45,10 +46,12 @@ export function planView(home: { id: string; revision: number }, walls: readonly
     dueOn: item.dueOn,
     opensOn: item.window.opensOn,
     closesOn: item.window.closesOn,
+    missedOn: item.missedOn,
     because: item.because,
     explanation: withRule(item),
   });
   const inOrder = (a: WorkItem, b: WorkItem) => (place.get(a.wallId) ?? 0) - (place.get(b.wallId) ?? 0);
-  const visits = visitsOf([...items]).map((visit) => ({ opensOn: visit.opensOn, closesOn: visit.closesOn, items: [...visit.items].sort(inOrder).map(show) }));
+  const inPlanOrder = [...items].sort(inOrder);
+  const visits = visitsOf(inPlanOrder).map((visit) => ({ opensOn: visit.opensOn, closesOn: visit.closesOn, items: visit.items.map(show) }));
   return { homeId: home.id, revision: home.revision, today, wallCount: walls.length, visits };
 }

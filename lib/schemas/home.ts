@@ -1,7 +1,7 @@
 import { z } from 'zod';
-import { choice, neededText, readLength, shortText } from '@/lib/schemas/measures';
-import { azimuth, coatSchema, recalledDay, sizes } from '@/lib/schemas/wall';
-import { climateZones, keysOf, unitSystems, woods } from '@/lib/schemas/vocabulary';
+import { choice, neededText, readLength } from '@/lib/schemas/measures';
+import { azimuth, coatSchema, lengthUnits, recalledDay, sizes } from '@/lib/schemas/wall';
+import { climateZones, keysOf, unitSystems, type UnitSystem, woods } from '@/lib/schemas/vocabulary';
 
 export const postalCode = z
   .string({ error: 'The postal code is missing.' })
@@ -23,8 +23,6 @@ const yearBuilt = z
     return year;
   });
 
-const elevation = z.string().trim().optional();
-
 export const sidingNominals = ['6', '8', '10'] as const;
 const zoneOverride = z.union([z.enum(climateZones), z.literal('')]).optional().transform((zone) => zone || undefined);
 
@@ -32,10 +30,6 @@ const aboutHome = z.object({
   units: z.enum(keysOf(unitSystems)),
   name: neededText('A name for the home', 60),
   postalCode,
-  /** Asked for only where the postal code has no place on the map. */
-  latitude: shortText('Latitude', 20),
-  longitude: shortText('Longitude', 20),
-  elevation,
   climateZoneOverride: zoneOverride,
   wood: choice(keysOf(woods), 'a wood'),
   sidingNominalIn: z.enum(sidingNominals, { error: 'Choose the siding width.' }).transform(Number),
@@ -50,40 +44,49 @@ const coordinate = (text: string | undefined, limit: number, field: string, ctx:
   return undefined;
 };
 
-const place = (form: z.output<typeof aboutHome>, ctx: z.RefinementCtx) => ({
+const typed = z.string().trim().optional();
+
+/** Coordinates and height, read on their own so that every wrong field is marked at once. Degrees, m. */
+const place = z.object({ units: lengthUnits, latitude: typed, longitude: typed, elevation: typed }).transform((form, ctx) => {
+  const [given, missing] = form.latitude ? ['latitude', 'longitude'] : ['longitude', 'latitude'];
+  if (!form.latitude !== !form.longitude) ctx.addIssue({ code: 'custom', path: [missing], message: `Give both, or empty the ${given}.` });
+  return { spot: spotOf(form, ctx) };
+});
+
+const spotOf = (form: { units: UnitSystem; latitude?: string | undefined; longitude?: string | undefined; elevation?: string | undefined }, ctx: z.RefinementCtx) => ({
   latitude: coordinate(form.latitude, 72, 'latitude', ctx),
   longitude: coordinate(form.longitude, 180, 'longitude', ctx),
   elevationM: form.elevation ? readLength(form.elevation, form.units, { min: 0, max: 4000, what: 'Height above sea level' }, ctx, ['elevation']) : undefined,
 });
 
 /** Facts of a home that exists already. */
-export const homeSchema = aboutHome.transform((form, ctx) => ({ ...form, ...place(form, ctx) }));
+export const homeSchema = z.intersection(aboutHome, place).transform(({ spot, ...form }) => ({ ...form, ...spot }));
 
 const fourWalls = aboutHome.extend(coatSchema.shape).extend({
   compassDeg: azimuth,
-  frontWidth: z.string().optional(),
-  sideWidth: z.string().optional(),
-  wallHeight: z.string().optional(),
-  gableHeight: z.string().optional(),
   gablesOn: choice(['front', 'sides', 'none'], 'where the gables are'),
-  eaveDepth: z.string().optional(),
   stained: recalledDay('stained'),
   caulked: recalledDay('caulked'),
 });
 
+/** The lengths of a house with four walls, m. */
+const houseLengths = z
+  .object({ units: lengthUnits, frontWidth: typed, sideWidth: typed, wallHeight: typed, gableHeight: typed, gablesOn: typed, eaveDepth: typed })
+  .transform((form, ctx) => {
+    const read = (text: string | undefined, size: keyof typeof sizes, field: string) => readLength(text, form.units, sizes[size], ctx, [field]);
+    return {
+      metres: {
+        frontWidthM: read(form.frontWidth, 'width', 'frontWidth'),
+        sideWidthM: read(form.sideWidth, 'width', 'sideWidth'),
+        wallHeightM: read(form.wallHeight, 'height', 'wallHeight'),
+        gableHeightM: form.gablesOn === 'none' ? 0 : read(form.gableHeight, 'gable', 'gableHeight'),
+        eaveDepthM: read(form.eaveDepth, 'eaveDepth', 'eaveDepth'),
+      },
+    };
+  });
+
 /** A new home with four walls at right angles; out come SI values. */
-export const newHomeSchema = fourWalls.transform((form, ctx) => {
-  const read = (text: string | undefined, size: keyof typeof sizes, field: string) => readLength(text, form.units, sizes[size], ctx, [field]);
-  return {
-    ...form,
-    ...place(form, ctx),
-    frontWidthM: read(form.frontWidth, 'width', 'frontWidth'),
-    sideWidthM: read(form.sideWidth, 'width', 'sideWidth'),
-    wallHeightM: read(form.wallHeight, 'height', 'wallHeight'),
-    gableHeightM: form.gablesOn === 'none' ? 0 : read(form.gableHeight, 'gable', 'gableHeight'),
-    eaveDepthM: read(form.eaveDepth, 'eaveDepth', 'eaveDepth'),
-  };
-});
+export const newHomeSchema = z.intersection(fourWalls, z.intersection(place, houseLengths)).transform(({ spot, metres, ...form }) => ({ ...form, ...spot, ...metres }));
 
 export type HomeInput = z.output<typeof homeSchema>;
 export type NewHomeInput = z.output<typeof newHomeSchema>;

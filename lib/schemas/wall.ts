@@ -14,6 +14,9 @@ export const sizes = {
   openingHeight: { min: 0.1, max: 6, what: 'Height' },
 } as const;
 
+/** The system that lengths are typed in. */
+export const lengthUnits = z.enum(keysOf(unitSystems)).catch('us');
+
 export const azimuth = z.coerce
   .number({ error: 'Direction should be a number of degrees, 0 to 359.' })
   .min(0, 'Direction should be 0 to 359 degrees.')
@@ -37,8 +40,6 @@ export const recalledDay = (what: string) =>
 
 const opening = z.object({
   kind: z.enum(['window', 'door']),
-  width: z.string().optional(),
-  height: z.string().optional(),
   count: z.coerce.number({ error: 'How many?' }).int('How many? A whole number.').min(1, 'At least 1, or remove the row.').max(50, 'At most 50.'),
 });
 
@@ -55,11 +56,6 @@ const wallFields = coatSchema.extend({
   units: z.enum(keysOf(unitSystems)),
   name: neededText('A name', 40),
   azimuthDeg: azimuth,
-  width: z.string().optional(),
-  height: z.string().optional(),
-  gableHeight: z.string().optional(),
-  eaveDepth: z.string().optional(),
-  eaveDrop: z.string().optional(),
   shade: choice(keysOf(shades), 'what stands in front'),
   shadeHeightDeg: z.coerce.number({ error: 'Height of the shade should be a number of degrees.' }).min(0).max(80, 'At most 80 degrees.').default(0),
   weatherSide: checkbox,
@@ -68,23 +64,40 @@ const wallFields = coatSchema.extend({
   caulked: recalledDay('caulked'),
 });
 
+const typed = z.string().optional();
+const typedOpening = z.object({ width: typed, height: typed }).catch({});
+
+/** The lengths of the wall form, read on their own so that every wrong field is marked at once. In m. */
+const wallLengths = z
+  .object({ units: lengthUnits, width: typed, height: typed, gableHeight: typed, eaveDepth: typed, eaveDrop: typed, openings: z.record(z.string(), typedOpening).catch({}) })
+  .transform(({ units, openings, ...form }, ctx) => {
+    const read = (text: string | undefined, size: keyof typeof sizes, ...path: string[]) => readLength(text, units, sizes[size], ctx, path);
+    return {
+      metres: {
+        widthM: read(form.width, 'width', 'width'),
+        heightM: read(form.height, 'height', 'height'),
+        gableHeightM: read(form.gableHeight, 'gable', 'gableHeight'),
+        eaveDepthM: read(form.eaveDepth, 'eaveDepth', 'eaveDepth'),
+        eaveDropM: read(form.eaveDrop, 'eaveDrop', 'eaveDrop'),
+      },
+      openingMetres: Object.entries(openings).map(([row, one]) => ({
+        row,
+        widthM: read(one.width, 'openingWidth', 'openings', row, 'width'),
+        heightM: read(one.height, 'openingHeight', 'openings', row, 'height'),
+      })),
+    };
+  });
+
 /** The wall form: lengths as typed in the person's units; out come metres. */
-export const wallSchema = wallFields.transform((form, ctx) => {
-  const { units, width, height, gableHeight, eaveDepth, eaveDrop, openings, ...rest } = form;
-  const read = (text: string | undefined, size: keyof typeof sizes, field: string) => readLength(text, units, sizes[size], ctx, field.split('.'));
+export const wallSchema = z.intersection(wallFields, wallLengths).transform((form, ctx) => {
+  const { units: _units, openings, metres, openingMetres, ...rest } = form;
   const wall = {
     ...rest,
-    widthM: read(width, 'width', 'width'),
-    heightM: read(height, 'height', 'height'),
-    gableHeightM: read(gableHeight, 'gable', 'gableHeight'),
-    eaveDepthM: read(eaveDepth, 'eaveDepth', 'eaveDepth'),
-    eaveDropM: read(eaveDrop, 'eaveDrop', 'eaveDrop'),
-    openings: Object.entries(openings).map(([row, one]) => ({
-      kind: one.kind,
-      count: one.count,
-      widthM: read(one.width, 'openingWidth', `openings.${row}.width`),
-      heightM: read(one.height, 'openingHeight', `openings.${row}.height`),
-    })),
+    ...metres,
+    openings: openingMetres.flatMap(({ row, ...size }) => {
+      const one = openings[row];
+      return one ? [{ kind: one.kind, count: one.count, ...size }] : [];
+    }),
   };
   const gross = wall.widthM * (wall.heightM + wall.gableHeightM / 2);
   const holes = wall.openings.reduce((sum, one) => sum + one.widthM * one.heightM * one.count, 0);

@@ -8,6 +8,14 @@ const litresPerGallon = 3.785411784;
 const optionalChoice = <T extends [string, ...string[]]>(values: T) =>
   z.union([z.enum(values), z.literal('')]).optional().transform((value) => (value || undefined) as T[number] | undefined);
 
+const amount = z.string().trim().optional().transform((text, ctx) => {
+  if (!text) return undefined;
+  const value = Number(text.replace(',', '.'));
+  if (Number.isFinite(value) && value >= 0 && value <= 5000) return value;
+  ctx.addIssue({ code: 'custom', message: 'The amount could not be read: write it like 3 or 3.5.' });
+  return undefined;
+});
+
 const fields = z.object({
   homeId: neededText('The home', 60),
   submissionKey: z.uuid('Reload the page and send this again.'),
@@ -16,7 +24,7 @@ const fields = z.object({
   wallIds: z.array(z.string().min(1).max(60), { error: 'Choose at least one wall.' }).min(1, 'Choose at least one wall.').max(60),
   doneOn: z.string({ error: 'Say which day.' }).trim().refine(isCalendarDay, 'Say which day, like 2026-06-15.'),
   product: shortText('The product', 120),
-  amount: z.string().trim().optional(),
+  amount,
   cost: dollars('The cost'),
   note: shortText('The note', 2000),
   finish: optionalChoice(keysOf(finishes)),
@@ -26,14 +34,9 @@ const fields = z.object({
 });
 
 /** The log form: the amount in gallons or litres as typed; out come litres. What does not belong to the kind of work is dropped. */
-export const logWorkSchema = fields.transform((form, ctx) => {
-  const { amount, units, cost, ...rest } = form;
-  let amountL: number | undefined;
-  if (amount) {
-    const value = Number(amount.replace(',', '.'));
-    if (!Number.isFinite(value) || value < 0 || value > 5000) ctx.addIssue({ code: 'custom', path: ['amount'], message: 'The amount could not be read: write it like 3 or 3.5.' });
-    else amountL = units === 'us' ? value * litresPerGallon : value;
-  }
+export const logWorkSchema = fields.transform((form) => {
+  const { amount: typed, units, cost, ...rest } = form;
+  const amountL = typed === undefined ? undefined : units === 'us' ? typed * litresPerGallon : typed;
   const coat = rest.kind === 'restain';
   return {
     ...rest,

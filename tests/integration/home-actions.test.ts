@@ -72,9 +72,9 @@ describe('setting up a home', () => {
   });
 
   it('keeps what was typed and marks each wrong field', async () => {
-    const { state } = await send((await actions.new()).create, newHomeForm({ name: '', frontWidth: 'forty', postalCode: '597', 'stained.on': '2022-02-30' }));
+    const { state } = await send((await actions.new()).create, newHomeForm({ name: '', frontWidth: 'forty', latitude: '45', postalCode: '597', 'stained.on': '2022-02-30' }));
     expect(state?.ok).toBe(false);
-    expect(Object.keys(state?.errors ?? {}).sort()).toEqual(['frontWidth', 'name', 'postalCode', 'stained.on']);
+    expect(Object.keys(state?.errors ?? {}).sort()).toEqual(['frontWidth', 'longitude', 'name', 'postalCode', 'stained.on']);
     expect(state?.values).toMatchObject({ frontWidth: 'forty', postalCode: '597', stained: { on: '2022-02-30' }, sideWidth: '28' });
     expect(listHomes(owner)).toHaveLength(1);
   });
@@ -199,8 +199,8 @@ describe('logging work', () => {
     expect((await send(log, logForm({ homeId, 'wallIds[]': [wallId('Front')], doneOn: '2026-12-01' }))).to).toBeDefined();
     const unknown = await send(log, logForm({ homeId, 'wallIds[]': [wallId('Front'), 'no-such-wall'] }));
     expect(unknown.state?.message).toContain('A wall that you chose was not found');
-    const none = await send(log, logForm({ homeId, kind: 'paint', cost: 'much' }));
-    expect(Object.keys(none.state?.errors ?? {}).sort()).toEqual(['cost', 'kind', 'wallIds']);
+    const none = await send(log, logForm({ homeId, kind: 'paint', amount: 'some', cost: 'much' }));
+    expect(Object.keys(none.state?.errors ?? {}).sort()).toEqual(['amount', 'cost', 'kind', 'wallIds']);
     expect(none.state?.values).toMatchObject({ cost: 'much' });
   });
 
@@ -236,8 +236,8 @@ describe('changing a home', () => {
     expect((await send(saveWall, wallForm({ ...target, ...rows }))).to).toBe(`/homes/${homeId}/walls/${target.wallId}`);
     const saved = wallsOfHome(homeId)[0]?.openings.map(({ kind, widthM, heightM, count }) => [kind, widthM, heightM, count]);
     expect(saved).toEqual([['window', expect.closeTo(0.9144, 6), expect.closeTo(1.2192, 6), 2], ['door', expect.closeTo(0.9144, 6), expect.closeTo(2.032, 6), 1]]);
-    const { state } = await send(saveWall, wallForm({ ...target, ...rows, 'openings.4.height': 'tall' }));
-    expect(Object.keys(state?.errors ?? {})).toEqual(['openings.4.height']);
+    const { state } = await send(saveWall, wallForm({ ...target, ...rows, 'openings.4.height': 'tall', name: '' }));
+    expect(Object.keys(state?.errors ?? {}).sort()).toEqual(['name', 'openings.4.height']);
     expect(state?.values).toMatchObject({ openings: { 4: { height: 'tall' } } });
     const larger = await send(saveWall, wallForm({ ...target, ...rows, 'openings.0.count': '40' }));
     expect(larger.state?.errors?.openings).toContain('larger than the wall');
