@@ -6,7 +6,7 @@ import { transaction } from '@/db/queries/transaction';
 import { type Actor, can, type HomeVerb, isRoleVerb, nobody, Refused, type RoleVerb } from '@/lib/permissions';
 import { type ActionState } from '@/lib/schemas/action-state';
 import { currentActor } from './actor';
-import { readForm } from './form-data';
+import { readForm } from '@/lib/schemas/form-values';
 import { logFault } from './log';
 import { fieldErrors } from './problem';
 

@@ -7,7 +7,7 @@ import { workState } from '@/lib/care/state';
 import { careHome, careRecord } from '../../fixtures/care-home';
 
 /** A restain of June 2017 on walls that want one every few years: long overdue. */
-const late = careHome({ records: [careRecord('restain', '2017-06-10', ['w1'])] });
+const late = careHome({ records: [careRecord('restain', '2017-06-10')] });
 const restain = (today: string, home = late) => planHome(home, today).walls[0]?.items.find(({ kind }) => kind === 'restain');
 
 describe('work whose window passed', () => {
@@ -32,7 +32,7 @@ describe('work whose window passed', () => {
   });
 
   test('is over once it is logged', () => {
-    const done = careHome({ records: [careRecord('restain', '2017-06-10', ['w1']), careRecord('restain', '2026-08-20', ['w1'])] });
+    const done = careHome({ records: [careRecord('restain', '2017-06-10'), careRecord('restain', '2026-08-20')] });
     const item = restain('2026-12-01', done);
     expect(item?.missedOn).toBeNull();
     expect(item && workState(item, '2026-12-01')).toBe('later');
@@ -52,7 +52,7 @@ describe('work whose window passed', () => {
   });
 
   test('the coming caulk joins an overdue restain where it is due within 18 months', () => {
-    const home = careHome({ records: [careRecord('restain', '2017-06-10', ['w1']), careRecord('recaulk', '2020-06-10', ['w1'])] });
+    const home = careHome({ records: [careRecord('restain', '2017-06-10'), careRecord('recaulk', '2020-06-10')] });
     const [wall] = planHome(home, '2026-12-01').walls;
     const caulk = wall?.items.find(({ kind }) => kind === 'recaulk');
     const stain = wall?.items.find(({ kind }) => kind === 'restain');
