@@ -3,7 +3,7 @@ import { carriedOver } from './carry-over';
 import { filmWork } from './film-work';
 import { knownWall } from './films';
 import { type CareHome, type CareWall, type HomePlan, type WallPlan, type WorkItem } from './types';
-import { visitsOf, workOrder } from './visits';
+import { visitsOf } from './visits';
 import { withRestain } from './with-restain';
 import { yearlyWork } from './yearly-work';
 
@@ -11,18 +11,16 @@ const inPosition = (a: CareWall, b: CareWall) => a.position - b.position || (a.i
 
 function planWall(home: CareHome, wall: CareWall, today: CalendarDay): WallPlan {
   const known = knownWall(home, wall);
-  const film = (kind: 'restain' | 'recaulk') => {
-    const item = filmWork(home, known, kind);
-    return item && carriedOver(item, home.seasons[known.wall.stainBase].seasons, today);
-  };
+  const { seasons } = home.seasons[known.wall.stainBase];
+  const carried = (item: WorkItem | null) => item && carriedOver(item, seasons, today);
+  const restain = carried(filmWork(home, known, 'restain'));
   const items: (WorkItem | null)[] = [
-    film('restain'),
-    film('recaulk'),
-    yearlyWork(home, known, 'wash', today),
     yearlyWork(home, known, 'walkaround', today),
+    withRestain(yearlyWork(home, known, 'wash', today), restain),
+    carried(withRestain(filmWork(home, known, 'recaulk'), restain)),
+    restain,
   ];
-  const found = withRestain(items.filter((item) => item !== null)).sort((a, b) => workOrder[a.kind] - workOrder[b.kind]);
-  return { wallId: wall.id, coat: known.coat, seal: known.seal, items: found };
+  return { wallId: wall.id, coat: known.coat, seal: known.seal, items: items.filter((item) => item !== null) };
 }
 
 /**

@@ -27,7 +27,6 @@ function moved(item: WorkItem, window: Window, because: string, restain: WorkIte
   return {
     ...item,
     window,
-    ...(item.kind === 'recaulk' ? { lapsesOn: addDays(window.closesOn, 1) } : {}),
     basis: 'pulled to the restain',
     because,
     explanation: {
@@ -40,18 +39,14 @@ function moved(item: WorkItem, window: Window, because: string, restain: WorkIte
   };
 }
 
-/** Work of one wall that belongs with its restain takes the restain's window: the recaulk before it, and that year's wash. The owner's own rules stand. */
-export function withRestain(items: WorkItem[]): WorkItem[] {
-  const restain = items.find(({ kind }) => kind === 'restain');
-  if (!restain) return items;
-  return items.map((item) => {
-    if (item.basis !== 'computed' || item.missedOn) return item;
-    if (item.kind === 'recaulk') {
-      const window = sharedWindow(item.dueOn, restain);
-      const because = `Caulk goes on before stain, so it is done with this wall’s restain and left to cure as its label says; on its own the caulk would last until ${aboutDay(item.dueOn)}.`;
-      return window ? moved(item, window, because, restain, [caulkFirst, nearSource]) : item;
-    }
-    const inYear = [restain.window.opensOn, restain.window.closesOn].some((day) => yearOf(day) === yearOf(item.dueOn));
-    return item.kind === 'wash' && inYear ? moved(item, restain.window, 'The restain of this wall begins with a wash.', restain, [washSource]) : item;
-  });
+/** A recaulk or wash of the wall that belongs with its restain takes the restain's window; other work stays as it is, and so do the owner's own rules. */
+export function withRestain(item: WorkItem | null, restain: WorkItem | null): WorkItem | null {
+  if (!item || !restain || item.basis !== 'computed') return item;
+  if (item.kind === 'recaulk') {
+    const window = sharedWindow(item.dueOn, restain);
+    const because = `Caulk goes on before stain, so it is done with this wall’s restain and left to cure as its label says; on its own the caulk would last until ${aboutDay(item.dueOn)}.`;
+    return window ? moved(item, window, because, restain, [caulkFirst, nearSource]) : item;
+  }
+  const inYear = [restain.window.opensOn, restain.window.closesOn].some((day) => yearOf(day) === yearOf(item.dueOn));
+  return item.kind === 'wash' && inYear ? moved(item, restain.window, 'The restain of this wall begins with a wash.', restain, [washSource]) : item;
 }

@@ -8,7 +8,7 @@ import { monthWindow } from './window';
 export type Turn = { dueOn: CalendarDay; window: Window };
 
 /** Turns that lie ahead of a day, enough to find one that is still to be done and the one after it. */
-const ahead = 4;
+const ahead = 6;
 const longestLookDays = 366 * 40;
 
 /** The turns of a rule whose month is not over on `since`: those begun by `today`, and the next few. One a month. */
