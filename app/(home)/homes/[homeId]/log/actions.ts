@@ -28,9 +28,9 @@ export const log = defineAction({
     const walls = wallsOfHome(home.id).map(({ wall }) => wall);
     return { isNew, changes: planChange(before, itemsOf([home.id]), walls) };
   },
-  after: async ({ isNew, changes }, { homeId }) => {
+  after: async ({ isNew, changes }, { homeId }, actor) => {
     await say(isNew ? ['Logged.', ...(changes.length > 0 ? changes : ['Nothing in the plan moves.'])].join(' ') : 'Logged. It arrived twice and made one record. To log more work, open the form again.');
     revalidatePath(`/homes/${homeId}`, 'layout');
-    redirect(`/homes/${homeId}`);
+    redirect(actor.role === 'contractor' ? `/work/${homeId}` : `/homes/${homeId}`);
   },
 });

@@ -1,0 +1,5 @@
+import { LoadingCourses } from '@/components/ui/loading-courses';
+
+export default function Loading() {
+  return <LoadingCourses label="Loading your homes" count={3} />;
+}
