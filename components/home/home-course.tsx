@@ -3,13 +3,14 @@ import { type Route } from 'next';
 import { When } from '@/components/plan/when';
 import { StateMark } from '@/components/ui/state-mark';
 import { type CalendarDay } from '@/lib/calendar';
-import { wallWords, type WorkGroup } from '@/lib/home/next-work';
-import { memberships, type Membership, workKinds } from '@/lib/schemas/vocabulary';
+import { missedSince, type WorkGroup, workWords } from '@/lib/home/next-work';
+import { memberships, type Membership } from '@/lib/schemas/vocabulary';
 
-type HomeCourseProps = { id: string; name: string; place: string; membership: Membership; wallCount: number; next: WorkGroup | undefined; today: CalendarDay };
+type HomeCourseProps = { id: string; name: string; place: string; membership: Membership; wallCount: number; next: readonly WorkGroup[]; today: CalendarDay };
 
 /** One home as one course: what is next, on which walls, when. */
 export function HomeCourse({ id, name, place, membership, wallCount, next, today }: HomeCourseProps) {
+  const [first] = next;
   return (
     <li className="course relative has-[a:hover]:bg-inset">
       <div className="within grid gap-x-10 gap-y-3 py-6 md:grid-cols-[minmax(0,1fr)_minmax(0,1.6fr)]">
@@ -24,11 +25,14 @@ export function HomeCourse({ id, name, place, membership, wallCount, next, today
             {membership === 'owner' ? '' : ` · you are ${memberships[membership].toLowerCase()}`}
           </p>
         </div>
-        {next ? (
+        {first ? (
           <div className="grid justify-items-start gap-1">
-            <StateMark state={next.state} />
+            <StateMark state={first.state} />
             <p className="text-lg">
-              <strong>{workKinds[next.kind]}</strong> {wallWords(next.walls, wallCount)}: <When spell={next} today={today} />
+              <strong>{workWords(next, wallCount)}</strong>
+            </p>
+            <p>
+              <When spell={{ ...first, missedOn: missedSince(next) }} today={today} capital />
             </p>
           </div>
         ) : (

@@ -5,8 +5,7 @@ import { Course, type Tone } from '@/components/ui/course';
 import { StateMark } from '@/components/ui/state-mark';
 import { type CalendarDay } from '@/lib/calendar';
 import { type WorkState } from '@/lib/care/types';
-import { wallWords, type WorkGroup } from '@/lib/home/next-work';
-import { workKinds } from '@/lib/schemas/vocabulary';
+import { missedSince, type WorkGroup, workWords } from '@/lib/home/next-work';
 
 const tones: Record<WorkState, Tone> = { overdue: 'ember', due: 'honey', 'due soon': 'honey', later: 'plain' };
 
@@ -17,28 +16,28 @@ type NextCourseProps = {
   wallCount: number;
   today: CalendarDay;
   mayLog: boolean;
-  /** Figures of the wall that decides. */
+  /** Of the wall that presses most. */
+  why?: { wall: string; because: string } | undefined;
+  /** Its figures. */
   children: ReactNode;
 };
 
 /** What is next and why, in one sentence. */
-export function NextCourse({ homeId, groups, wallCount, today, mayLog, children }: NextCourseProps) {
+export function NextCourse({ homeId, groups, wallCount, today, mayLog, why, children }: NextCourseProps) {
   const [first] = groups;
   if (!first) return null;
   const query = new URLSearchParams([['kind', first.kind], ...first.walls.map(({ id }) => ['wall', id])]);
-  const because = first.items[0]?.because;
   return (
     <Course heading="Next" tone={tones[first.state]} aside={<StateMark state={first.state} />}>
-      <p className="figures max-w-4xl text-2xl md:text-3xl">
-        {groups.map((group, i) => (
-          <span key={`${group.kind} ${group.opensOn}`}>
-            {i > 0 ? ', ' : ''}
-            {i === 0 ? workKinds[group.kind] : workKinds[group.kind].toLowerCase()} {wallWords(group.walls, wallCount)}
-          </span>
-        ))}
-        : <When spell={first} today={today} />.
+      <p className="figures max-w-4xl text-2xl md:text-3xl">{workWords(groups, wallCount)}</p>
+      <p className="mt-1 text-xl">
+        <When spell={{ ...first, missedOn: missedSince(groups) }} today={today} capital />
       </p>
-      {because ? <p className="mt-3 max-w-prose text-lg">{because}</p> : null}
+      {why ? (
+        <p className="mt-3 max-w-prose">
+          <strong>{why.wall}:</strong> {why.because}
+        </p>
+      ) : null}
       <div className="mt-3 grid max-w-4xl gap-x-10 sm:grid-cols-3 sm:[&>details[open]]:col-span-full">{children}</div>
       <div className="no-print mt-5 flex flex-wrap gap-3">
         {mayLog ? <LinkButton href={`/homes/${homeId}/log?${query}`}>Log it</LinkButton> : null}

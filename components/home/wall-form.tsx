@@ -29,6 +29,7 @@ export type WallFormValues = {
   coat: CoatValues;
   stained: CalendarDay | null | undefined;
   caulked: CalendarDay | null | undefined;
+  logged?: { restain?: CalendarDay | undefined; recaulk?: CalendarDay | undefined };
 };
 
 type WallFormProps = {
@@ -79,8 +80,8 @@ export function WallForm({ action, target, units, today, values, submit }: WallF
           <CoatFields values={values.coat} />
         </div>
       </Course>
-      <Course heading="Last time" aside="As you remember it. Work that you log counts in any case.">
-        <LastDoneFields today={today} stained={values.stained} caulked={values.caulked} />
+      <Course heading="Last time" aside="As you remember it.">
+        <LastDoneFields today={today} stained={values.stained} caulked={values.caulked} {...(values.logged ? { logged: values.logged } : {})} />
       </Course>
       <Course as="div" tone="quiet">
         <SubmitButton>{submit}</SubmitButton>

@@ -5,6 +5,7 @@ import { StateMark } from '@/components/ui/state-mark';
 import { workState } from '@/lib/care';
 import { type WorkItem } from '@/lib/care/types';
 import { type CalendarDay } from '@/lib/calendar';
+import { urgency } from '@/lib/home/next-work';
 import { withRule } from '@/lib/home/plan-view';
 import { workKinds } from '@/lib/schemas/vocabulary';
 
@@ -14,7 +15,7 @@ type WallWorkProps = { homeId: string; wallId: string; items: readonly WorkItem[
 export function WallWork({ homeId, wallId, items, today, mayLog }: WallWorkProps) {
   return (
     <ul>
-      {items.map((item) => (
+      {items.toSorted((a, b) => urgency[workState(a, today)] - urgency[workState(b, today)]).map((item) => (
         <li key={item.kind} className="grid gap-x-6 gap-y-1 border-t border-line py-3 first:border-t-0 md:grid-cols-[8rem_minmax(0,1fr)_auto]">
           <p>
             <StateMark state={workState(item, today)} />

@@ -17,7 +17,7 @@ export function PlanCourses({ initial, mayLog }: PlanCoursesProps) {
         {plan.revision === initial.revision ? '' : 'The plan has changed.'}
       </p>
       {plan.visits.map((visit) => (
-        <VisitCourse key={`${visit.opensOn} ${visit.items[0]?.wallId} ${visit.items[0]?.kind}`} homeId={plan.homeId} visit={visit} today={plan.today} mayLog={mayLog} />
+        <VisitCourse key={`${visit.opensOn} ${visit.items[0]?.wallId} ${visit.items[0]?.kind}`} homeId={plan.homeId} visit={visit} today={plan.today} wallCount={plan.wallCount} mayLog={mayLog} />
       ))}
     </div>
   );

@@ -17,7 +17,8 @@ export type WorkGroup = {
   items: WorkItem[];
 };
 
-const urgency: Record<WorkState, number> = { overdue: 0, due: 1, 'due soon': 2, later: 3 };
+/** Most pressing first. */
+export const urgency: Record<WorkState, number> = { overdue: 0, due: 1, 'due soon': 2, later: 3 };
 /** Caulk goes before stain; the yearly rounds come last. */
 const order: Record<WorkKind, number> = { recaulk: 0, restain: 1, wash: 2, walkaround: 3 };
 
@@ -46,3 +47,31 @@ export function wallWords(chosen: readonly Named[], all: number): string {
   const last = names.pop() ?? '';
   return names.length > 0 ? `${names.join(', ')} and ${last}` : last;
 }
+
+/** The most pressing work of a home and what falls into the same window with it: what one trip does next. */
+export function nextTogether(groups: readonly WorkGroup[]): WorkGroup[] {
+  const [first] = groups;
+  if (!first) return [];
+  return groups.filter((group) => group.opensOn === first.opensOn && group.closesOn === first.closesOn && group.state === first.state);
+}
+
+const capital = (words: string) => words.charAt(0).toUpperCase() + words.slice(1);
+
+/** 'Recaulk and restain Front and Back, wash Left side'. */
+export function workWords(groups: readonly WorkGroup[], wallCount: number): string {
+  const byWalls = new Map<string, { kinds: WorkKind[]; walls: Named[] }>();
+  for (const { kind, walls } of groups) {
+    const key = walls.map(({ id }) => id).join(' ');
+    byWalls.set(key, { walls, kinds: [...(byWalls.get(key)?.kinds ?? []), kind] });
+  }
+  return capital([...byWalls.values()].map(({ kinds, walls }) => `${kinds.join(' and ')} ${wallWords(walls, wallCount)}`).join(', '));
+}
+
+/** The item that presses most: a coat before caulk, then the earliest day on which its film is used up. */
+export function decidingItem(groups: readonly WorkGroup[]): WorkItem | undefined {
+  const group = groups.find(({ kind }) => kind === 'restain') ?? groups[0];
+  return group?.items.toSorted((a, b) => (a.dueOn < b.dueOn ? -1 : 1))[0];
+}
+
+/** The earliest missed day of some work, for one sentence about all of it. */
+export const missedSince = (groups: readonly WorkGroup[]): CalendarDay | null => groups.flatMap(({ missedOn }) => missedOn ?? []).sort()[0] ?? null;

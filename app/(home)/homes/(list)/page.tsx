@@ -12,7 +12,7 @@ import { PageHead } from '@/components/ui/page-head';
 import { homesWithWork } from '@/db/queries/home-list';
 import { archivedHome } from '@/db/queries/homes';
 import { dayIn } from '@/lib/calendar';
-import { workGroups } from '@/lib/home/next-work';
+import { nextTogether, workGroups } from '@/lib/home/next-work';
 import { restore } from '../actions';
 
 export const metadata: Metadata = { title: 'Homes' };
@@ -39,7 +39,7 @@ export default async function HomesPage({ searchParams }: Props) {
         <ul>
           {homes.map(({ home, membership, walls, items }) => {
             const today = dayIn(home.timeZone, now);
-            const [next] = workGroups(items, walls, today);
+            const next = nextTogether(workGroups(items, walls, today));
             return <HomeCourse key={home.id} id={home.id} name={home.name} place={[home.place, home.state].filter(Boolean).join(', ')} membership={membership} wallCount={walls.length} next={next} today={today} />;
           })}
         </ul>

@@ -19,7 +19,7 @@ import { takenOutWall } from '@/db/queries/walls';
 import { workState } from '@/lib/care';
 import { dayIn, monthOf } from '@/lib/calendar';
 import { stationById } from '@/lib/climate';
-import { workGroups } from '@/lib/home/next-work';
+import { decidingItem, nextTogether, workGroups } from '@/lib/home/next-work';
 import { seasonsOf } from '@/lib/home/season';
 import { can } from '@/lib/permissions';
 import { bringBackWall } from './walls/actions';
@@ -38,18 +38,18 @@ export default async function HomePage({ params, searchParams }: Props) {
   const today = dayIn(home.timeZone, new Date());
   const rows = walls.map(({ wall }) => wall);
   const groups = workGroups(walls.flatMap(({ items }) => items), rows, today);
-  const [first] = groups;
-  const together = groups.filter((group) => group.opensOn === first?.opensOn && group.closesOn === first.closesOn && group.state === first.state);
-  const deciding = walls.find(({ wall }) => wall.id === first?.walls[0]?.id);
+  const together = nextTogether(groups);
+  const item = decidingItem(together);
+  const deciding = walls.find(({ wall }) => wall.id === item?.wallId);
   const { station, seasons } = seasonsOf(home, rows.map((wall) => wall.stainBase));
   return (
     <main id="main">
       <PageHead title={home.name} lead={[home.place, home.state].filter(Boolean).join(', ')} path={[{ href: '/homes', label: 'Homes' }]} actions={<HomeActions homeId={home.id} mayEdit={may('home.edit')} mayLog={may('work.log')} />} />
       <Said words={await whatWasSaid()} />
       {gone ? <Undo done={`${gone.name} was taken out. Its history is kept.`} label={`Bring ${gone.name} back`} action={bringBackWall} fields={{ homeId: home.id, wallId: gone.id }} /> : null}
-      {deciding ? (
-        <NextCourse homeId={home.id} groups={together} wallCount={rows.length} today={today} mayLog={may('work.log')}>
-          <WallFigures planned={deciding} home={home} station={stationById(home.stationId)} today={today} units={unitsOf(actor)} films={first?.kind === 'recaulk' ? ['seal'] : ['coat']} />
+      {deciding && item ? (
+        <NextCourse homeId={home.id} groups={together} wallCount={rows.length} today={today} mayLog={may('work.log')} why={{ wall: deciding.wall.name, because: item.because }}>
+          <WallFigures planned={deciding} home={home} station={stationById(home.stationId)} today={today} units={unitsOf(actor)} films={item.kind === 'recaulk' ? ['seal'] : ['coat']} />
         </NextCourse>
       ) : null}
       {walls.length === 0 ? <NoWalls homeId={home.id} /> : null}

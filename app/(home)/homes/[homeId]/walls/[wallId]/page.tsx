@@ -43,24 +43,24 @@ export default async function WallPage({ params }: Props) {
       <PageHead title={wall.name} lead={`Faces ${directionWord(wall.azimuthDeg)}. ${words}`} path={[{ href: '/homes', label: 'Homes' }, { href: `/homes/${homeId}`, label: home.name }]} actions={mayEdit ? <LinkButton href={`/homes/${homeId}/walls/${wallId}/edit`} look="quiet">Edit this wall</LinkButton> : null} />
       <Said words={await whatWasSaid()} />
       <Course as="div">
-        <WallElevation name={wall.name} widthM={wall.widthM} heightM={wall.heightM} gableHeightM={wall.gableHeightM} eaveDepthM={wall.eaveDepthM} courseM={courseM} openings={openings} colorHex={wall.colorHex} used={used} words={`${wall.name} from the front. ${words}`} />
+        <div className="grid items-center gap-x-12 gap-y-6 lg:grid-cols-[3fr_2fr]">
+          <WallElevation name={wall.name} widthM={wall.widthM} heightM={wall.heightM} gableHeightM={wall.gableHeightM} eaveDepthM={wall.eaveDepthM} courseM={courseM} openings={openings} colorHex={wall.colorHex} used={used} words={`${wall.name} from the front. ${words}`} />
+          <div className="grid grid-cols-[auto_minmax(0,1fr)] gap-x-10 [&>details[open]]:col-span-full">
+            <WallFigures planned={{ ...planned, exposure: null }} home={home} station={undefined} today={today} units={units} films={['coat', 'seal']} />
+          </div>
+        </div>
       </Course>
       <Course heading="Next work">
         <WallWork homeId={homeId} wallId={wallId} items={items} today={today} mayLog={can(actor, 'work.log', { membership })} />
       </Course>
-      <Course heading="Coat and caulk" aside="Open a figure to see how it comes about.">
-        <div className="flex flex-wrap gap-x-10">
-          <WallFigures planned={{ ...planned, exposure: null }} home={home} station={undefined} today={today} units={units} films={['coat', 'seal']} />
-        </div>
-      </Course>
       <Course heading="Sun">
-        <div className="flex flex-wrap gap-x-10">
+        <div className="mb-4 grid gap-x-10 sm:grid-cols-2 sm:[&>details[open]]:col-span-full">
           <WallFigures planned={planned} home={home} station={stationById(home.stationId)} today={today} units={units} films={[]} hours />
         </div>
         {exposure ? <MonthlySun wallName={wall.name} doseMonthly={exposure.doseMonthly} /> : null}
       </Course>
       <Course heading="Done on this wall" aside={<LinkButton href={`/homes/${homeId}/record`} look="plain">The whole record</LinkButton>}>
-        {records.length === 0 ? <p className="text-quiet">Nothing yet.</p> : null}
+        <p className="text-quiet">{records.length === 0 ? 'Nothing yet.' : `${records.length} ${records.length === 1 ? 'piece' : 'pieces'} of work, newest first.`}</p>
       </Course>
       <ul>
         {records.map((record) => (

@@ -17,12 +17,13 @@ type Props = { params: Promise<{ homeId: string; wallId: string }> };
 
 export default async function EditWallPage({ params }: Props) {
   const { homeId, wallId } = await params;
-  const { actor } = await pageHome(homeId);
+  const { actor, view } = await pageHome(homeId);
   const { home, wall } = pageData(() => wallOf(actor, homeId, wallId, 'home.edit'));
   const openings = wallsOfHome(homeId).find((one) => one.wall.id === wallId)?.openings ?? [];
   const units = unitsOf(actor);
+  const logged = (kind: 'restain' | 'recaulk') => view.records.find((record) => record.kind === kind && record.origin === 'logged' && record.wallIds.includes(wallId))?.doneOn;
   const { name, shade, shadeHeightDeg, weatherSide, finish, stainBase, colorHex, colorName, texture, sealant } = wall;
-  const values = { name, shade, shadeHeightDeg, weatherSide, ...wallLengths(wall, units), openings: openingValues(openings, units), coat: { finish, stainBase, colorHex, colorName: colorName ?? '', texture, sealant }, ...recalledDays(wallId) };
+  const values = { name, shade, shadeHeightDeg, weatherSide, ...wallLengths(wall, units), openings: openingValues(openings, units), coat: { finish, stainBase, colorHex, colorName: colorName ?? '', texture, sealant }, ...recalledDays(wallId), logged: { restain: logged('restain'), recaulk: logged('recaulk') } };
   const target = { homeId, wallId };
   return (
     <main id="main">
