@@ -11,11 +11,15 @@ export const tokenHours: Record<TokenPurpose, number> = { verify: 48, reset: 1 }
 
 const hashOf = (token: string) => createHash('sha256').update(token).digest('hex');
 
+export function withdrawTokens(userId: string, purpose: TokenPurpose): void {
+  database().delete(accountToken).where(and(eq(accountToken.userId, userId), eq(accountToken.purpose, purpose))).run();
+}
+
 /** A new one-use link's secret; only its hash is kept. Earlier links of the same purpose stop working. */
 export function issueToken(userId: string, purpose: TokenPurpose, now: Date): string {
   const token = randomBytes(32).toString('base64url');
   transaction(() => {
-    database().delete(accountToken).where(and(eq(accountToken.userId, userId), eq(accountToken.purpose, purpose))).run();
+    withdrawTokens(userId, purpose);
     const expiresAt = new Date(now.getTime() + tokenHours[purpose] * 3_600_000);
     database().insert(accountToken).values({ tokenHash: hashOf(token), userId, purpose, expiresAt }).run();
   });

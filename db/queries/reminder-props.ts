@@ -60,7 +60,7 @@ function standingItems(mailId: string, site: string, homeId: string): (ReminderI
     .where(eq(delivery.mailId, mailId))
     .orderBy(workItem.dueOn, workItem.kind)
     .all();
-  return rows.flatMap(({ stage, item: { wallId, kind, dueOn, opensOn, closesOn, because } }) =>
-    isReminderStage(stage) ? [{ wallId, kind, stage, dueOn, opensOn, closesOn, because, logUrl: logUrl(site, homeId, kind, wallId) }] : [],
+  return rows.flatMap(({ stage, item: { wallId, kind, dueOn, opensOn, closesOn, because, basis } }) =>
+    isReminderStage(stage) ? [{ wallId, kind, stage, dueOn, opensOn, closesOn, because, ownRule: basis === 'own rule', logUrl: logUrl(site, homeId, kind, wallId) }] : [],
   );
 }

@@ -22,11 +22,11 @@ const roleNeeded: Record<Exclude<Membership, 'owner'>, Role> = { contractor: 'co
 
 export type ShareOutcome = { shared: true; userId: string; isNew: boolean } | { shared: false; why: 'no account' | 'wrong role' | 'already a member' };
 
-/** Lets another person see the home. `email` is lower case. A person has one membership in a home. */
+/** Lets another person see the home. `email` is lower case; an account whose address is not confirmed may be somebody else's. A person has one membership in a home. */
 export function shareHome(actor: Actor, homeId: string, email: string, membership: Exclude<Membership, 'owner'>): ShareOutcome {
   homeFor(actor, homeId, 'home.share');
   const person = database().select().from(user).where(eq(user.email, email)).get();
-  if (!person) return { shared: false, why: 'no account' };
+  if (!person?.emailVerified) return { shared: false, why: 'no account' };
   if (person.role !== roleNeeded[membership]) return { shared: false, why: 'wrong role' };
   const made = database()
     .insert(homeMember)

@@ -13,6 +13,8 @@ const item = z.object({
   dueOn: z.iso.date(),
   opensOn: z.iso.date(),
   closesOn: z.iso.date(),
+  /** The owner's own rule sets the day, not the life of the film. */
+  ownRule: z.boolean(),
   because: z.string(),
   logUrl: z.url(),
 });
@@ -81,11 +83,14 @@ function itemParts(it: ReminderItem, today: CalendarDay): Part[] {
     { as: 'text', text: `${workKinds[it.kind]}: ${words.headline}`, look: it.stage === 'overdue' ? 'overdue' : 'due soon' },
     { as: 'text', text: words.advice },
     { as: 'fact', label: 'When', text: `${aboutRange(it.opensOn, it.closesOn)} (${exactRange(it.opensOn, it.closesOn)})` },
-    { as: 'fact', label: 'Due', text: `${exactDay(it.dueOn)}, ${fromToday(it.dueOn, today)}` },
+    { as: 'fact', label: filmEnds(it) ? 'Used up' : 'Due', text: `${exactDay(it.dueOn)}, ${fromToday(it.dueOn, today)}` },
     { as: 'fact', label: 'Why', text: it.because },
     { as: 'link', label: `Already done? Log this ${workKinds[it.kind].toLowerCase()}`, url: it.logUrl },
   ];
 }
+
+/** The day on which coat or caulk is used up; other work is simply due on its day. */
+const filmEnds = (it: ReminderItem) => !it.ownRule && (it.kind === 'restain' || it.kind === 'recaulk');
 
 function cautionCourse(props: ReminderProps, kinds: ReminderItem['kind'][]): Course {
   const list = cautionsFor({ kinds, yearBuilt: props.yearBuilt, stainBases: props.stainBases, sealants: props.sealants });

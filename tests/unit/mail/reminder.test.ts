@@ -18,7 +18,7 @@ describe('a reminder', () => {
       expect(said).toContain('Ada, one piece of work on one wall');
       expect(said).toContain('Restain: can be done now');
       expect(said).toContain('When: mid-May to early August 2027 (May 15 – August 9, 2027)');
-      expect(said).toContain('Due: June 10, 2027, in 4 weeks');
+      expect(said).toContain('Used up: June 10, 2027, in 4 weeks');
       expect(said).toContain('Why: The coat of June 2023 lasts about 4 years on this wall.');
       expect(said).toContain('you are the owner of Spring Creek');
       expect(said).toContain('Turn reminders off');
@@ -84,6 +84,13 @@ describe('a reminder', () => {
     expect(textOn('2026-12-01')).not.toContain('next dry spell');
     expect(textOn('2027-05-15')).toContain('Do it in the next dry spell');
     expect(textOn('2027-09-01')).not.toContain('missed its season');
+  });
+
+  it('says that a film is used up, but that a wash or an own rule is due', () => {
+    const textOf = (values: Parameters<typeof reminderItem>[0]) => renderMail('reminder', reminderPropsWith({ walls: wallsWith({ South: [reminderItem(values)] }) })).text;
+    expect(textOf({ kind: 'recaulk' })).toContain('\nUsed up: June 10, 2027');
+    expect(textOf({ kind: 'wash' })).toContain('\nDue: June 10, 2027');
+    expect(textOf({ ownRule: true })).toContain('\nDue: June 10, 2027');
   });
 
   it('refuses to be written about nothing', () => {
