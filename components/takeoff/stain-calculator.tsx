@@ -54,7 +54,7 @@ export function StainCalculator({ units, walls, start, first }: StainCalculatorP
       <div className="grid gap-10 lg:grid-cols-[minmax(0,1fr)_minmax(0,24rem)]">
         <form ref={form} method="get" onInput={read} onSubmit={(event) => { event.preventDefault(); read(); }} className="grid content-start gap-6" noValidate>
           <input type="hidden" name="units" value={units} />
-          {areas ? <CheckCourses legend="Which walls?" name="chosenM2[]" options={areas} defaultValues={areas.map((area) => area.value)} /> : <WallRows units={units} start={start} onChange={read} />}
+          {areas ? <CheckCourses legend="Which walls?" name="chosenM2[]" options={areas} defaultValues={Array.isArray(start.chosenM2) ? start.chosenM2.map(String) : areas.map((area) => area.value)} /> : <WallRows units={units} start={start} onChange={read} />}
           <div className="grid gap-6 sm:grid-cols-2">
             <SelectField label="Siding" name="siding" options={sidings} defaultValue={text(start, 'siding') ?? '8'} hint="Nominal width of a course" />
             <Field label="Crown of the log" name="crown" inputMode="decimal" unit={us ? 'in' : 'cm'} defaultValue={text(start, 'crown')} hint="How far the face bulges" />
