@@ -1,8 +1,11 @@
 import 'server-only';
 import { type ReactNode } from 'react';
+import { sendVerifyAgain } from '@/app/(account)/account/actions';
+import { ConfirmBand } from '@/components/account/confirm-band';
 import { SignOutButton } from '@/components/account/sign-out-button';
 import { SiteFooter } from '@/components/ui/site-footer';
 import { SiteHeader } from '@/components/ui/site-header';
+import { hasConfirmedAddress } from '@/db/queries/people';
 import { type Role } from '@/lib/schemas/vocabulary';
 import { homePageOf, requireActor } from './actor';
 
@@ -22,6 +25,7 @@ export async function SignedInFrame({ roles, children }: { roles?: Role[]; child
       <SiteHeader links={linksOf[actor.role]} home={homePageOf(actor.role)} signedInAs={actor.name ?? actor.email}>
         <SignOutButton />
       </SiteHeader>
+      {hasConfirmedAddress(actor) ? null : <ConfirmBand email={actor.email} action={sendVerifyAgain} />}
       {children}
       <SiteFooter />
     </>

@@ -1,18 +1,23 @@
 'use client';
 
-import { signOut } from 'next-auth/react';
 import { useState } from 'react';
-import { Button } from '@/components/ui/button';
+import { postSignOut } from '@/components/account/auth-post';
+import { Button, type ButtonLook } from '@/components/ui/button';
 
-export function SignOutButton() {
-  const [leaving, setLeaving] = useState(false);
-  const leave = () => {
-    setLeaving(true);
-    void signOut({ callbackUrl: '/sign-in?said=signed-out' });
+/** Signs out of this browser. A full page load follows, so that nothing of the signed-in state stays. */
+export function SignOutButton({ look = 'plain' }: { look?: ButtonLook }) {
+  const [state, setState] = useState<'in' | 'leaving' | 'failed'>('in');
+  const leave = async () => {
+    setState('leaving');
+    const next = await postSignOut().catch(() => null);
+    if (next) window.location.assign(next);
+    else setState('failed');
   };
   return (
-    <Button look="plain" onClick={leave} pending={leaving} pendingLabel="Signing out…">
-      Sign out
-    </Button>
+    <span aria-live="polite">
+      <Button look={look} onClick={() => void leave()} pending={state === 'leaving'} pendingLabel="Signing out…">
+        {state === 'failed' ? 'Still signed in: try again' : 'Sign out'}
+      </Button>
+    </span>
   );
 }

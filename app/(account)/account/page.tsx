@@ -1,5 +1,6 @@
 import { type Metadata } from 'next';
 import { requireActor } from '@/app/_server/actor';
+import { SignOutButton } from '@/components/account/sign-out-button';
 import { ActionForm } from '@/components/ui/action-form';
 import { CheckField } from '@/components/ui/check-field';
 import { RadioCourses } from '@/components/ui/choice-courses';
@@ -26,9 +27,9 @@ export default async function AccountPage() {
       <Course heading="You">
         <ActionForm action={saveProfile} saved="Saved.">
           <Field label="Your name" name="name" defaultValue={profile.name} autoComplete="name" required />
-          {actor.role === 'contractor' ? <Field label="Company" name="company" defaultValue={profile.company ?? ''} autoComplete="organization" optional /> : null}
+          {actor.role === 'contractor' ? <Field label="Company" name="company" defaultValue={profile.company ?? ''} autoComplete="organization" required /> : null}
           <RadioCourses legend="Units" name="units" options={units} defaultValue={profile.units} inRow />
-          <CheckField label="Remind me by mail" name="remindersOn" defaultChecked={profile.remindersOn} hint="One mail a home, only when something is due" />
+          {actor.role === 'homeowner' ? <CheckField label="Remind me by mail" name="remindersOn" defaultChecked={profile.remindersOn} hint="One mail a home, only when something is due" /> : null}
           <SubmitButton>Save</SubmitButton>
         </ActionForm>
       </Course>
@@ -39,10 +40,13 @@ export default async function AccountPage() {
           <SubmitButton look="quiet">{profile.hasPassword ? 'Change it' : 'Set it'}</SubmitButton>
         </ActionForm>
       </Course>
-      <Course heading="Lost a phone?" tone="quiet">
-        <ActionForm action={signOutEverywhere}>
-          <SubmitButton look="quiet" pendingLabel="Signing out…">Sign out everywhere</SubmitButton>
-        </ActionForm>
+      <Course heading="Sign out" aside="Lost a phone? Sign out everywhere" tone="quiet">
+        <div className="flex flex-wrap gap-3">
+          <SignOutButton look="quiet" />
+          <ActionForm action={signOutEverywhere}>
+            <SubmitButton look="quiet" pendingLabel="Signing out…">Sign out everywhere</SubmitButton>
+          </ActionForm>
+        </div>
       </Course>
     </main>
   );

@@ -8,7 +8,7 @@ export const metadata: Metadata = { title: 'Look in your mail' };
 export default function CheckMailPage() {
   return (
     <>
-      <PageHead title="Look in your mail" lead="A message with a link is on its way. Open it on this device." />
+      <PageHead title="Look in your mail" lead="A message with a link is on its way. Open it on this device. If you have just made an account, you can sign in already." />
       <Course heading="Nothing there?">
         <ul className="list-disc pl-6">
           <li>It can take a few minutes.</li>

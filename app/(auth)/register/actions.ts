@@ -2,7 +2,8 @@
 
 import { redirect } from 'next/navigation';
 import { sendAlreadyKnown, sendVerifyLink } from '@/app/_server/account-mail';
-import { defineAction } from '@/app/_server/action';
+import { defineAction, FieldFault } from '@/app/_server/action';
+import { currentSender, startMail, waitWords } from '@/app/_server/attempts';
 import { hashPassword } from '@/app/_server/password';
 import { personByEmail, registerPerson } from '@/db/queries/people';
 import { registerSchema } from '@/lib/schemas/account';
@@ -11,15 +12,19 @@ import { registerSchema } from '@/lib/schemas/account';
 export const register = defineAction({
   verb: 'anyone',
   schema: registerSchema,
-  prepare: ({ password }) => hashPassword(password),
-  run: (_, { name, email, role, company }, passwordHash) => {
-    const made = registerPerson({ name, email, role, company: role === 'contractor' ? company : undefined, passwordHash: passwordHash as string });
+  prepare: async ({ email, password }) => {
+    const wait = await startMail(email, await currentSender());
+    return wait > 0 ? new FieldFault({ '': waitWords(wait) }) : hashPassword(password);
+  },
+  run: (_, { name, email, role, company }, prepared) => {
+    if (prepared instanceof FieldFault) return prepared;
+    const made = registerPerson({ name, email, role, company: role === 'contractor' ? company : undefined, passwordHash: prepared as string });
     return { made, known: made ? undefined : personByEmail(email) };
   },
-  after: async ({ made, known }) => {
-    if (made) await sendVerifyLink(made);
-    else if (known && !known.emailVerified) await sendVerifyLink(known);
-    else if (known) await sendAlreadyKnown(known);
+  after: ({ made, known }) => {
+    if (made) sendVerifyLink(made);
+    else if (known && !known.emailVerified) sendVerifyLink(known);
+    else if (known) sendAlreadyKnown(known);
     redirect('/check-mail');
   },
 });

@@ -7,10 +7,11 @@ import { Course } from '@/components/ui/course';
 import { FormMessage } from '@/components/ui/form-message';
 import { PageHead } from '@/components/ui/page-head';
 import { safePath } from '@/lib/schemas/account';
+import { signInFault } from '@/lib/sign-in-words';
 
 export const metadata: Metadata = { title: 'Sign in' };
 
-type Props = { searchParams: Promise<{ callbackUrl?: string; email?: string; said?: string }> };
+type Props = { searchParams: Promise<{ callbackUrl?: string; email?: string; said?: string; error?: string }> };
 
 const notes: Record<string, string> = {
   'signed-out': 'You are signed out.',
@@ -19,12 +20,13 @@ const notes: Record<string, string> = {
 
 export default async function SignInPage({ searchParams }: Props) {
   if (await currentActor()) redirect('/start');
-  const { callbackUrl, email, said } = await searchParams;
+  const { callbackUrl, email, said, error } = await searchParams;
   const goTo = safePath(callbackUrl);
   const note = said ? notes[said] : undefined;
   return (
     <>
       <PageHead title="Sign in" lead={goTo === '/start' ? undefined : 'Then you go on to the page you asked for.'} />
+      {error ? <Course><FormMessage tone="fault">{signInFault(error)}</FormMessage></Course> : null}
       {note ? <Course><FormMessage tone="done">{note}</FormMessage></Course> : null}
       <Course heading="With your password">
         <PasswordForm goTo={goTo} email={email ?? ''} />

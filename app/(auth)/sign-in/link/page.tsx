@@ -8,7 +8,12 @@ export const metadata: Metadata = { title: 'Sign in with the link', referrer: 'n
 
 type Props = { searchParams: Promise<{ token?: string; email?: string; callbackUrl?: string }> };
 
-const pathOf = (url: string | undefined) => (url && URL.canParse(url) ? new URL(url).pathname : url);
+/** next-auth writes whole addresses; of these the path is taken, so that it stays on this site. */
+function pathOf(url: string | undefined): string | undefined {
+  if (!url || !URL.canParse(url)) return url;
+  const { pathname, search } = new URL(url);
+  return pathname + search;
+}
 
 /** The link in the mail leads here; only the button uses it up. */
 export default async function SignInLinkPage({ searchParams }: Props) {

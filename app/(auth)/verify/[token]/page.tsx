@@ -1,4 +1,5 @@
 import { type Metadata } from 'next';
+import { currentActor } from '@/app/_server/actor';
 import { VerifyForm } from '@/components/account/verify-form';
 import { LinkButton } from '@/components/ui/button';
 import { Course } from '@/components/ui/course';
@@ -14,15 +15,23 @@ export default async function VerifyPage({ params }: { params: Promise<{ token: 
   if (!holder) {
     return (
       <>
-        <PageHead title="This link no longer works" lead="It was used already, or it is older than two days. Sign in: if your address is not confirmed yet, a new link is sent." />
+        <PageHead title="This link no longer works" lead="It was used already, or it is older than two days. If your address is not confirmed yet, sign in: a new link can be sent from there." />
         <Course><LinkButton href="/sign-in">To sign-in</LinkButton></Course>
       </>
     );
   }
+  const signedIn = (await currentActor())?.id === holder.id;
+  const how = signedIn ? 'Reminders come to it from then on.' : 'Type the password that you chose for the account.';
   return (
     <>
-      <PageHead title="Confirm your address" lead={`${holder.email} is yours, and you made the account? Then type the password you chose.`} />
-      <Course><VerifyForm action={confirmAddress} token={token} email={holder.email} /></Course>
+      <PageHead title="Confirm your address" lead={<><strong className="break-words">{holder.email}</strong> is yours? {how}</>} />
+      <Course><VerifyForm action={confirmAddress} token={token} email={holder.email} signedIn={signedIn} /></Course>
+      {signedIn ? null : (
+        <Course heading="You do not know the password?" tone="quiet">
+          <p className="mb-4 max-w-2xl">Perhaps somebody else made this account with your address. Set a new password: that confirms the address too, and signs everybody else out.</p>
+          <LinkButton href="/forgot" look="quiet">Set a new password</LinkButton>
+        </Course>
+      )}
     </>
   );
 }
