@@ -251,6 +251,7 @@ CREATE TABLE `delivery` (
 	`wall_id` text NOT NULL,
 	`kind` text NOT NULL,
 	`stage` text NOT NULL,
+	`work_key` text NOT NULL,
 	`due_on` text NOT NULL,
 	`mail_id` text NOT NULL,
 	`created_at` integer NOT NULL,

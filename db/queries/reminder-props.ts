@@ -1,5 +1,6 @@
 import { and, eq } from 'drizzle-orm';
 import { dayIn } from '@/lib/calendar';
+import { workKey } from '@/lib/care/stages';
 import { type ReminderItem, type ReminderProps } from '@/lib/mail/kinds/reminder';
 import { isReminderStage } from '@/lib/mail/kinds/reminder-stages';
 import { logUrl, planUrl, accountUrl } from '@/lib/mail/links';
@@ -51,16 +52,18 @@ export function reminderPropsOf(mail: Of, site: string, now: Date): { to: string
   return { to: who.to, props };
 }
 
-/** The mail's work whose date is still the one it was queued for. */
+/** The mail's work that still stands: not logged since. Its date may have moved; the mail says the new one. */
 function standingItems(mailId: string, site: string, homeId: string): (ReminderItem & { wallId: string })[] {
   const rows = database()
-    .select({ stage: delivery.stage, item: workItem })
+    .select({ stage: delivery.stage, key: delivery.workKey, item: workItem })
     .from(delivery)
-    .innerJoin(workItem, and(eq(workItem.wallId, delivery.wallId), eq(workItem.kind, delivery.kind), eq(workItem.dueOn, delivery.dueOn)))
+    .innerJoin(workItem, and(eq(workItem.wallId, delivery.wallId), eq(workItem.kind, delivery.kind)))
     .where(eq(delivery.mailId, mailId))
     .orderBy(workItem.dueOn, workItem.kind)
     .all();
-  return rows.flatMap(({ stage, item: { wallId, kind, dueOn, opensOn, closesOn, because, basis } }) =>
-    isReminderStage(stage) ? [{ wallId, kind, stage, dueOn, opensOn, closesOn, because, ownRule: basis === 'own rule', logUrl: logUrl(site, homeId, kind, wallId) }] : [],
-  );
+  return rows
+    .filter(({ key, item }) => key === workKey(item))
+    .flatMap(({ stage, item: { wallId, kind, dueOn, opensOn, closesOn, because, basis } }) =>
+      isReminderStage(stage) ? [{ wallId, kind, stage, dueOn, opensOn, closesOn, because, ownRule: basis === 'own rule', logUrl: logUrl(site, homeId, kind, wallId) }] : [],
+    );
 }

@@ -1,7 +1,7 @@
 import { createHash } from 'node:crypto';
 import { and, eq, inArray, lte } from 'drizzle-orm';
 import { type CalendarDay, dayIn } from '@/lib/calendar';
-import { deliveryKey, nextStageDay, stageOn } from '@/lib/care/stages';
+import { deliveryKey, nextStageDay, stageOn, workKey } from '@/lib/care/stages';
 import { database, transaction } from '../client';
 import { delivery, home, wall, workItem } from '../schema';
 import { toWorkItem } from './home-view';
@@ -86,7 +86,7 @@ function remindPerson(recipient: Recipient, homeId: string, items: ItemRow[], to
     props: {},
     now,
   });
-  const values = fresh.map(({ key, stage, item }) => ({ key, stage, homeId, userId: recipient.userId, wallId: item.wallId, kind: item.kind, dueOn: item.dueOn, mailId }));
+  const values = fresh.map(({ key, stage, item }) => ({ key, stage, homeId, userId: recipient.userId, wallId: item.wallId, kind: item.kind, dueOn: item.dueOn, workKey: workKey(item), mailId }));
   return database().insert(delivery).values(values).onConflictDoNothing({ target: delivery.key }).run().changes;
 }
 

@@ -44,6 +44,8 @@ export const delivery = sqliteTable(
     wallId: text('wall_id').notNull().references(() => wall.id, { onDelete: 'cascade' }),
     kind: text('kind', { enum: keysOf(workKinds) }).notNull(),
     stage: text('stage').notNull(),
+    /** Which piece of work, whatever becomes of its date (lib/care/stages). */
+    workKey: text('work_key').notNull(),
     dueOn: text('due_on').notNull(),
     mailId: text('mail_id').notNull().references(() => mail.id, { onDelete: 'cascade' }),
     createdAt: createdAt(),

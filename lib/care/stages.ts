@@ -43,8 +43,14 @@ export function stageOn(item: Staged, today: CalendarDay): ReachedStage | null {
 /** The day on which the next stage begins, after `today`; null when none is left. */
 export const nextStageDay = (item: Staged, today: CalendarDay): CalendarDay | null => stagesOf(item).find(({ onDay }) => onDay > today)?.onDay ?? null;
 
-/** One delivery: the same person is told of a stage of one piece of work once, whatever happens. A coming season has its own stages. */
-export function deliveryKey({ wallId, kind, dueOn, window }: Pick<WorkItem, 'wallId' | 'kind' | 'dueOn' | 'window'>, { stage, step }: Pick<ReachedStage, 'stage' | 'step'>, userId: string): string {
-  const which = stage === 'overdue' ? `${stage}-${step ?? 1}` : `${stage}-${window.opensOn}`;
-  return [wallId, kind, dueOn, which, userId].join(':');
+type Identified = Pick<WorkItem, 'wallId' | 'kind' | 'startOn' | 'dueOn' | 'window'>;
+
+/** What makes a piece of work itself: film work is the same until its film is renewed, however its date moves; yearly work is that of its day. */
+export const workKey = ({ wallId, kind, startOn, dueOn }: Omit<Identified, 'window'>): string =>
+  [wallId, kind, (films.includes(kind) ? startOn : null) ?? dueOn].join(':');
+
+/** One delivery: the same person is told of a stage of one piece of work once, whatever happens. The season of another month has its own stages. */
+export function deliveryKey(item: Identified, { stage, step }: Pick<ReachedStage, 'stage' | 'step'>, userId: string): string {
+  const which = stage === 'overdue' ? `${stage}-${step ?? 1}` : `${stage}-${item.window.opensOn.slice(0, 7)}`;
+  return [workKey(item), which, userId].join(':');
 }

@@ -149,10 +149,11 @@ describe('who is reminded', () => {
 });
 
 describe('between queueing and sending', () => {
-  it('work that was logged is left out, because its date has moved', async () => {
+  it('work that was logged is left out, because it counts from another day; work whose date merely moved is not', async () => {
     const { items } = springHome();
     await queue();
-    database().update(workItem).set({ dueOn: '2031-05-20' }).where(eq(workItem.wallId, items[0]?.wallId ?? '')).run();
+    database().update(workItem).set({ startOn: '2027-05-14', dueOn: '2031-05-20' }).where(eq(workItem.wallId, items[0]?.wallId ?? '')).run();
+    database().update(workItem).set({ dueOn: '2027-06-28' }).where(eq(workItem.wallId, items[1]?.wallId ?? '')).run();
     await deliverDue(now, smtp.transport);
     expect(smtp.received.map((got) => got.subject)).toEqual(['Spring Creek: time to restain (West)']);
   });
