@@ -1,9 +1,9 @@
-import { ring, size } from '@/components/drawings/plan-layout';
+import { ring, size, steady } from '@/components/drawings/plan-layout';
 
 const middle = size / 2;
 const at = (azimuthDeg: number, radius: number) => {
   const radians = (azimuthDeg * Math.PI) / 180;
-  return { x: middle + radius * Math.sin(radians), y: middle - radius * Math.cos(radians) };
+  return { x: steady(middle + radius * Math.sin(radians)), y: steady(middle - radius * Math.cos(radians)) };
 };
 const letters = [['N', 0], ['E', 90], ['S', 180], ['W', 270]] as const;
 

@@ -20,6 +20,9 @@ export type HousePlanWall = {
 export const size = 400;
 export const ring = 180;
 const reach = 154;
+
+/** Sines differ in their last digits from one engine to the next: what is drawn on the server and again in the browser is rounded, so that both agree. */
+export const steady = (value: number, decimals = 2) => Number(value.toFixed(decimals));
 /** Radius of the state's mark on a wall. */
 export const badge = 14;
 const letter = { size: 17, width: 9.4, line: 20 };
@@ -45,7 +48,7 @@ export function drawPlan(walls: readonly HousePlanWall[]): DrawnPlan {
   const { edges, closed } = outline(walls);
   const eave = closed ? eaveLine(edges, walls.map((wall) => wall.eaveDepthM)) : [];
   const furthest = Math.max(1, ...[...eave, ...edges.flatMap((edge) => [edge.from, edge.to])].map((p) => Math.hypot(p.x, p.y)));
-  const place = (p: Point): Point => ({ x: size / 2 + (p.x * reach) / furthest, y: size / 2 - (p.y * reach) / furthest });
+  const place = (p: Point): Point => ({ x: steady(size / 2 + (p.x * reach) / furthest), y: steady(size / 2 - (p.y * reach) / furthest) });
   const corners = edges.map((edge) => place(edge.from));
   const draw = (named: boolean) => edges.flatMap((edge, i) => (walls[i] ? [drawWall(walls[i], edge, place, named)] : []));
   const withNames = draw(true);
@@ -56,7 +59,7 @@ export function drawPlan(walls: readonly HousePlanWall[]): DrawnPlan {
 function drawWall(wall: HousePlanWall, edge: PlanEdge, place: (p: Point) => Point, named: boolean): DrawnWall {
   const [from, to] = [place(edge.from), place(edge.to)];
   const middle = { x: (from.x + to.x) / 2, y: (from.y + to.y) / 2 };
-  const outward = { x: edge.outward.x, y: -edge.outward.y };
+  const outward = { x: steady(edge.outward.x, 4), y: steady(-edge.outward.y, 4) };
   const thickness = 6 + 3 * doseClass(wall.doseKwhM2);
   const width = Math.max(short(wall.name).length, 4.5) * letter.width;
   const box = named ? { width, height: 2 * letter.line } : { width: 26, height: 26 };

@@ -1,5 +1,5 @@
 import { onRing } from '@/components/drawings/compass-ring';
-import { type DrawnWall, ring } from '@/components/drawings/plan-layout';
+import { type DrawnWall, ring, steady } from '@/components/drawings/plan-layout';
 
 export type SunNow = { azimuthDeg: number; elevationDeg: number };
 
@@ -26,7 +26,7 @@ export function Rays({ drawn, sun }: { drawn: DrawnWall; sun: SunNow }) {
         const x = drawn.from.x + (drawn.to.x - drawn.from.x) * share + drawn.outward.x * clear;
         const y = drawn.from.y + (drawn.to.y - drawn.from.y) * share + drawn.outward.y * clear;
         const reach = 4 + 16 * strength;
-        return <line key={i} x1={x} y1={y} x2={x + toSun.x * reach} y2={y + toSun.y * reach} />;
+        return <line key={i} x1={steady(x)} y1={steady(y)} x2={steady(x + toSun.x * reach)} y2={steady(y + toSun.y * reach)} />;
       })}
     </g>
   );
