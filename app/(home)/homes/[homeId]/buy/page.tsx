@@ -9,7 +9,7 @@ import { PageHead } from '@/components/ui/page-head';
 import { unitsOf } from '@/db/queries/units';
 import { dayIn } from '@/lib/calendar';
 import { buyingStart } from '@/lib/home/buying';
-import { wallWords, workGroups } from '@/lib/home/next-work';
+import { workGroups, workWords } from '@/lib/home/next-work';
 import { readCalculator } from '@/lib/schemas/calculator';
 import { estimateSchema } from '@/lib/schemas/estimate';
 import { stainAnswer } from '@/lib/takeoff/estimate';
@@ -35,7 +35,7 @@ export default async function BuyPage({ params, searchParams }: Props) {
       {next ? (
         <Course heading="Next restain">
           <p className="text-lg">
-            <strong>{wallWords(next.walls, rows.length)}</strong>
+            <strong>{workWords([next], rows.length)}</strong>
           </p>
           <p>
             <When spell={next} today={today} capital />
