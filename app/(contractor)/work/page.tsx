@@ -49,7 +49,8 @@ export default async function WorkPage({ searchParams }: Props) {
           <Course as="div" tone="quiet">
             <h2 id={`season-${season.year}`} title={exactRange(season.opensOn, season.closesOn)}>{capital(aboutRange(season.opensOn, season.closesOn))}</h2>
             <p className="mt-1 text-lg">
-              {season.homes.length === 1 ? '1 home' : `${season.homes.length} homes`}, <Measure kind="area" value={season.stainM2} units={units} /> to stain, about <Measure kind="volume" value={season.buyL} units={units} /> of stain
+              {season.homes.length === 1 ? '1 home' : `${season.homes.length} homes`}
+              {season.stainM2 > 0 ? <>, <Measure kind="area" value={season.stainM2} units={units} /> to stain, about <Measure kind="volume" value={season.buyL} units={units} /> of stain</> : ', caulk only'}
               {season.overdue > 0 ? `; ${season.overdue} overdue` : ''}.
             </p>
           </Course>
