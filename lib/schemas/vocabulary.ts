@@ -55,7 +55,7 @@ export const unitSystems = { us: 'US customary', metric: 'Metric' } as const;
 export type UnitSystem = keyof typeof unitSystems;
 
 /** Zones of the US energy code (IECC), with their moisture letter. */
-export const climateZones = ['1A', '2A', '2B', '3A', '3B', '3C', '4A', '4B', '4C', '5A', '5B', '5C', '6A', '6B', '7', '8'] as const;
+export const climateZones = ['1A', '2A', '2B', '3A', '3B', '3C', '4A', '4B', '4C', '5A', '5B', '5C', '6A', '6B', '7', '7A', '7B', '8'] as const;
 
 /** Keys of a record as the non-empty tuple that z.enum and drizzle want. */
 export const keysOf = <K extends string>(record: Record<K, unknown>) => Object.keys(record) as [K, ...K[]];
