@@ -27,20 +27,24 @@ export class FieldFault {
   constructor(readonly errors: Record<string, string>) {}
 }
 
+/** Fields that are never sent back. */
+const secrets = ['password', 'current'];
+
 /**
  * Declares a server action for useActionState: authenticate, authorize, validate, run in a transaction, answer with a typed state.
- * What was typed comes back in `values`, so that nothing entered is lost.
+ * What was typed comes back in `values`, so that nothing entered is lost; passwords do not.
  */
 export function defineAction<S extends z.ZodType, R>(definition: Definition<S, R>) {
   return async (_previous: ActionState, form: FormData): Promise<ActionState> => {
-    const values = readForm(form);
+    const sent = readForm(form);
+    const values = Object.fromEntries(Object.entries(sent).filter(([name]) => !secrets.includes(name)));
     try {
       const actor = definition.verb === 'anyone' ? nobody : await currentActor();
       if (!actor) return { ok: false, message: 'You are signed out. Sign in in another tab, then send this again: nothing you typed is lost.', values };
       if (isRoleVerb(definition.verb) && !can(actor, definition.verb)) {
         return { ok: false, message: 'Your account may not do this.', values };
       }
-      const parsed = definition.schema.safeParse(values);
+      const parsed = definition.schema.safeParse(sent);
       if (!parsed.success) return { ok: false, errors: fieldErrors(parsed.error), values, message: 'Please look at the marked fields.' };
       const prepared = await definition.prepare?.(parsed.data);
       const result = transaction(() => definition.run(actor, parsed.data, prepared));

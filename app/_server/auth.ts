@@ -45,7 +45,7 @@ function logTrouble(code: string, about: unknown) {
 export const authOptions: NextAuthOptions = {
   adapter: authAdapter as unknown as Adapter,
   session: { strategy: 'jwt', maxAge: 60 * 24 * 3600 },
-  pages: { signIn: '/sign-in', verifyRequest: '/check-mail', error: '/auth-error', newUser: '/start' },
+  pages: { signIn: '/sign-in', verifyRequest: '/check-mail', error: '/auth-error' },
   logger: { error: logTrouble },
   providers: [
     CredentialsProvider({

@@ -22,6 +22,7 @@ export const mostPasswordBytes = 200;
 
 export const newPassword = z
   .string({ error: 'The password is missing.' })
+  .min(1, 'The password is missing.')
   .min(10, 'The password needs at least 10 characters. Three words in a row are easy to remember.')
   .refine((text) => new TextEncoder().encode(text).length <= mostPasswordBytes, 'This password is too long: 200 plain letters at most.')
   .refine((text) => !tooCommon.has(text.toLowerCase()) && !oneCharacter.test(text), 'This password is among the first that anybody tries. Choose another.');

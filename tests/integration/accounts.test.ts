@@ -65,6 +65,7 @@ describe('registering', () => {
   ])('refuses %j beside its field and gives back what was typed', async (wrong, field) => {
     const { state } = await register({ ...account, ...wrong });
     expect(state).toMatchObject({ ok: false, errors: { [field]: expect.any(String) as string }, values: { name: { ...account, ...wrong }.name } });
+    expect(state?.values).not.toHaveProperty('password');
     expect(database().select().from(user).all()).toHaveLength(0);
   });
 

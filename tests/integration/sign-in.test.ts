@@ -122,12 +122,12 @@ describe('too many tries', () => {
 describe('with an e-mailed link', () => {
   test('an unknown address becomes a homeowner with a confirmed address; the link works once', async () => {
     const browser = await visitor();
-    expect(faultIn(await browser.askForLink(' New@Example.test '))).toBeNull();
+    expect(faultIn(await browser.askForLink(' New@Example.test ', '/homes/new'))).toBeNull();
     await deliverAll();
     expect(smtp.received).toHaveLength(1);
     const link = linkInMail();
     expect(link.pathname).toBe('/sign-in/link');
-    expect((await browser.openLink(link)).to?.pathname).toBe('/start');
+    expect((await browser.openLink(link)).to?.pathname).toBe('/homes/new');
     expect(actorIn(await browser.session())).toMatchObject({ email: 'new@example.test', role: 'homeowner' });
     expect(personByEmail('new@example.test')).toMatchObject({ emailVerified: expect.any(Date) as Date, passwordHash: null });
 

@@ -1,4 +1,5 @@
 import { type Metadata } from 'next';
+import { redirect } from 'next/navigation';
 import { buttonClass } from '@/components/ui/button';
 import { Course } from '@/components/ui/course';
 import { PageHead } from '@/components/ui/page-head';
@@ -17,10 +18,11 @@ function pathOf(url: string | undefined): string | undefined {
 
 /** The link in the mail leads here; only the button uses it up. */
 export default async function SignInLinkPage({ searchParams }: Props) {
-  const { token = '', email = '', callbackUrl } = await searchParams;
+  const { token, email, callbackUrl } = await searchParams;
+  if (!token || !email) redirect('/auth-error?error=Verification');
   return (
     <>
-      <PageHead title="Sign in" lead={email ? `as ${email}` : undefined} />
+      <PageHead title="Sign in" lead={`as ${email}`} />
       <Course>
         <form method="get" action="/api/auth/callback/email">
           <input type="hidden" name="token" value={token} />
