@@ -38,7 +38,7 @@ export function NextCourse({ homeId, groups, wallCount, today, mayLog, why, chil
           <strong>{why.wall}:</strong> {why.because}
         </p>
       ) : null}
-      <div className="mt-3 grid max-w-4xl gap-x-10 sm:grid-cols-3 sm:[&>details[open]]:col-span-full">{children}</div>
+      <div className="mt-3 grid max-w-4xl gap-x-10 gap-y-2 sm:grid-cols-3 sm:[&>details[open]]:col-span-full">{children}</div>
       <div className="no-print mt-5 flex flex-wrap gap-3">
         {mayLog ? <LinkButton href={`/homes/${homeId}/log?${query}`}>Log it</LinkButton> : null}
         <LinkButton href={`/homes/${homeId}/buy`} look="quiet">

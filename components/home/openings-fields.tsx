@@ -34,15 +34,18 @@ export function OpeningsFields({ units, values }: { units: UnitSystem; values: r
       <legend className="mb-1 font-semibold">Doors and windows</legend>
       {rows.length === 0 ? <p className="text-quiet">None yet: the whole wall counts as wood.</p> : null}
       {rows.map(({ row, ...one }, place) => (
-        <div key={row} role="group" aria-label={`Opening ${place + 1}`} className="grid grid-cols-2 items-end gap-3 border-l-4 border-line pl-4 lg:grid-cols-[8rem_1fr_1fr_auto_auto]">
+        <div key={row} role="group" aria-label={`Opening ${place + 1}`} className="grid grid-cols-2 items-end gap-3 border-l-4 border-line pl-4 lg:grid-cols-[8rem_1fr_1fr_15rem_auto]">
           <SelectField label="Kind" name={`openings.${row}.kind`} options={{ window: 'Window', door: 'Door' }} defaultValue={one.kind} />
-          <div className="lg:hidden" />
           <Field label="Width" name={`openings.${row}.width`} unit={unit} defaultValue={one.width} />
           <Field label="Height" name={`openings.${row}.height`} unit={unit} defaultValue={one.height} />
-          <Stepper label="How many" name={`openings.${row}.count`} min={1} max={50} defaultValue={one.count} />
-          <Button look="plain" aria-label={`Remove opening ${place + 1}`} onClick={() => setRows((before) => before.filter((other) => other.row !== row))}>
-            Remove
-          </Button>
+          <div className="max-lg:col-span-2">
+            <Stepper label="How many" name={`openings.${row}.count`} min={1} max={50} defaultValue={one.count} />
+          </div>
+          <div className="max-lg:order-first max-lg:col-start-2 max-lg:row-start-1 max-lg:justify-self-end">
+            <Button look="plain" aria-label={`Remove opening ${place + 1}`} onClick={() => setRows((before) => before.filter((other) => other.row !== row))}>
+              Remove
+            </Button>
+          </div>
         </div>
       ))}
       {error ? <FieldError id="openings">{error}</FieldError> : null}

@@ -1,6 +1,6 @@
 import { type ReactNode } from 'react';
 import { exactDay } from '@/lib/calendar-words';
-import { wallWords } from '@/lib/home/next-work';
+import { wallWords } from '@/lib/home/wall-words';
 import { finishes, sealants, stainBases, type UnitSystem, workKinds } from '@/lib/schemas/vocabulary';
 import { volumeText } from '@/lib/units';
 import { type ShownRecord } from '@/components/home/shown-record';

@@ -1,7 +1,8 @@
 import { When } from '@/components/plan/when';
 import { StateMark } from '@/components/ui/state-mark';
 import { type CalendarDay } from '@/lib/calendar';
-import { wallWords, type WorkGroup } from '@/lib/home/next-work';
+import { type WorkGroup } from '@/lib/home/next-work';
+import { wallWords } from '@/lib/home/wall-words';
 import { workKinds } from '@/lib/schemas/vocabulary';
 
 type UpcomingListProps = { groups: readonly WorkGroup[]; wallCount: number; today: CalendarDay };

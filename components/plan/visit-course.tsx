@@ -3,12 +3,11 @@ import { Course } from '@/components/ui/course';
 import { aboutRange, exactRange, fromToday } from '@/lib/calendar-words';
 import { type CalendarDay } from '@/lib/calendar';
 import { type PlanVisit } from '@/lib/home/plan-view';
+import { capital } from '@/lib/home/wall-words';
 import { type WorkKind } from '@/lib/schemas/vocabulary';
 
 /** Dirt comes off first, caulk goes on before stain. */
 const sequence: WorkKind[] = ['walkaround', 'wash', 'recaulk', 'restain'];
-
-const capital = (words: string) => words.charAt(0).toUpperCase() + words.slice(1);
 
 type VisitCourseProps = { homeId: string; visit: PlanVisit; today: CalendarDay; wallCount: number; mayLog: boolean };
 

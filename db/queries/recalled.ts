@@ -1,4 +1,4 @@
-import { eq } from 'drizzle-orm';
+import { and, eq, isNull } from 'drizzle-orm';
 import { type Actor } from '@/lib/permissions';
 import { database } from '../client';
 import { type wall, workRecord, workRecordWall } from '../schema';
@@ -22,9 +22,9 @@ export function recallWork(actor: Actor, row: typeof wall.$inferSelect, kind: 'r
   database().insert(workRecordWall).values({ workRecordId: record.id, wallId: row.id }).onConflictDoNothing().run();
 }
 
-/** What is remembered of a wall, for its form. */
+/** What is remembered of a wall and was not taken back, for its form. */
 export function recalledDays(wallId: string): { stained: string | null; caulked: string | null } {
   const dayOf = (kind: 'restain' | 'recaulk') =>
-    database().select({ doneOn: workRecord.doneOn }).from(workRecord).where(eq(workRecord.submissionKey, recalledKey(wallId, kind))).get()?.doneOn ?? null;
+    database().select({ doneOn: workRecord.doneOn }).from(workRecord).where(and(eq(workRecord.submissionKey, recalledKey(wallId, kind)), isNull(workRecord.removedAt))).get()?.doneOn ?? null;
   return { stained: dayOf('restain'), caulked: dayOf('recaulk') };
 }

@@ -1,6 +1,7 @@
 import { workState } from '@/lib/care';
 import { type WorkItem, type WorkState } from '@/lib/care/types';
 import { type CalendarDay } from '@/lib/calendar';
+import { capital, wallWords } from '@/lib/home/wall-words';
 import { type WorkKind } from '@/lib/schemas/vocabulary';
 
 type Named = { id: string; name: string };
@@ -40,22 +41,12 @@ export function workGroups(items: readonly WorkItem[], walls: readonly Named[], 
   return [...groups.values()].sort((a, b) => urgency[a.state] - urgency[b.state] || (a.opensOn < b.opensOn ? -1 : a.opensOn > b.opensOn ? 1 : order[a.kind] - order[b.kind]));
 }
 
-/** 'Front', 'Front and Back', 'Front, Left side and Back', 'all walls'. */
-export function wallWords(chosen: readonly Named[], all: number): string {
-  if (chosen.length > 1 && chosen.length === all) return `all ${all} walls`;
-  const names = chosen.map(({ name }) => name);
-  const last = names.pop() ?? '';
-  return names.length > 0 ? `${names.join(', ')} and ${last}` : last;
-}
-
 /** The most pressing work of a home and what falls into the same window with it: what one trip does next. */
 export function nextTogether(groups: readonly WorkGroup[]): WorkGroup[] {
   const [first] = groups;
   if (!first) return [];
   return groups.filter((group) => group.opensOn === first.opensOn && group.closesOn === first.closesOn && group.state === first.state);
 }
-
-const capital = (words: string) => words.charAt(0).toUpperCase() + words.slice(1);
 
 /** 'Recaulk and restain Front and Back, wash Left side'. */
 export function workWords(groups: readonly WorkGroup[], wallCount: number): string {

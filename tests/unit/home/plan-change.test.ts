@@ -1,23 +1,8 @@
 import { describe, expect, it } from 'vitest';
-import { type WorkItem } from '@/lib/care/types';
 import { planChange } from '@/lib/home/plan-change';
-import { type WorkKind } from '@/lib/schemas/vocabulary';
+import { workItem as item } from '@/tests/fixtures/work-item';
 
 const walls = [{ id: 'f', name: 'Front' }, { id: 'b', name: 'Back' }];
-
-const item = (wallId: string, kind: WorkKind, opensOn: string): WorkItem => ({
-  wallId,
-  kind,
-  rule: null,
-  startOn: null,
-  dueOn: opensOn,
-  window: { opensOn, closesOn: opensOn, moved: 'in season' },
-  missedOn: null, lapsesOn: null,
-  basis: 'computed',
-  lifeMonths: null,
-  because: '',
-  explanation: { figure: '', value: '', formula: '', inputs: [], sources: [] },
-});
 
 describe('what a change did to a plan', () => {
   it('names wall, work and both months, in plan order', () => {
@@ -29,6 +14,11 @@ describe('what a change did to a plan', () => {
   it('tells early from late inside one month, and is silent about less', () => {
     expect(planChange([item('f', 'wash', '2027-05-02')], [item('f', 'wash', '2027-05-28')], walls)).toEqual(['Front: next wash moves from early May 2027 to late May 2027.']);
     expect(planChange([item('f', 'wash', '2027-05-02')], [item('f', 'wash', '2027-05-09')], walls)).toEqual([]);
+  });
+
+  it('says once what moved alike', () => {
+    const all = (day: string) => walls.map(({ id }) => item(id, 'restain', day));
+    expect(planChange(all('2027-05-01'), all('2029-05-01'), walls)).toEqual(['Both walls: next restain moves from May 2027 to May 2029.']);
   });
 
   it('says what is new and what is gone', () => {

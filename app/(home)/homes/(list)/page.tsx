@@ -28,7 +28,7 @@ export default async function HomesPage({ searchParams }: Props) {
     <main id="main">
       <PageHead title="Homes" actions={homes.length > 0 ? <LinkButton href="/homes/new">Add a home</LinkButton> : null} />
       <Said words={await whatWasSaid()} />
-      {gone ? <Undo done={`${gone.name} is archived. Nothing was deleted.`} label={`Bring ${gone.name} back`} action={restore} fields={{ homeId: gone.id }} /> : null}
+      {gone ? <Undo done={`${gone.name} is archived. Nothing was deleted.`} label="Bring it back" action={restore} fields={{ homeId: gone.id }} /> : null}
       {homes.length === 0 ? (
         <Course as="div">
           <EmptyState title="Start with one home" action={{ href: '/homes/new', label: 'Set up a home' }} example={<FirstHome />}>

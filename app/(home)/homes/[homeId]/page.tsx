@@ -46,7 +46,7 @@ export default async function HomePage({ params, searchParams }: Props) {
     <main id="main">
       <PageHead title={home.name} lead={[home.place, home.state].filter(Boolean).join(', ')} path={[{ href: '/homes', label: 'Homes' }]} actions={<HomeActions homeId={home.id} mayEdit={may('home.edit')} mayLog={may('work.log')} />} />
       <Said words={await whatWasSaid()} />
-      {gone ? <Undo done={`${gone.name} was taken out. Its history is kept.`} label={`Bring ${gone.name} back`} action={bringBackWall} fields={{ homeId: home.id, wallId: gone.id }} /> : null}
+      {gone ? <Undo done={`${gone.name} was taken out. Its history is kept.`} label="Bring it back" action={bringBackWall} fields={{ homeId: home.id, wallId: gone.id }} /> : null}
       {deciding && item ? (
         <NextCourse homeId={home.id} groups={together} wallCount={rows.length} today={today} mayLog={may('work.log')} why={{ wall: deciding.wall.name, because: item.because }}>
           <WallFigures planned={deciding} home={home} station={stationById(home.stationId)} today={today} units={unitsOf(actor)} films={item.kind === 'recaulk' ? ['seal'] : ['coat']} />

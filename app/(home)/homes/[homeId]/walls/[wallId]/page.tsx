@@ -45,7 +45,7 @@ export default async function WallPage({ params }: Props) {
       <Course as="div">
         <div className="grid items-center gap-x-12 gap-y-6 lg:grid-cols-[3fr_2fr]">
           <WallElevation name={wall.name} widthM={wall.widthM} heightM={wall.heightM} gableHeightM={wall.gableHeightM} eaveDepthM={wall.eaveDepthM} courseM={courseM} openings={openings} colorHex={wall.colorHex} used={used} words={`${wall.name} from the front. ${words}`} />
-          <div className="grid grid-cols-[auto_minmax(0,1fr)] gap-x-10 [&>details[open]]:col-span-full">
+          <div className="grid gap-x-10 gap-y-2 sm:grid-cols-2 sm:[&>details[open]]:col-span-full lg:grid-cols-1">
             <WallFigures planned={{ ...planned, exposure: null }} home={home} station={undefined} today={today} units={units} films={['coat', 'seal']} />
           </div>
         </div>
@@ -54,7 +54,7 @@ export default async function WallPage({ params }: Props) {
         <WallWork homeId={homeId} wallId={wallId} items={items} today={today} mayLog={can(actor, 'work.log', { membership })} />
       </Course>
       <Course heading="Sun">
-        <div className="mb-4 grid gap-x-10 sm:grid-cols-2 sm:[&>details[open]]:col-span-full">
+        <div className="mb-4 grid gap-x-10 gap-y-2 sm:grid-cols-2 sm:[&>details[open]]:col-span-full">
           <WallFigures planned={planned} home={home} station={stationById(home.stationId)} today={today} units={units} films={[]} hours />
         </div>
         {exposure ? <MonthlySun wallName={wall.name} doseMonthly={exposure.doseMonthly} /> : null}
