@@ -27,7 +27,7 @@ export default defineConfig({
     cwd: root,
     url: `http://localhost:${port}/api/health`,
     timeout: 240_000,
-    reuseExistingServer: false,
+    reuseExistingServer: process.env.E2E_REUSE === '1',
     gracefulShutdown: { signal: 'SIGTERM', timeout: 5_000 },
     env: { E2E_PORT: String(port) },
   },

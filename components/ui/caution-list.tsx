@@ -8,7 +8,7 @@ export function CautionList({ cautions }: { cautions: readonly Caution[] }) {
       <ul className="grid gap-4">
         {cautions.map((caution) => (
           <li key={caution.id}>
-            <h3>{caution.hazard}</h3>
+            <p className="font-display text-lg font-bold">{caution.hazard}</p>
             <p className="mt-1 max-w-prose">{caution.text}</p>
             <p className="text-sm text-quiet">
               {caution.authority}
