@@ -28,7 +28,7 @@ export function WallWork({ homeId, wallId, items, today, mayLog }: WallWorkProps
             <Figure explanation={withRule(item)} />
           </div>
           {mayLog ? (
-            <div className="no-print">
+            <div className="no-print -ml-2 md:ml-0">
               <LinkButton href={`/homes/${homeId}/log?kind=${item.kind}&wall=${wallId}`} look="plain">
                 Log it
               </LinkButton>
