@@ -2,6 +2,7 @@ import path from 'node:path';
 import { drizzle } from 'drizzle-orm/better-sqlite3';
 import { migrate } from 'drizzle-orm/better-sqlite3/migrator';
 import { openSqlite } from './client';
+import { loadDotEnv } from './dot-env';
 import { loadPostalCodes, postalEdition } from './postal-codes';
 
 /** Brings a database file to the newest schema and loads the postal codes if their edition changed. */
@@ -21,6 +22,7 @@ export async function migrateDatabase(file: string): Promise<{ postalCodes: numb
 }
 
 async function main() {
+  loadDotEnv();
   const file = path.resolve(process.cwd(), process.env.DATABASE_FILE || 'data/eavewright.db');
   const { postalCodes } = await migrateDatabase(file);
   console.log(`Database ready: ${file}${postalCodes ? ` (${postalCodes} postal codes loaded)` : ''}`);

@@ -3,6 +3,7 @@ import { count } from 'drizzle-orm';
 import { addDays, type CalendarDay, fromUtcDate, yearOf } from '../lib/calendar';
 import { type Actor } from '../lib/permissions';
 import { closeDatabase, database, transaction } from './client';
+import { loadDotEnv } from './dot-env';
 import { createHome } from './queries/homes';
 import { replanHome } from './queries/replan';
 import { shareHome } from './queries/sharing';
@@ -71,6 +72,7 @@ function seedWork(work: SeedWork, index: number, homeId: string, wallIds: string
 }
 
 async function main() {
+  loadDotEnv();
   const people = database().select({ people: count() }).from(user).get()?.people ?? 0;
   if (people > 0) {
     console.log('The database has people already: nothing was seeded.');

@@ -1,13 +1,5 @@
 import { type Shade } from '@/lib/schemas/vocabulary';
-
-/** A stretch of horizon that stands higher than the ground: from one azimuth clockwise to another, up to an elevation, letting a share of the light through. */
-export type Obstruction = {
-  fromAzimuthDeg: number;
-  toAzimuthDeg: number;
-  elevationDeg: number;
-  transmittanceLeafOn: number;
-  transmittanceLeafOff: number;
-};
+import { type Obstruction } from '@/lib/sun';
 
 /**
  * How much direct light passes each kind of shade, 0–1.

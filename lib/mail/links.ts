@@ -1,4 +1,4 @@
-import { type WorkKind } from '@/lib/schemas/vocabulary';
+import { type Membership, type WorkKind } from '@/lib/schemas/vocabulary';
 
 /** Addresses that mails lead to. `site` is the public address of the application. */
 export const planUrl = (site: string, homeId: string): string => new URL(`/homes/${homeId}`, site).href;
@@ -12,3 +12,6 @@ export function logUrl(site: string, homeId: string, kind: WorkKind, wallId: str
   url.searchParams.set('wall', wallId);
   return url.href;
 }
+
+/** Where a person sees a home that was shared with them: contractors have pages of their own. */
+export const sharedUrl = (site: string, homeId: string, membership: Membership): string => new URL(membership === 'contractor' ? `/work/${homeId}` : `/homes/${homeId}`, site).href;

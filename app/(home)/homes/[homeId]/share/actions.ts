@@ -10,7 +10,7 @@ import { homeOf } from '@/db/queries/homes';
 import { enqueueMail } from '@/db/queries/mail';
 import { shareHome, withdrawShare } from '@/db/queries/sharing';
 import { deliverMail } from '@/jobs/deliver';
-import { planUrl } from '@/lib/mail/links';
+import { sharedUrl } from '@/lib/mail/links';
 import { shareFault } from '@/lib/home/share-fault';
 import { shareSchema, withdrawSchema } from '@/lib/schemas/sharing';
 
@@ -27,7 +27,7 @@ export const share = defineAction({
       toAddress: email,
       userId: outcome.userId,
       homeId,
-      props: { homeName: home.name, place: `${home.place}, ${home.state}`, byName: actor.name ?? actor.email, membership, url: planUrl(environment().NEXTAUTH_URL, homeId) },
+      props: { homeName: home.name, place: `${home.place}, ${home.state}`, byName: actor.name ?? actor.email, membership, url: sharedUrl(environment().NEXTAUTH_URL, homeId, membership) },
     });
   },
   after: async (mailId, { homeId, email }) => {
