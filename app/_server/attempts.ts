@@ -1,6 +1,6 @@
 import 'server-only';
 import { headers } from 'next/headers';
-import { RateLimiterMemory, RateLimiterRes } from 'rate-limiter-flexible';
+import { RateLimiterMemory } from 'rate-limiter-flexible';
 
 const quarterHour = 900;
 const limiter = (points: number) => new RateLimiterMemory({ points, duration: quarterHour });
@@ -21,14 +21,17 @@ export const senderIn = (list: string | null | undefined): string => list?.split
 
 export const currentSender = async (): Promise<string> => senderIn((await headers()).get('x-forwarded-for'));
 
+const isRefusal = (thrown: unknown): thrown is { msBeforeNext: number } => typeof thrown === 'object' && thrown !== null && 'msBeforeNext' in thrown;
+
 async function count(pair: Pair, subject: string, sender: string): Promise<number> {
   try {
     await pair.sender.consume(sender);
     await pair.subject.consume(subject);
     return 0;
   } catch (refusal) {
-    if (refusal instanceof RateLimiterRes) return Math.max(1, Math.ceil(refusal.msBeforeNext / 60_000));
-    throw refusal;
+    // The refusal is no Error; its class may be loaded twice in a bundle, so it is told by its field.
+    if (!isRefusal(refusal)) throw refusal;
+    return Math.max(1, Math.ceil(refusal.msBeforeNext / 60_000));
   }
 }
 
