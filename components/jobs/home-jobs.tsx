@@ -17,6 +17,7 @@ export function HomeJobsCourse({ jobs, owner, units }: Props) {
   const { home, rows, stain, stainM2, today } = jobs;
   return (
     <Course
+      as="article"
       level={3}
       heading={home.name}
       aside={
