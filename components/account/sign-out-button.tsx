@@ -5,7 +5,7 @@ import { postSignOut } from '@/components/account/auth-post';
 import { Button, type ButtonLook } from '@/components/ui/button';
 
 /** Signs out of this browser. A full page load follows, so that nothing of the signed-in state stays. */
-export function SignOutButton({ look = 'plain' }: { look?: ButtonLook }) {
+export function SignOutButton({ look = 'plain', label = 'Sign out' }: { look?: ButtonLook; label?: string }) {
   const [state, setState] = useState<'in' | 'leaving' | 'failed'>('in');
   const leave = async () => {
     setState('leaving');
@@ -16,7 +16,7 @@ export function SignOutButton({ look = 'plain' }: { look?: ButtonLook }) {
   return (
     <span aria-live="polite">
       <Button look={look} onClick={() => void leave()} pending={state === 'leaving'} pendingLabel="Signing out…">
-        {state === 'failed' ? 'Still signed in: try again' : 'Sign out'}
+        {state === 'failed' ? 'Still signed in: try again' : label}
       </Button>
     </span>
   );

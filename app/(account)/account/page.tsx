@@ -42,7 +42,7 @@ export default async function AccountPage() {
       </Course>
       <Course heading="Sign out" aside="Lost a phone? Sign out everywhere" tone="quiet">
         <div className="flex flex-wrap gap-3">
-          <SignOutButton look="quiet" />
+          <SignOutButton look="quiet" label="Sign out here" />
           <ActionForm action={signOutEverywhere}>
             <SubmitButton look="quiet" pendingLabel="Signing out…">Sign out everywhere</SubmitButton>
           </ActionForm>
