@@ -14,10 +14,14 @@ function refraction(h: number): number {
   return 0.0002967 / Math.tan(up + 0.00312536 / (up + 0.08901179));
 }
 
-/** The true elevation whose refracted value is `apparent` (radians). A fixed point, exact to 1e-10 in a few steps. */
+/** The true elevation whose refracted value is `apparent` (radians), to 1e-9: a fixed point that shrinks its error to a seventh a step, or faster. */
 function withoutRefraction(apparent: number): number {
-  let h = apparent - refraction(apparent);
-  for (let step = 0; step < 12; step += 1) h = apparent - refraction(h);
+  let h = apparent;
+  for (let step = 0; step < 12; step += 1) {
+    const next = apparent - refraction(h);
+    if (Math.abs(next - h) < 1e-9) return next;
+    h = next;
+  }
   return h;
 }
 
