@@ -25,7 +25,7 @@ const seconds = (run: JobRun) => (run.finishedAt ? `${((run.finishedAt.getTime()
 export function JobRuns({ runs }: { runs: JobRun[] }) {
   if (runs.length === 0) return <p>No run yet. The scheduler makes the first one when it starts; the button above makes one now.</p>;
   return (
-    <div className="overflow-x-auto" role="region" aria-label="Last runs" tabIndex={0}>
+    <div className="overflow-x-auto" role="region" aria-label="Table of the last runs" tabIndex={0}>
       <table className="w-full text-left">
         <thead>
           <tr className="border-b-2 border-line">
