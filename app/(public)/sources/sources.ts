@@ -67,7 +67,7 @@ export const sources: SourceGroup[] = [
     entries: [
       {
         name: 'RFC 5545, Internet Calendaring and Scheduling Core Object Specification',
-        used: 'Care rules are kept as its recurrence rules; the calendar feed is written in its format.',
+        used: 'Care rules are kept as its recurrence rules.',
         credit: 'B. Desruisseaux (editor), Internet Engineering Task Force, 2009.',
       },
     ],
@@ -83,11 +83,14 @@ export const sources: SourceGroup[] = [
 
 export const ownRules = [
   'Where a wall falls within the published range of coat life: by its sun dose between 250 and 1,350 kWh/m² a year and its rain, weighted by the kind of finish.',
-  'How far a walkaround moves a wall’s own factor, and that the factor stays between a half and twice.',
-  'That a raw date moves into the coating season, never later than 60 days after the coat is used up.',
-  'That caulk due within 18 months of a restain is pulled forward into the same visit.',
-  'How many months of coat life may be thrown away to save a trip: chosen by simulating twenty years of your own home.',
+  'A wood that is not known counts as the shorter-lived of the published ones.',
+  'What trees and evergreens let through, and that they hide the sky 60 degrees to each side; that leaves are out in months with a mean of at least 50 °F (10 °C).',
+  'Which station stands for a home: the nearest, a hundred meters of height counting as ten kilometers.',
   'When a month counts as good, marginal or no: on published limits of temperature, and the chance of three dry days in a row.',
+  'That a raw date moves into the coating season, never later than 60 days after the coat is used up; that work which missed its season moves to the coming one and stays overdue.',
+  'That caulk due within 18 months of a restain joins it, and that a restain begins with a wash.',
+  'When a reminder goes out: 120 days before to book, 28 days before to buy, on the opening day, and 14, 45 and 105 days after a chance has passed.',
+  'Buying for the thirsty end of the published range, with a tenth for waste unless you say otherwise.',
   'The five steps of the sun-dose ramp on the house plan: 250 to 1,350 kWh/m² in equal parts.',
   'How walls are laid end to end on the house plan when measured widths leave a gap, and where doors and windows are drawn on a wall.',
 ];
