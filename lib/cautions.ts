@@ -74,7 +74,7 @@ export const cautions = [
   {
     id: 'pressure',
     hazard: 'Pressure washing',
-    text: 'A hard jet tears the wood fibre and drives water behind the siding. Keep the pressure low and point down, never up under a course.',
+    text: 'A hard jet tears the wood fiber and drives water behind the siding. Keep the pressure low and point down, never up under a course.',
     authority: 'USDA Wood Handbook, FPL-GTR-190, ch. 16',
     status: 'from memory',
     kinds: ['wash', 'restain'],

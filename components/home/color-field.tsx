@@ -11,7 +11,7 @@ const swatches = [
   { hex: '#8A5A32', name: 'Walnut shell' },
   { hex: '#7A3F24', name: 'Red bark' },
   { hex: '#4B3425', name: 'Dark bark' },
-  { hex: '#7C7F78', name: 'Driftwood grey' },
+  { hex: '#7C7F78', name: 'Driftwood gray' },
 ];
 
 type ColorFieldProps = { label: string; name: string; defaultValue?: string };

@@ -55,7 +55,7 @@ export function WallForm({ action, target, units, today, values, submit }: WallF
           <DirectionField defaultValue={values.azimuthDeg} />
         </div>
       </Course>
-      <Course heading="Size" aside={units === 'us' ? 'Feet and inches as you say them: 30, or 30 ft 6 in.' : 'Metres, or centimetres with their unit: 9.1, or 910 cm.'}>
+      <Course heading="Size" aside={units === 'us' ? 'Feet and inches as you say them: 30, or 30 ft 6 in.' : 'Meters, or centimeters with their unit: 9.1, or 910 cm.'}>
         <div className="grid max-w-3xl gap-6">
           <div className="grid items-start gap-5 sm:grid-cols-3">
             {length('Width', 'width')}

@@ -15,7 +15,7 @@ export const metadata: Metadata = { title: 'Your account' };
 
 const units = [
   { value: 'us', label: 'Feet, gallons, °F' },
-  { value: 'metric', label: 'Metres, litres, °C' },
+  { value: 'metric', label: 'Meters, liters, °C' },
 ];
 
 export default async function AccountPage() {

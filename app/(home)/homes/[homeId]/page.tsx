@@ -56,7 +56,7 @@ export default async function HomePage({ params, searchParams }: Props) {
       {walls.length > 0 ? (
         <>
           <HouseCourse walls={planWalls(home.id, walls, (item) => workState(item, today))} home={home} today={today} mayEdit={may('home.edit')} />
-          <Course heading="Every wall through the years" aside="From fresh color to weathered grey. The thin line is the caulk.">
+          <Course heading="Every wall through the years" aside="From fresh color to weathered gray. The thin line is the caulk.">
             <FadeStrip today={today} walls={fadeWalls(home.id, walls, records)} />
           </Course>
           <Course heading="After that">
