@@ -7,7 +7,7 @@ import { StateMark } from '@/components/ui/state-mark';
 import { directionWord } from '@/lib/home/direction';
 import { type HomeJobs } from '@/lib/jobs/seasons';
 import { type UnitSystem, workKinds } from '@/lib/schemas/vocabulary';
-import { containersText } from '@/lib/takeoff/estimate';
+import { containersText } from '@/lib/takeoff/words';
 import { volumeText } from '@/lib/units';
 
 type Props = { jobs: HomeJobs; owner: { name: string | null; email: string } | undefined; units: UnitSystem };

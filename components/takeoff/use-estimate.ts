@@ -2,29 +2,29 @@
 
 import { useEffect, useState } from 'react';
 import useSWR from 'swr';
-import { readCalculator } from '@/lib/schemas/calculator';
 import { type EstimateBody } from '@/lib/schemas/estimate';
-import { type FormValues } from '@/lib/schemas/action-state';
 import { type StainAnswer } from '@/lib/takeoff/estimate';
 
-const isEmpty = (body: EstimateBody) => (body.areaM2 ?? 0) === 0 && (body.walls?.length ?? 0) === 0;
+/** A moment after the last keystroke, ms. */
+const pause = 250;
 
 async function ask(body: string): Promise<StainAnswer> {
   const response = await fetch('/api/estimates/stain', { method: 'POST', headers: { 'content-type': 'application/json' }, body });
-  const json = (await response.json()) as StainAnswer & { title?: string; detail?: string };
-  if (!response.ok) throw new Error(json.detail ?? json.title ?? 'The estimate could not be made.');
-  return json;
+  if (!response.ok) throw new Error('The estimate could not be made just now.');
+  return (await response.json()) as StainAnswer;
 }
 
-/** Asks for an estimate a moment after the last keystroke; the one before stays until the new one is here. */
-export function useEstimate(values: FormValues, first: StainAnswer | undefined) {
-  const read = readCalculator(values);
-  const body = 'body' in read && !isEmpty(read.body) ? JSON.stringify(read.body) : null;
-  const [settled, setSettled] = useState(body);
+/** Asks for an estimate a moment after the last keystroke; the one before stays until the new one is here. No body, no answer. */
+export function useEstimate(body: EstimateBody | null, first: StainAnswer | undefined) {
+  const wanted = body ? JSON.stringify(body) : null;
+  const [start] = useState(wanted);
+  const [settled, setSettled] = useState(wanted);
   useEffect(() => {
-    const timer = setTimeout(() => setSettled(body), 250);
+    const timer = setTimeout(() => setSettled(wanted), pause);
     return () => clearTimeout(timer);
-  }, [body]);
-  const { data, error, isLoading } = useSWR<StainAnswer, Error>(settled ? ['stain', settled] : null, ([, sent]: [string, string]) => ask(sent), { keepPreviousData: true, fallbackData: first, revalidateOnFocus: false });
-  return { faults: 'faults' in read ? read.faults : {}, answer: body ? data : undefined, failure: error?.message, waiting: isLoading || settled !== body };
+  }, [wanted]);
+  // The answer to what the page began with came with the page.
+  const options = { keepPreviousData: true, revalidateOnFocus: false, revalidateIfStale: false, ...(settled === start && first ? { fallbackData: first } : {}) };
+  const { data, error, isLoading, mutate } = useSWR<StainAnswer, Error>(settled ? ['stain', settled] : null, ([, sent]: [string, string]) => ask(sent), options);
+  return { answer: wanted ? data : undefined, failure: error?.message, waiting: isLoading || settled !== wanted, retry: () => void mutate() };
 }

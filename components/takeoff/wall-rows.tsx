@@ -1,45 +1,73 @@
 'use client';
 
-import { useState } from 'react';
-import { Button } from '@/components/ui/button';
+import { EditButton } from '@/components/takeoff/edit-button';
 import { Field } from '@/components/ui/field';
-import { type FormValues, type FormValue } from '@/lib/schemas/action-state';
+import { FieldError } from '@/components/ui/field-frame';
+import { useAnswer } from '@/components/ui/form-context';
+import { type FormValues } from '@/lib/schemas/action-state';
+import { rowsOf, typedIn } from '@/lib/schemas/calculator-values';
 import { type UnitSystem } from '@/lib/schemas/vocabulary';
 
-type Props = { units: UnitSystem; start: FormValues; onChange: () => void };
-
-const isGroup = (value: FormValue | undefined): value is FormValues => typeof value === 'object' && !Array.isArray(value);
-const typed = (start: FormValues, row: number, field: string): string | undefined => {
-  const wall = isGroup(start.walls) ? start.walls[String(row)] : undefined;
-  const value = isGroup(wall) ? wall[field] : undefined;
-  return typeof value === 'string' ? value : undefined;
-};
-
 /** Walls by typed sizes; rows are added and taken away. */
-export function WallRows({ units, start, onChange }: Props) {
-  const [rows, setRows] = useState(() => Object.keys(isGroup(start.walls) ? start.walls : { 0: '' }).map(Number));
-  const change = (next: number[]) => {
-    setRows(next);
-    setTimeout(onChange, 0);
-  };
-  const us = units === 'us';
+export function WallRows({ units, values }: { units: UnitSystem; values: FormValues }) {
+  const rows = rowsOf(values, 'walls');
   return (
-    <div className="grid gap-4">
-      {rows.map((row, index) => (
-        <fieldset key={row} className="grid gap-4 border-l-4 border-lichen pl-4">
-          <legend className="mb-1.5 font-semibold">Wall {index + 1}</legend>
-          <div className="grid grid-cols-2 gap-4">
-            <Field label="Width" name={`walls.${row}.width`} inputMode="decimal" unit={us ? 'ft' : 'm'} defaultValue={typed(start, row, 'width')} />
-            <Field label="Height" name={`walls.${row}.height`} inputMode="decimal" unit={us ? 'ft' : 'm'} defaultValue={typed(start, row, 'height')} />
-            <Field label="Gable height" name={`walls.${row}.gable`} inputMode="decimal" unit={us ? 'ft' : 'm'} defaultValue={typed(start, row, 'gable')} />
-            <Field label="Doors, windows" name={`walls.${row}.openings`} inputMode="decimal" unit={us ? 'ft²' : 'm²'} defaultValue={typed(start, row, 'openings')} />
-          </div>
-          {rows.length > 1 ? <Button look="plain" onClick={() => change(rows.filter((one) => one !== row))}>Take wall {index + 1} away</Button> : null}
-        </fieldset>
+    <div className="grid gap-6">
+      {rows.map(([key, row], index) => (
+        <WallRow key={key} units={units} path={`walls.${key}`} row={row} number={index + 1} alone={rows.length === 1} />
       ))}
-      <div className="needs-script">
-        <Button look="quiet" onClick={() => change([...rows, Math.max(...rows) + 1])}>Another wall</Button>
+      <div>
+        <EditButton edit="add walls">Add a wall</EditButton>
       </div>
+    </div>
+  );
+}
+
+type WallRowProps = { units: UnitSystem; path: string; row: FormValues; number: number; alone: boolean };
+
+function WallRow({ units, path, row, number, alone }: WallRowProps) {
+  const unit = units === 'us' ? 'ft' : 'm';
+  const { error } = useAnswer(`${path}.openings`);
+  const openings = rowsOf(row, 'openings');
+  const length = (label: string, field: string, more = {}) => <Field label={label} name={`${path}.${field}`} inputMode="decimal" autoComplete="off" unit={unit} defaultValue={typedIn(row, field)} {...more} />;
+  return (
+    <fieldset className="grid gap-4 border-l-4 border-lichen pl-4">
+      <legend className="mb-1.5 text-lg font-semibold">Wall {number}</legend>
+      <div className="grid grid-cols-2 items-end gap-4 sm:grid-cols-3">
+        {length('Width', 'width')}
+        {length('Height', 'height')}
+        {length('Gable height', 'gable', { placeholder: 'none' })}
+      </div>
+      {openings.map(([key, one], index) => (
+        <OpeningRow key={key} path={`${path}.openings.${key}`} row={one} unit={unit} number={index + 1} wall={number} />
+      ))}
+      {error ? <FieldError id={`${path}.openings`}>{error}</FieldError> : null}
+      <div className="flex flex-wrap gap-3">
+        <EditButton edit={`add ${path}.openings`} label={`Add a door or window to wall ${number}`} look="plain">
+          Add a door or window
+        </EditButton>
+        {alone ? null : (
+          <EditButton edit={`drop ${path}`} label={`Remove wall ${number}`} look="plain">
+            Remove this wall
+          </EditButton>
+        )}
+      </div>
+    </fieldset>
+  );
+}
+
+type OpeningRowProps = { path: string; row: FormValues; unit: string; number: number; wall: number };
+
+function OpeningRow({ path, row, unit, number, wall }: OpeningRowProps) {
+  const common = { inputMode: 'decimal', autoComplete: 'off' } as const;
+  return (
+    <div role="group" aria-label={`Opening ${number} of wall ${wall}`} className="grid grid-cols-2 items-end gap-x-4 gap-y-2 border-t border-line pt-3 sm:grid-cols-[minmax(0,1fr)_minmax(0,1fr)_6rem_auto]">
+      <Field label={<span>Opening {number}, width</span>} name={`${path}.width`} unit={unit} defaultValue={typedIn(row, 'width')} {...common} />
+      <Field label="Height" name={`${path}.height`} unit={unit} defaultValue={typedIn(row, 'height')} {...common} />
+      <Field label="How many" name={`${path}.count`} placeholder="1" defaultValue={typedIn(row, 'count')} {...common} inputMode="numeric" />
+      <EditButton edit={`drop ${path}`} label={`Remove opening ${number} of wall ${wall}`} look="plain">
+        Remove
+      </EditButton>
     </div>
   );
 }

@@ -1,81 +1,130 @@
 import { z } from 'zod';
 import { type FormValues } from '@/lib/schemas/action-state';
-import { type EstimateBody } from '@/lib/schemas/estimate';
-import { choice, readLength } from '@/lib/schemas/measures';
-import { keysOf, textures, unitSystems } from '@/lib/schemas/vocabulary';
+import { rowsOf, typedIn } from '@/lib/schemas/calculator-values';
+import { type EstimateBody, estimateSchema } from '@/lib/schemas/estimate';
+import { readLength } from '@/lib/schemas/measures';
+import { textures, type UnitSystem } from '@/lib/schemas/vocabulary';
+import { sidingProfile } from '@/lib/takeoff';
 import { litresPerGallon, metresPerFoot, metresPerInch, squareMetresPerSquareFoot } from '@/lib/units';
 
-const numberText = (what: string, min: number, max: number) =>
-  z.string().trim().optional().transform((text, ctx) => {
-    if (!text) return undefined;
-    const value = Number(text.replace(',', '.').replace(/^\$/, ''));
-    if (Number.isFinite(value) && value >= min && value <= max) return value;
-    ctx.addIssue({ code: 'custom', message: `${what} should be a number between ${min} and ${max}.` });
-    return undefined;
-  });
+/** The form as read: the estimate's body when nothing is wrong and something is there; faults by field; fields that a begun row still lacks. */
+export type CalculatorReading = { body: EstimateBody | null; faults: Record<string, string>; missing: Record<string, string> };
 
-const typedWall = z.object({ width: z.string().optional(), height: z.string().optional(), gable: z.string().optional(), openings: numberText('Doors and windows', 0, 100_000) });
-const typedContainer = z.object({ size: numberText('The size', 0.01, 230), price: numberText('The price', 0, 100_000) });
+type Note = Pick<CalculatorReading, 'faults' | 'missing'> & { units: UnitSystem };
+type Bounds = { min: number; max: number; what: string; unit?: string };
 
-/** A bare number is inches or centimetres; empty is the usual inch. */
-function crownInches(typed: string | undefined, us: boolean, ctx: z.RefinementCtx): number {
-  const text = typed?.trim();
-  if (!text) return 1;
-  const value = Number(text.replace(',', '.')) * (us ? 1 : 1 / (100 * metresPerInch));
-  if (Number.isFinite(value) && value >= 0 && value <= 4) return value;
-  ctx.addIssue({ code: 'custom', path: ['crown'], message: us ? 'The crown should be between 0 and 4 in.' : 'The crown should be between 0 and 10 cm.' });
-  return 1;
+/** A number as typed; undefined when empty or at fault. `factor` takes it to the unit of the bounds. */
+function readNumber(text: string, path: string, { min, max, what, unit = '' }: Bounds, note: Note, factor = 1): number | undefined {
+  if (text.trim() === '') return undefined;
+  const plain = text.trim().replace(/^\$/, '').replace(/,(?=\d{3}\b)/g, '').replace(',', '.');
+  const value = Number(plain) * factor;
+  if (/^\d*\.?\d+\.?$/.test(plain) && value >= min * (1 - 1e-9) && value <= max * (1 + 1e-9)) return value;
+  const bound = (one: number) => Number((one / factor).toPrecision(3)).toLocaleString('en-US');
+  note.faults[path] = `${what} should be a number from ${bound(min)} to ${bound(max)}${unit ? ` ${unit}` : ''}.`;
+  return undefined;
 }
 
-/** The calculator's form as typed, in the reader's units; comes out as the body of the estimate. Empty wall rows are left out. */
-export const calculatorSchema = z
-  .object({
-    units: z.enum(keysOf(unitSystems)).default('us'),
-    walls: z.record(z.string().regex(/^\d{1,3}$/), typedWall).optional(),
-    /** Walls of a home that were chosen, each as its area in m² and its id: '24.5#id'. */
-    chosenM2: z.array(z.string().transform((one) => Number(one.split('#')[0])).pipe(z.number().min(0).max(10_000))).optional(),
-    siding: z.enum(['6', '8', '10']).default('8'),
-    crown: z.string().optional(),
-    texture: choice(keysOf(textures), 'a surface').default('saw-textured'),
-    coats: z.enum(['1', '2', '3'], { error: 'Coats should be 1, 2 or 3.' }).default('2'),
-    coverageLow: numberText('Coverage', 0.5, 2000),
-    coverageHigh: numberText('Coverage', 0.5, 2000),
-    waste: numberText('Waste', 0, 50),
-    containers: z.record(z.string().regex(/^\d{1,2}$/), typedContainer).optional(),
-  })
-  .transform((form, ctx): EstimateBody => {
-    const us = form.units === 'us';
-    const toFt = (text: string | undefined, what: string, min: number, max: number, path: string[], optional = false) => readLength(text, form.units, { min, max, what, optional }, ctx, path) / metresPerFoot;
-    const walls = Object.entries(form.walls ?? {}).filter(([, wall]) => wall.width || wall.height || wall.gable || wall.openings).map(([row, wall]) => {
-      const at = (field: string) => ['walls', row, field];
-      const openingsFt2 = (wall.openings ?? 0) / (us ? 1 : squareMetresPerSquareFoot);
-      const sized = { widthFt: toFt(wall.width, 'Width', 0.1, 60, at('width')), heightFt: toFt(wall.height, 'Height', 0.1, 15, at('height')), gableHeightFt: toFt(wall.gable, 'Gable height', 0, 10, at('gable'), true) };
-      const gross = sized.widthFt * (sized.heightFt + sized.gableHeightFt / 2);
-      if (gross > 0 && openingsFt2 > gross) ctx.addIssue({ code: 'custom', path: at('openings'), message: 'The doors and windows are larger than the wall.' });
-      return openingsFt2 > 0 ? { ...sized, openings: [{ widthFt: Math.sqrt(openingsFt2), heightFt: Math.sqrt(openingsFt2) }] } : sized;
-    });
-    const crownIn = crownInches(form.crown, us, ctx);
-    const perGal = (value: number) => (us ? value : (value * litresPerGallon) / squareMetresPerSquareFoot);
-    const { coverageLow, coverageHigh } = form;
-    if ((coverageLow === undefined) !== (coverageHigh === undefined)) ctx.addIssue({ code: 'custom', path: [coverageLow === undefined ? 'coverageLow' : 'coverageHigh'], message: 'The label gives a range: fill in both.' });
-    if (coverageLow !== undefined && coverageHigh !== undefined && coverageLow > coverageHigh) ctx.addIssue({ code: 'custom', path: ['coverageHigh'], message: 'The upper coverage is less than the lower.' });
-    const sizes = Object.values(form.containers ?? {}).flatMap(({ size, price }) => (size !== undefined && price !== undefined ? [{ gal: us ? size : size / litresPerGallon, priceCents: Math.round(price * 100) }] : []));
-    return {
-      ...(form.chosenM2 ? { areaM2: form.chosenM2.reduce((sum, area) => sum + area, 0) } : { walls }),
-      profile: { nominalIn: Number(form.siding) as 6 | 8 | 10, crownHeightIn: crownIn },
-      texture: form.texture,
-      coats: Number(form.coats),
-      ...(coverageLow !== undefined && coverageHigh !== undefined ? { coverageFt2PerGal: { low: perGal(coverageLow), high: perGal(coverageHigh) } } : {}),
-      ...(form.waste !== undefined ? { wastePercent: form.waste } : {}),
-      ...(sizes.length > 0 ? { containers: sizes } : {}),
-    };
-  });
+/** Feet of a length field; undefined when it is empty. */
+function readFeet(row: FormValues, field: string, path: string, bounds: Bounds, note: Note): number | undefined {
+  const text = typedIn(row, field);
+  if (text.trim() === '') return undefined;
+  const addIssue = (issue: { message: string }) => void (note.faults[`${path}.${field}`] = issue.message);
+  return readLength(text, note.units, bounds, { addIssue }, []) / metresPerFoot;
+}
 
-/** A form's values as the estimate's body, or the faults beside their fields. */
-export function readCalculator(values: FormValues): { body: EstimateBody } | { faults: Record<string, string> } {
-  const parsed = calculatorSchema.safeParse(values);
-  if (parsed.success) return { body: parsed.data };
+/** Both sides of a wall or an opening. A row with neither is empty; with one it lacks the other and does not count. */
+function readSides(row: FormValues, path: string, most: { width: number; height: number }, note: Note): { widthFt: number; heightFt: number } | null {
+  const widthFt = readFeet(row, 'width', path, { min: 0.1, max: most.width, what: 'Width' }, note);
+  const heightFt = readFeet(row, 'height', path, { min: 0.1, max: most.height, what: 'Height' }, note);
+  if (widthFt !== undefined && heightFt !== undefined) return { widthFt, heightFt };
+  if (widthFt !== undefined) note.missing[`${path}.height`] = 'The height is still missing.';
+  if (heightFt !== undefined) note.missing[`${path}.width`] = 'The width is still missing.';
+  return null;
+}
+
+function readWall(row: FormValues, path: string, note: Note) {
+  const gableHeightFt = readFeet(row, 'gable', path, { min: 0, max: 10, what: 'Gable height' }, note) ?? 0;
+  const openings = rowsOf(row, 'openings').flatMap(([key, one]) => {
+    const at = `${path}.openings.${key}`;
+    const sides = readSides(one, at, { width: 18, height: 18 }, note);
+    const count = readNumber(typedIn(one, 'count'), `${at}.count`, { min: 1, max: 100, what: 'The count' }, note) ?? 1;
+    return sides ? [{ ...sides, count: Math.round(count) }] : [];
+  });
+  const sides = readSides(row, path, { width: 60, height: 15 }, note);
+  if (!sides) return [];
+  const holes = openings.reduce((sum, one) => sum + one.widthFt * one.heightFt * one.count, 0);
+  const gross = sides.widthFt * (sides.heightFt + gableHeightFt / 2);
+  if (gross > 0 && holes > gross * (1 + 1e-9)) note.faults[`${path}.openings`] = 'The doors and windows are larger than the wall.';
+  return [{ ...sides, gableHeightFt, openings }];
+}
+
+function readContainers(values: FormValues, note: Note) {
+  const us = note.units === 'us';
+  const rows = rowsOf(values, 'containers');
+  const sizes = rows.flatMap(([key, row]) => {
+    const at = `containers.${key}`;
+    const gal = readNumber(typedIn(row, 'size'), `${at}.size`, { min: 1 / 128, max: 60, what: 'The size', unit: us ? 'gal' : 'L' }, note, us ? 1 : 1 / litresPerGallon);
+    const price = readNumber(typedIn(row, 'price'), `${at}.price`, { min: 0, max: 100_000, what: 'The price' }, note);
+    if (gal !== undefined && price !== undefined) return [{ gal, priceCents: Math.round(price * 100) }];
+    if (gal !== undefined && !note.faults[`${at}.price`]) note.missing[`${at}.price`] = 'The price is still missing.';
+    if (price !== undefined && !note.faults[`${at}.size`]) note.missing[`${at}.size`] = 'The size is still missing.';
+    return [];
+  });
+  const [first] = rows;
+  if (sizes.length === 0 && first && Object.keys(note.faults).length === 0) note.faults[`containers.${first[0]}.size`] = 'At least one container with its size and price is needed.';
+  return sizes;
+}
+
+function readCoverage(values: FormValues, note: Note) {
+  const us = note.units === 'us';
+  const one = (field: string) => readNumber(typedIn(values, field), field, { min: 20, max: 2000, what: 'Coverage', unit: us ? 'ft²/gal' : 'm²/L' }, note, us ? 1 : litresPerGallon / squareMetresPerSquareFoot);
+  const [from, to] = [one('coverageLow'), one('coverageHigh')];
+  const low = from ?? to;
+  const high = to ?? from;
+  if (low === undefined || high === undefined) return {};
+  if (low > high) note.faults.coverageHigh = 'This should not be less than the figure before it.';
+  return { coverageFt2PerGal: { low, high } };
+}
+
+const chosen = z.array(z.string().transform((one) => Number(one.split('#')[0])).pipe(z.number().min(0).max(10_000)));
+
+/** Walls as typed, or the chosen walls of a home, each as its area in m² and its id: '24.5#id'. */
+function readArea(values: FormValues, note: Note): Pick<EstimateBody, 'walls' | 'areaM2'> | null {
+  if (values.chosenM2 === undefined) {
+    const walls = rowsOf(values, 'walls').flatMap(([key, row]) => readWall(row, `walls.${key}`, note));
+    return walls.length > 0 ? { walls } : null;
+  }
+  const areas = chosen.safeParse(values.chosenM2);
+  if (!areas.success) note.faults.chosenM2 = 'Choose from these walls.';
+  const areaM2 = (areas.data ?? []).reduce((sum, area) => sum + area, 0);
+  return areaM2 > 0 ? { areaM2 } : null;
+}
+
+const has = <K extends string>(record: Record<K, unknown>, key: string): key is K => Object.hasOwn(record, key);
+
+function readBody(values: FormValues, note: Note): EstimateBody | null {
+  const us = note.units === 'us';
+  const nominalIn = ([6, 8, 10] as const).find((size) => String(size) === typedIn(values, 'siding')) ?? 8;
+  const mostCrown = (sidingProfile(nominalIn)?.exposedFaceIn ?? 0) / 2;
+  const crownHeightIn = readNumber(typedIn(values, 'crown'), 'crown', { min: 0, max: mostCrown, what: 'The crown', unit: us ? 'in' : 'cm' }, note, us ? 1 : 1 / (100 * metresPerInch)) ?? 1;
+  const wastePercent = readNumber(typedIn(values, 'waste'), 'waste', { min: 0, max: 50, what: 'Waste' }, note) ?? 10;
+  const texture = typedIn(values, 'texture');
+  const coats = Number(typedIn(values, 'coats') || '2');
+  if (!has(textures, texture)) note.faults.texture = 'Choose a surface.';
+  if (![1, 2, 3].includes(coats)) note.faults.coats = 'Choose how many coats.';
+  const area = readArea(values, note);
+  const containers = readContainers(values, note);
+  const coverage = readCoverage(values, note);
+  return area && has(textures, texture) ? { units: note.units, ...area, profile: { nominalIn, crownHeightIn }, texture, coats, ...coverage, wastePercent, containers } : null;
+}
+
+/** Reads the form as typed, in the reader's units. */
+export function readCalculator(values: FormValues): CalculatorReading {
   const faults: Record<string, string> = {};
-  for (const issue of parsed.error.issues) faults[issue.path.join('.')] ??= issue.message;
-  return { faults };
+  const missing: Record<string, string> = {};
+  const body = readBody(values, { faults, missing, units: values.units === 'metric' ? 'metric' : 'us' });
+  if (Object.keys(faults).length > 0 || !body) return { body: null, faults, missing };
+  const judged = estimateSchema.safeParse(body);
+  if (judged.success) return { body, faults, missing };
+  return { body: null, faults: { '': judged.error.issues[0]?.message ?? 'This cannot be worked out.' }, missing };
 }

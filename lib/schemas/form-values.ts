@@ -18,6 +18,15 @@ export function readForm(form: FormData): FormValues {
   return root;
 }
 
+export type QueryValues = Record<string, string | string[] | undefined>;
+
+/** The query string of a page as the form that was sent with it. */
+export function queryForm(query: QueryValues): FormData {
+  const form = new FormData();
+  for (const [name, value] of Object.entries(query)) for (const one of [value].flat()) if (one !== undefined) form.append(name, one);
+  return form;
+}
+
 function put(target: FormValues, path: string[], value: string) {
   const [head, ...rest] = path;
   if (head === undefined || head === '__proto__' || head === 'constructor' || head === 'prototype') return;

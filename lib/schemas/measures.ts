@@ -30,13 +30,15 @@ export function parseLength(text: string, units: UnitSystem): number | null {
 }
 
 type Range = { min: number; max: number; what: string; optional?: boolean };
+/** What a schema's context does here: takes a fault at a field. */
+type Faults = { addIssue: (issue: { code: 'custom'; path: (string | number)[]; message: string }) => void };
 
 const example = (units: UnitSystem) => (units === 'us' ? 'for example 30 or 30 ft 6 in' : 'for example 9.1 or 9.1 m');
 const bound = (metres: number, units: UnitSystem) =>
   units === 'us' ? `${Number((metres / metresPerFoot).toFixed(1))} ft` : `${Number(metres.toFixed(2))} m`;
 
 /** Reads one length field inside a schema's transform; adds an issue at `path` and returns 0 when it is wrong. An empty optional field is 0. */
-export function readLength(text: string | undefined, units: UnitSystem, range: Range, ctx: z.RefinementCtx, path: (string | number)[]): number {
+export function readLength(text: string | undefined, units: UnitSystem, range: Range, ctx: Faults, path: (string | number)[]): number {
   const fault = (message: string) => {
     ctx.addIssue({ code: 'custom', path, message });
     return 0;

@@ -1,10 +1,11 @@
 import { type Explanation } from '@/lib/explain';
-import { type Texture } from '@/lib/schemas/vocabulary';
+import { type Texture, type UnitSystem } from '@/lib/schemas/vocabulary';
 import { litresPerGallon, squareMetresPerSquareFoot } from '@/lib/units';
-import { cheapestContainers, type ContainerCount, type ContainerSize } from './containers';
-import { coverageFt2PerGal, coverageSource } from './coverage';
+import { cheapestContainers, type ContainerCount, type ContainerSize, priceOfContainers } from './containers';
+import { coverageFt2PerGal } from './coverage';
+import { stainExplained } from './explained';
 
-export type StainNeed = {
+export type Coating = {
   /** Flat area to be coated, m². */
   areaM2: number;
   /** True over flat area of the siding's face, 1 to 1.6. */
@@ -15,14 +16,20 @@ export type StainNeed = {
   coverage?: { low: number; high: number } | undefined;
   /** Spills, wet edges and what stays in the can, 0–0.5. */
   wasteShare: number;
-  sizes: ContainerSize[];
 };
 
-export type StainEstimate = {
-  lowGal: number;
-  highGal: number;
-  /** What to buy for: the thirsty end of the range with waste. */
-  buyGal: number;
+export type StainNeed = Coating & {
+  sizes: readonly ContainerSize[];
+  /** Of the words in the explanation; US customary unless said. */
+  units?: UnitSystem | undefined;
+};
+
+/** US gallons: the range by coverage, and what to buy for: its thirsty end with waste. */
+export type StainRange = { lowGal: number; highGal: number; buyGal: number };
+
+export type StainEstimate = StainRange & {
+  lowL: number;
+  highL: number;
   buyL: number;
   containers: ContainerCount[];
   priceCents: number;
@@ -36,50 +43,30 @@ export const exampleContainers: ContainerSize[] = [
   { gal: 5, priceCents: 29500 },
 ];
 
-const number = (value: number, digits = 2) => Number(value.toFixed(digits)).toLocaleString('en-US');
-
 /**
  * Stain for an area: area × profile factor × coats ÷ coverage gives a range; the figure to buy is its upper end plus waste.
- * @throws RangeError for values outside the ranges named in `StainNeed`
+ * @throws RangeError for values outside the ranges named in `Coating`
  * @example 234 ft², factor 1.06, two coats, saw-textured: 2.48–4.96 gal
  */
-export function stainNeeded(need: StainNeed): StainEstimate {
-  const coverage = need.coverage ?? coverageFt2PerGal[need.texture];
-  if (!(need.areaM2 >= 0) || !(need.profileFactor >= 1) || !(need.coats >= 1) || !(need.wasteShare >= 0 && need.wasteShare <= 0.5)) throw new RangeError('area, profile, coats or waste out of range');
+export function stainRange(coating: Coating): StainRange {
+  const { areaM2, profileFactor, texture, coats, wasteShare } = coating;
+  const coverage = coating.coverage ?? coverageFt2PerGal[texture];
+  if (!(areaM2 >= 0) || !(profileFactor >= 1) || !(coats >= 1) || !(wasteShare >= 0 && wasteShare <= 0.5)) throw new RangeError('area, profile, coats or waste out of range');
   if (!(coverage.low > 0) || !(coverage.high >= coverage.low)) throw new RangeError('the coverage must be a range above 0');
-  const coatedFt2 = (need.areaM2 / squareMetresPerSquareFoot) * need.profileFactor * need.coats;
-  const lowGal = coatedFt2 / coverage.high;
+  const coatedFt2 = (areaM2 / squareMetresPerSquareFoot) * profileFactor * coats;
   const highGal = coatedFt2 / coverage.low;
-  const buyGal = highGal * (1 + need.wasteShare);
-  const containers = cheapestContainers(buyGal, need.sizes);
-  const priceOf = (gal: number) => Math.min(...need.sizes.filter((size) => size.gal === gal).map((size) => size.priceCents));
-  return {
-    lowGal,
-    highGal,
-    buyGal,
-    buyL: buyGal * litresPerGallon,
-    containers,
-    priceCents: containers.reduce((sum, { gal, count }) => sum + priceOf(gal) * count, 0),
-    explanation: explain(need, coverage, { lowGal, highGal, buyGal }),
-  };
+  return { lowGal: coatedFt2 / coverage.high, highGal, buyGal: highGal * (1 + wasteShare) };
 }
 
-function explain(need: StainNeed, coverage: { low: number; high: number }, gallons: { lowGal: number; highGal: number; buyGal: number }): Explanation {
-  return {
-    figure: 'Stain to buy',
-    value: `${number(gallons.buyGal)} gal (range ${number(gallons.lowGal)}–${number(gallons.highGal)} gal)`,
-    formula: 'area × profile factor × coats ÷ coverage; to buy: the upper end × (1 + waste)',
-    inputs: [
-      { label: 'Flat area', value: `${number(need.areaM2 / squareMetresPerSquareFoot, 0)} ft² (${number(need.areaM2, 1)} m²)` },
-      { label: 'Profile factor', value: number(need.profileFactor, 4) },
-      { label: 'Coats', value: String(need.coats) },
-      { label: 'Coverage', value: `${number(coverage.low)}–${number(coverage.high)} ft² per gallon and coat${need.coverage ? ', from the label' : ''}` },
-      { label: 'Waste', value: `${number(need.wasteShare * 100)} %` },
-    ],
-    sources: [
-      need.coverage ? { text: 'The product’s label', ground: 'published' } : { text: coverageSource, ground: 'published' },
-      { text: 'Profile factor: exact geometry of a circle segment', ground: 'published' },
-      { text: 'Buying for the thirsty end of the range, and the share of waste', ground: 'our rule' },
-    ],
-  };
+/** A range as litres, cheapest containers and their price. */
+export function bought(range: StainRange, sizes: readonly ContainerSize[]): Omit<StainEstimate, 'explanation'> {
+  const { lowGal, highGal, buyGal } = range;
+  const containers = cheapestContainers(buyGal, sizes);
+  return { lowGal, highGal, buyGal, lowL: lowGal * litresPerGallon, highL: highGal * litresPerGallon, buyL: buyGal * litresPerGallon, containers, priceCents: priceOfContainers(containers, sizes) };
+}
+
+/** Stain for an area as in `stainRange`, with the cheapest containers for it. */
+export function stainNeeded(need: StainNeed): StainEstimate {
+  const range = stainRange(need);
+  return { ...bought(range, need.sizes), explanation: stainExplained([need], range, need.units ?? 'us') };
 }

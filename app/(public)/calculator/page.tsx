@@ -1,41 +1,30 @@
 import { type Metadata } from 'next';
 import { currentActor } from '@/app/_server/actor';
 import { StainCalculator } from '@/components/takeoff/stain-calculator';
-import { LinkButton } from '@/components/ui/button';
 import { Course } from '@/components/ui/course';
 import { PageHead } from '@/components/ui/page-head';
 import { unitsOf } from '@/db/queries/units';
-import { readCalculator } from '@/lib/schemas/calculator';
-import { estimateSchema } from '@/lib/schemas/estimate';
-import { readForm } from '@/lib/schemas/form-values';
+import { calculatorStart, editCalculator, exampleWalls } from '@/lib/schemas/calculator-values';
+import { queryForm, type QueryValues, readForm } from '@/lib/schemas/form-values';
 import { type UnitSystem } from '@/lib/schemas/vocabulary';
-import { stainAnswer } from '@/lib/takeoff/estimate';
+import { answerForm } from '@/lib/takeoff/form-answer';
 
-export const metadata: Metadata = { title: 'Stain calculator', description: 'How much stain a log-look wall takes, and the cheapest cans to buy.' };
+export const metadata: Metadata = { title: 'Stain calculator', description: 'How much stain a log-look wall takes, and the cheapest containers to buy.' };
 
-type Props = { searchParams: Promise<Record<string, string | string[] | undefined>> };
+type Props = { searchParams: Promise<QueryValues> };
 
-const example = (units: UnitSystem) => ({ units, walls: { 0: units === 'us' ? { width: '30', height: '9', openings: '36' } : { width: '9', height: '2.7', openings: '3.3' } } });
-
-function asForm(query: Record<string, string | string[] | undefined>): FormData {
-  const form = new FormData();
-  for (const [name, value] of Object.entries(query)) for (const one of [value].flat()) if (one !== undefined) form.append(name, one);
-  return form;
-}
-
+/** The form as it was sent without scripts, or an example in the reader's units. */
 export default async function CalculatorPage({ searchParams }: Props) {
   const actor = await currentActor();
-  const asked = readForm(asForm(await searchParams));
-  const units: UnitSystem = asked.units === 'metric' || asked.units === 'us' ? asked.units : actor ? unitsOf(actor) : 'us';
-  const start = asked.walls ? { ...asked, units } : example(units);
-  const read = readCalculator(start);
-  const parsed = 'body' in read ? estimateSchema.safeParse(read.body) : undefined;
-  const other = units === 'us' ? 'metric' : 'us';
+  const sent = readForm(queryForm(await searchParams));
+  const units: UnitSystem = sent.units === 'metric' || sent.units === 'us' ? sent.units : actor ? unitsOf(actor) : 'us';
+  const start = calculatorStart(sent.walls ? sent : { ...sent, walls: exampleWalls[units] }, units);
+  const values = editCalculator(start, typeof sent.edit === 'string' ? sent.edit : '');
   return (
     <>
-      <PageHead title="Stain calculator" lead="The size of your walls in; what to buy out. Nothing is kept." actions={<LinkButton look="quiet" href={`/calculator?units=${other}`}>{other === 'us' ? 'In feet and gallons' : 'In metres and litres'}</LinkButton>} />
+      <PageHead title="Stain calculator" lead="The size of your walls in; what to buy out. Nothing is kept." />
       <Course as="div">
-        <StainCalculator key={units} units={units} start={start} first={parsed?.success ? stainAnswer(parsed.data) : undefined} />
+        <StainCalculator start={values} first={answerForm(values)} />
       </Course>
     </>
   );

@@ -31,6 +31,22 @@ describe('cheapestContainers', () => {
     );
   });
 
+  test('a need of thousands of gallons, as a plain search by quarter gallons finds it', () => {
+    const plainSearch = (needed: number, of: Size[]): number => {
+      const best = [0];
+      for (let quarters = 1; quarters <= needed * 4; quarters += 1) best[quarters] = Math.min(...of.map(({ gal, priceCents }) => priceCents + (best[Math.max(0, quarters - gal * 4)] ?? 0)));
+      return best[needed * 4] ?? NaN;
+    };
+    fc.assert(
+      fc.property(fc.integer({ min: 3195, max: 4200 }), sizes, (gallons, offered) => {
+        const mix = cheapestContainers(gallons, offered);
+        expect(mix.reduce((sum, { gal, count }) => sum + gal * count, 0)).toBeGreaterThanOrEqual(gallons);
+        expect(priceOf(mix, offered)).toBe(plainSearch(gallons, offered));
+      }),
+      { numRuns: 25 },
+    );
+  });
+
   test('greed is not enough: 6 gal in fives at $60 and threes at $25 is two threes', () => {
     expect(cheapestContainers(6, [{ gal: 5, priceCents: 6000 }, { gal: 3, priceCents: 2500 }])).toEqual([{ gal: 3, count: 2 }]);
   });

@@ -10,9 +10,7 @@ import { unitsOf } from '@/db/queries/units';
 import { dayIn } from '@/lib/calendar';
 import { buyingStart } from '@/lib/home/buying';
 import { workGroups, workWords } from '@/lib/home/next-work';
-import { readCalculator } from '@/lib/schemas/calculator';
-import { estimateSchema } from '@/lib/schemas/estimate';
-import { stainAnswer } from '@/lib/takeoff/estimate';
+import { answerForm } from '@/lib/takeoff/form-answer';
 import { areaText } from '@/lib/units';
 
 export const metadata: Metadata = { title: 'What to buy' };
@@ -27,8 +25,6 @@ export default async function BuyPage({ params, searchParams }: Props) {
   const today = dayIn(home.timeZone, new Date());
   const next = workGroups(walls.flatMap(({ items }) => items), rows, today).find(({ kind }) => kind === 'restain');
   const { areas, start } = buyingStart(home, walls, next?.walls.map(({ id }) => id) ?? [], units, await searchParams);
-  const read = readCalculator(start);
-  const parsed = 'body' in read ? estimateSchema.safeParse(read.body) : undefined;
   return (
     <main id="main">
       <PageHead title="What to buy" lead="Stain for the walls you choose, and the cheapest cans that hold it." path={[{ href: '/homes', label: 'Homes' }, { href: `/homes/${home.id}`, label: home.name }]} />
@@ -48,7 +44,7 @@ export default async function BuyPage({ params, searchParams }: Props) {
             <p>The amount follows from the size of the walls, their siding and their surface.</p>
           </EmptyState>
         ) : (
-          <StainCalculator key={units} units={units} walls={areas.map((area) => ({ ...area, areaText: areaText(area.areaM2, units) }))} start={start} first={parsed?.success ? stainAnswer(parsed.data) : undefined} />
+          <StainCalculator walls={areas.map((area) => ({ ...area, areaText: areaText(area.areaM2, units) }))} start={start} first={answerForm(start)} />
         )}
       </Course>
       <Course heading="Before you open a can">

@@ -1,0 +1,12 @@
+import { type UnitSystem } from '@/lib/schemas/vocabulary';
+import { litresPerGallon, volumeText } from '@/lib/units';
+import { type ContainerCount } from './containers';
+
+const names: Record<string, string> = { '0.25': '1 qt', '1': '1 gal', '5': '5 gal' };
+
+/** A container by its size: '1 qt', '5 gal', '3.8 L'. */
+export const containerText = (gal: number, units: UnitSystem): string => (units === 'us' ? names[String(gal)] : undefined) ?? volumeText(gal * litresPerGallon, units);
+
+/** '1 × 5 gal and 2 × 1 gal' in the reader's units. */
+export const containersText = (containers: readonly ContainerCount[], units: UnitSystem): string =>
+  containers.length === 0 ? 'nothing' : containers.map(({ gal, count }) => `${count} × ${containerText(gal, units)}`).join(' and ');
