@@ -1,6 +1,7 @@
 // Runs the project's checks in order and closes with "N passed, N failed". Plain Node: it must start before anything is installed.
 import { spawnSync } from 'node:child_process';
 import { existsSync, mkdirSync, readFileSync, rmSync, statSync } from 'node:fs';
+import { createServer } from 'node:net';
 import path from 'node:path';
 
 const root = path.resolve(import.meta.dirname, '..', '..');
@@ -46,6 +47,19 @@ function suite(name, command, args, reportName, read, env = {}) {
 const vitestCounts = (json) => ({ passed: json.numPassedTests, failed: json.numFailedTests });
 const playwrightCounts = ({ stats }) => ({ passed: stats.expected, failed: stats.unexpected + stats.flaky });
 
+const isFree = (port) =>
+  new Promise((resolve) => {
+    const server = createServer();
+    server.once('error', () => resolve(false));
+    server.listen(port, () => server.close(() => resolve(true)));
+  });
+
+/** The first port from `from` on that is free together with the next one (application and mail server). */
+async function freePair(from) {
+  for (let port = from; port < from + 200; port += 2) if ((await isFree(port)) && (await isFree(port + 1))) return port;
+  throw new Error(`no two free ports from ${from} on`);
+}
+
 installWhatIsMissing();
 rmSync(out, { recursive: true, force: true });
 mkdirSync(out, { recursive: true });
@@ -55,7 +69,7 @@ check('types of routes', bin('next'), ['typegen']);
 check('types', bin('tsc'), ['--noEmit']);
 suite('unit, reference and integration tests', bin('vitest'), ['run', '--config', 'tests/vitest.config.ts'], 'vitest.json', vitestCounts);
 if (withBrowser) {
-  suite('browser tests', bin('playwright'), ['test', '--config', 'tests/playwright.config.ts'], 'playwright.json', playwrightCounts);
+  suite('browser tests', bin('playwright'), ['test', '--config', 'tests/playwright.config.ts'], 'playwright.json', playwrightCounts, { E2E_PORT: String(await freePair(3199)) });
 }
 
 console.log(`\n${totals.passed} passed, ${totals.failed} failed`);
