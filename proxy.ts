@@ -12,6 +12,7 @@ export async function proxy(request: NextRequest) {
   }
   const headers = new Headers(request.headers);
   headers.set('x-request-id', crypto.randomUUID().slice(0, 8));
+  headers.set('x-request-path', `${pathname}${search}`);
   return NextResponse.next({ request: { headers } });
 }
 
