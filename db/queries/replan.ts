@@ -89,7 +89,7 @@ function writePlan(row: HomeRow, plans: WallPlan[], today: CalendarDay, now: Dat
   database().update(home).set({ plannedAt: now, replanOn: lapses[0] ?? null }).where(eq(home.id, row.id)).run();
 }
 
-/** Plans anew every home in whose plan something has lapsed by now; returns how many. */
+/** Plans anew every home in whose plan something has lapsed by now; returns how many. A home that fails does not hold up the others; then throws. */
 export function replanLapsed(now: Date): number {
   const latestDayAnywhere = dayIn('Etc/GMT-14', now);
   const lapsed = database()
@@ -98,6 +98,14 @@ export function replanLapsed(now: Date): number {
     .where(and(lte(home.replanOn, latestDayAnywhere), isNull(home.archivedAt)))
     .all()
     .filter(({ timeZone, replanOn }) => replanOn !== null && replanOn <= dayIn(timeZone, now));
-  for (const { id } of lapsed) replanHome(id, now);
+  const faults: unknown[] = [];
+  for (const { id } of lapsed) {
+    try {
+      replanHome(id, now);
+    } catch (error) {
+      faults.push(error);
+    }
+  }
+  if (faults.length > 0) throw new AggregateError(faults, `${faults.length} of ${lapsed.length} homes could not be planned anew: ${faults.map(String).slice(0, 3).join('; ')}`);
   return lapsed.length;
 }
