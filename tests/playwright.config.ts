@@ -9,9 +9,9 @@ export default defineConfig({
   testDir: path.join(root, 'tests', 'e2e'),
   outputDir: path.join(root, 'tests', '.out', 'playwright'),
   fullyParallel: false,
-  workers: 1,
+  workers: 2,
   retries: 0,
-  timeout: 60_000,
+  timeout: 90_000,
   expect: { timeout: 10_000 },
   reporter: process.env.PLAYWRIGHT_JSON_OUTPUT_NAME ? [['list'], ['json']] : [['list']],
   use: {
