@@ -21,7 +21,7 @@ export function CoatingFields({ units, values }: { units: UnitSystem; values: Fo
   const coverageUnit = us ? 'ft²/gal' : 'm²/L';
   return (
     <>
-      <div className="grid items-end gap-6 sm:grid-cols-2">
+      <div className="grid items-start gap-6 sm:grid-cols-2">
         <SelectField label="Siding" name="siding" options={sidings} defaultValue={typedIn(values, 'siding')} hint="Nominal width of a course" />
         <Field label="Crown of the log" unit={us ? 'in' : 'cm'} hint="How far its face bulges" {...number('crown')} />
       </div>
@@ -31,7 +31,7 @@ export function CoatingFields({ units, values }: { units: UnitSystem; values: Fo
         <legend className="mb-1.5 font-semibold">
           Coverage on the label <span className="font-normal text-quiet">(may stay empty)</span>
         </legend>
-        <div className="grid grid-cols-2 items-end gap-x-6 gap-y-3">
+        <div className="grid grid-cols-2 items-start gap-x-6 gap-y-3">
           <Field label="From" unit={coverageUnit} {...number('coverageLow')} />
           <Field label="To" unit={coverageUnit} {...number('coverageHigh')} />
         </div>

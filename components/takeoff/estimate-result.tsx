@@ -24,7 +24,7 @@ export function EstimateResult({ answer, units }: Props) {
         }
       />
       <div className="mt-2 border-t-2 border-lichen pt-2">
-        <Figure explanation={{ ...explanation, figure: 'Goes on the wall', value: range }} value={range} />
+        <Figure explanation={explanations.used} value={range} />
         <Figure explanation={explanations.area} value={areaText(answer.areaM2, units)} />
         <Figure explanation={explanations.surface} value={areaText(answer.areaM2 * answer.profileFactor, units)} />
       </div>

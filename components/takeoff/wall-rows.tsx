@@ -33,7 +33,7 @@ function WallRow({ units, path, row, number, alone }: WallRowProps) {
   return (
     <fieldset className="grid gap-4 border-l-4 border-lichen pl-4">
       <legend className="mb-1.5 text-lg font-semibold">Wall {number}</legend>
-      <div className="grid grid-cols-2 items-end gap-4 sm:grid-cols-3">
+      <div className="grid grid-cols-2 items-start gap-4 sm:grid-cols-3">
         {length('Width', 'width')}
         {length('Height', 'height')}
         {length('Gable height', 'gable', { placeholder: 'none' })}
@@ -61,13 +61,15 @@ type OpeningRowProps = { path: string; row: FormValues; unit: string; number: nu
 function OpeningRow({ path, row, unit, number, wall }: OpeningRowProps) {
   const common = { inputMode: 'decimal', autoComplete: 'off' } as const;
   return (
-    <div role="group" aria-label={`Opening ${number} of wall ${wall}`} className="grid grid-cols-2 items-end gap-x-4 gap-y-2 border-t border-line pt-3 sm:grid-cols-[minmax(0,1fr)_minmax(0,1fr)_6rem_auto]">
+    <div role="group" aria-label={`Opening ${number} of wall ${wall}`} className="grid grid-cols-2 items-start gap-x-4 gap-y-2 border-t border-line pt-3 sm:grid-cols-[minmax(0,1fr)_minmax(0,1fr)_6rem_auto]">
       <Field label={<span>Opening {number}, width</span>} name={`${path}.width`} unit={unit} defaultValue={typedIn(row, 'width')} {...common} />
       <Field label="Height" name={`${path}.height`} unit={unit} defaultValue={typedIn(row, 'height')} {...common} />
       <Field label="How many" name={`${path}.count`} placeholder="1" defaultValue={typedIn(row, 'count')} {...common} inputMode="numeric" />
-      <EditButton edit={`drop ${path}`} label={`Remove opening ${number} of wall ${wall}`} look="plain">
-        Remove
-      </EditButton>
+      <div className="self-end">
+        <EditButton edit={`drop ${path}`} label={`Remove opening ${number} of wall ${wall}`} look="plain">
+          Remove
+        </EditButton>
+      </div>
     </div>
   );
 }

@@ -14,11 +14,13 @@ type FigureProps = {
   value?: ReactNode;
   /** Shown in place of the name of the figure; null leaves it out (it is still said aloud). */
   label?: ReactNode;
+  /** A sentence that stands before the formula. */
+  because?: string;
   size?: 'line' | 'large';
 };
 
 /** A figure that the product computed; opened, it shows its inputs, formula and sources. */
-export function Figure({ explanation, value, label, size = 'line' }: FigureProps) {
+export function Figure({ explanation, value, label, because, size = 'line' }: FigureProps) {
   const name = label === undefined ? explanation.figure : label;
   return (
     <details className="group min-w-0">
@@ -31,6 +33,7 @@ export function Figure({ explanation, value, label, size = 'line' }: FigureProps
         <span className="sr-only">: how this comes about</span>
       </summary>
       <div className="mt-1 mb-3 max-w-prose border-l-4 border-lichen bg-inset px-4 py-3 text-sm">
+        {because ? <p className="mb-3 text-base">{because}</p> : null}
         <p>
           {explanation.figure} = {explanation.formula}
         </p>

@@ -1,7 +1,7 @@
 import { type Explanation } from '@/lib/explain';
 import { squareMetresPerSquareFoot } from '@/lib/units';
 import { type WallSizes } from './area';
-import { areaExplained, containersExplained, surfaceExplained } from './explained';
+import { areaExplained, containersExplained, surfaceExplained, usedExplained } from './explained';
 import { profileFactor } from './profile';
 import { type StainEstimate, type StainNeed, stainNeeded } from './stain';
 
@@ -13,14 +13,16 @@ export type StainAnswer = StainEstimate & {
   areaM2: number;
   areaFt2: number;
   profileFactor: number;
-  explanations: { area: Explanation; surface: Explanation; containers: Explanation };
+  explanations: { used: Explanation; area: Explanation; surface: Explanation; containers: Explanation };
 };
 
 export function stainAnswer(ask: StainAsk): StainAnswer {
   const { areaM2, walls, profile, sizes, units = 'us' } = ask;
   const factor = profileFactor(profile.exposedFaceIn, profile.crownHeightIn);
-  const estimate = stainNeeded({ ...ask, profileFactor: factor });
+  const need = { ...ask, profileFactor: factor };
+  const estimate = stainNeeded(need);
   const explanations = {
+    used: usedExplained([need], estimate, units),
     area: areaExplained(areaM2, walls, units),
     surface: surfaceExplained(areaM2, factor, profile, units),
     containers: containersExplained(estimate.buyGal, estimate.containers, sizes, estimate.priceCents, units),

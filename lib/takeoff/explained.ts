@@ -1,6 +1,6 @@
 import { type ExplainedInput, type Explanation, type Source } from '@/lib/explain';
 import { textures, type UnitSystem } from '@/lib/schemas/vocabulary';
-import { areaText, gallonsToLitres, lengthText, litresPerGallon, smallLengthText, squareMetresPerSquareFoot, volumeText, inchesToMetres } from '@/lib/units';
+import { areaText, gallonsToLitres, lengthText, litresPerGallon, metresPerInch, squareMetresPerSquareFoot, volumeText } from '@/lib/units';
 import { wallAreaM2, type WallSizes } from './area';
 import { type ContainerCount, type ContainerSize } from './containers';
 import { coverageFt2PerGal, coverageSource } from './coverage';
@@ -8,7 +8,9 @@ import { type Coating, type StainRange } from './stain';
 import { containersText, containerText } from './words';
 
 const plain = (value: number, digits = 2) => Number(value.toFixed(digits)).toLocaleString('en-US');
-const volume = (gallons: number, units: UnitSystem) => volumeText(gallonsToLitres(gallons), units);
+/** To a hundredth: an opened figure is more exact than the one it explains. */
+const volume = (gallons: number, units: UnitSystem) => (units === 'us' ? `${plain(gallons)} gal` : `${plain(gallonsToLitres(gallons))} L`);
+const small = (inches: number, units: UnitSystem) => (units === 'us' ? `${plain(inches, 3)} in` : `${plain(inches * 100 * metresPerInch, 2)} cm`);
 const dollars = (cents: number) => (cents / 100).toLocaleString('en-US', { style: 'currency', currency: 'USD' });
 
 function coverageText({ low, high }: { low: number; high: number }, units: UnitSystem): string {
@@ -18,33 +20,38 @@ function coverageText({ low, high }: { low: number; high: number }, units: UnitS
 }
 
 const geometry: Source = { text: 'Profile factor: exact geometry of a circle segment', ground: 'published' };
-const thirsty: Source = { text: 'Buying for the thirsty end of the range, and the share of waste', ground: 'our rule' };
 
-/** How much stain, for one surface or for several that are bought together. */
-export function stainExplained(coatings: readonly Coating[], range: StainRange, units: UnitSystem): Explanation {
+/** What goes on the wall: one surface, or several that are bought together. */
+export function usedExplained(coatings: readonly Coating[], range: StainRange, units: UnitSystem): Explanation {
   const [first] = coatings;
   const several = coatings.length > 1;
   const perSurface = coatings.flatMap((coating): ExplainedInput[] => {
-    const coverage = coating.coverage ?? coverageFt2PerGal[coating.texture];
     const of = several ? `, ${textures[coating.texture].toLowerCase()}` : '';
+    const coverage = coverageText(coating.coverage ?? coverageFt2PerGal[coating.texture], units);
     return [
       { label: `Wall area${of}`, value: areaText(coating.areaM2, units) },
-      { label: `Coverage${of}`, value: `${coverageText(coverage, units)}${coating.coverage ? ', from the label' : ''}` },
+      { label: `Coverage${of}`, value: `${coverage}${coating.coverage ? ', from the label' : ''}` },
     ];
   });
-  const fromTable = coatings.some(({ coverage }) => !coverage);
+  const table: Source = { text: coverageSource, ground: 'published' };
+  return {
+    figure: 'Goes on the wall',
+    value: `${volume(range.lowGal, units)} to ${volume(range.highGal, units)}`,
+    formula: `area × profile factor × coats ÷ coverage${several ? ', surface by surface, added up' : ''}`,
+    inputs: [...perSurface, { label: 'Profile factor', value: plain(first?.profileFactor ?? 1, 3) }, { label: 'Coats', value: String(first?.coats ?? 0) }],
+    sources: [coatings.some(({ coverage }) => !coverage) ? table : { text: 'The product’s label', ground: 'published' }, geometry],
+  };
+}
+
+/** How much stain to buy. */
+export function stainExplained(coatings: readonly Coating[], range: StainRange, units: UnitSystem): Explanation {
+  const used = usedExplained(coatings, range, units);
   return {
     figure: 'Stain to buy',
-    value: volume(range.buyGal, units),
-    formula: `area × profile factor × coats ÷ coverage${several ? ', surface by surface, added up' : ''}; to buy: the upper end × (1 + waste)`,
-    inputs: [
-      ...perSurface,
-      { label: 'Profile factor', value: plain(first?.profileFactor ?? 1, 3) },
-      { label: 'Coats', value: String(first?.coats ?? 0) },
-      { label: 'Goes on the wall', value: `${volume(range.lowGal, units)} to ${volume(range.highGal, units)}` },
-      { label: 'Waste', value: `${plain((first?.wasteShare ?? 0) * 100)} %` },
-    ],
-    sources: [fromTable ? { text: coverageSource, ground: 'published' } : { text: 'The product’s label', ground: 'published' }, geometry, thirsty],
+    value: volumeText(gallonsToLitres(range.buyGal), units),
+    formula: `(${used.formula}), its upper end × (1 + waste)`,
+    inputs: [...used.inputs, { label: used.figure, value: used.value }, { label: 'Waste', value: `${plain((coatings[0]?.wasteShare ?? 0) * 100)} %` }, { label: 'To buy', value: volume(range.buyGal, units) }],
+    sources: [...used.sources, { text: 'Buying for the thirsty end of the range, and the share of waste', ground: 'our rule' }],
   };
 }
 
@@ -83,15 +90,14 @@ export function areaExplained(areaM2: number, walls: readonly WallSizes[] | unde
 
 /** The area that the round of the logs really has. */
 export function surfaceExplained(areaM2: number, factor: number, profile: { exposedFaceIn: number; crownHeightIn: number }, units: UnitSystem): Explanation {
-  const inches = (value: number) => smallLengthText(inchesToMetres(value), units);
   return {
     figure: 'Round surface',
     value: areaText(areaM2 * factor, units),
     formula: 'wall area × 2R · asin(c ÷ 2R) ÷ c, with R = (c² ÷ 4 + h²) ÷ 2h',
     inputs: [
       { label: 'Wall area', value: areaText(areaM2, units) },
-      { label: 'c, exposed face of a course', value: inches(profile.exposedFaceIn) },
-      { label: 'h, crown of the log', value: inches(profile.crownHeightIn) },
+      { label: 'c, exposed face of a course', value: small(profile.exposedFaceIn, units) },
+      { label: 'h, crown of the log', value: small(profile.crownHeightIn, units) },
       { label: 'Profile factor', value: plain(factor, 3) },
     ],
     sources: [geometry, { text: 'Exposed face: WWPA, Natural Wood Siding technical guide, table 4', ground: 'published' }],

@@ -56,7 +56,7 @@ describe('POST /api/estimates/stain', () => {
     expect(answer.lowL).toBeCloseTo(3.785411784, 9);
     expect(answer.explanation.value).toBe('4.2 L');
     expect(answer.explanations.area.inputs).toEqual([{ label: 'Wall 1', value: '6.1 m × 2.44 m + gable 1.83 m = 20.4 m²' }]);
-    expect(answer.explanations.containers.inputs.at(-1)).toEqual({ label: 'Left over', value: '0.6 L' });
+    expect(answer.explanations.containers.inputs.at(-1)).toEqual({ label: 'Left over', value: '0.57 L' });
   });
 
   test.each([
