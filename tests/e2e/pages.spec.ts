@@ -57,7 +57,7 @@ test('the stain calculator answers while one types, and without scripts', async 
   await page.goto('/calculator');
   await size(page, 'Width').fill('40');
   await size(page, 'Height').fill('10');
-  await expect(page.getByText(/364 ft²/).first()).toBeVisible();
+  await expect(page.getByText(/364 ft²/).filter({ visible: true }).first()).toBeVisible();
   await size(page, 'Width').fill('forty');
   await expect(page.getByText(/Width could not be read/)).toBeVisible();
   const plain = await (await browser.newContext({ javaScriptEnabled: false })).newPage();
@@ -65,7 +65,7 @@ test('the stain calculator answers while one types, and without scripts', async 
   await size(plain, 'Width').fill('40');
   await size(plain, 'Height').fill('10');
   await plain.getByRole('button', { name: 'Work it out' }).click();
-  await expect(plain.getByText(/364 ft²/).first()).toBeVisible();
+  await expect(plain.getByText(/364 ft²/).filter({ visible: true }).first()).toBeVisible();
 });
 
 test('a page behind sign-in leads there and back; another role’s page leads home', async ({ page }) => {
