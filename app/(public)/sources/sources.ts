@@ -63,6 +63,21 @@ export const sources: SourceGroup[] = [
     ],
   },
   {
+    heading: 'Whether today is the day',
+    entries: [
+      {
+        name: 'Dew point by the Magnus formula',
+        used: 'From temperature and humidity to the dew point, which stands for the low of a night without a forecast.',
+        credit: 'O. A. Alduchov and R. E. Eskridge, Journal of Applied Meteorology 35, 1996. From memory.',
+      },
+      {
+        name: 'ASTM C1193 and ISO 8502-4',
+        used: 'Temperatures for sealant; how far above the dew point a surface stands.',
+        credit: 'ASTM International; International Organization for Standardization. From memory.',
+      },
+    ],
+  },
+  {
     heading: 'Calendars',
     entries: [
       {
@@ -90,6 +105,8 @@ export const ownRules = [
   'That a raw date moves into the coating season, never later than 60 days after the coat is used up; that work which missed its season moves to the coming one and stays overdue.',
   'That caulk due within 18 months of a restain joins it, and that a restain begins with a wash.',
   'When a reminder goes out: 120 days before to book, 28 days before to buy, on the opening day, and 14, 45 and 105 days after a chance has passed.',
+  'A day without rain before and after the work; no stain above 90 °F (32 °C); caulk kept from frost for a night; oil stain kept above its 40 °F (4 °C) through the night.',
+  'The order in which work follows the shade: by the middle of each wall’s longest time out of the sun; trees count as shade when less than half of the light passes.',
   'Buying for the thirsty end of the published range, with a tenth for waste unless you say otherwise.',
   'The five steps of the sun-dose ramp on the house plan: 250 to 1,350 kWh/m² in equal parts.',
   'How walls are laid end to end on the house plan when measured widths leave a gap, and where doors and windows are drawn on a wall.',

@@ -57,6 +57,30 @@ test('wood is finished below 20 % moisture', () => {
   expect([19.9, 20].map((woodMoisturePercent) => of({ woodMoisturePercent }).verdict)).toEqual(['go', 'no']);
 });
 
+describe('our own rules', () => {
+  test('a day without rain before and after; while it rains and within 4 hours of rain, none', () => {
+    expect([0, 0.5, 23.9, 24, Infinity].map((hoursSinceRain) => of({ hoursSinceRain }).verdict)).toEqual(['no', 'wait', 'wait', 'go', 'go']);
+    expect([0, 3.9, 4, 23.9, 24, Infinity].map((hoursToRain) => of({ hoursToRain }).verdict)).toEqual(['no', 'no', 'wait', 'wait', 'go', 'go']);
+  });
+
+  test('no stain above 90 °F, no oil below 40 °F at night, no sealant in frost: wait', () => {
+    expect([90, 90.1].map((degrees) => of({ temperatureC: fahrenheit(degrees) }).verdict)).toEqual(['go', 'wait']);
+    expect([40, 39.9].map((degrees) => of({ base: 'oil', lowC: fahrenheit(degrees) }).verdict)).toEqual(['go', 'wait']);
+    expect([0, -0.1].map((lowC) => of({ work: 'recaulk', lowC }).verdict)).toEqual(['go', 'wait']);
+  });
+
+  test('each says that it is ours', () => {
+    const ours = (change: Partial<Day>) => of(change).checks.filter(({ source }) => source.ground === 'our rule').map(({ what }) => what);
+    expect(ours({})).toEqual(['Rain before', 'Rain after']);
+    expect(ours({ base: 'oil', temperatureC: 35 })).toEqual(['Temperature now', 'Lowest in the next 24 hours', 'Rain before', 'Rain after']);
+  });
+});
+
+test('a surface stands 3 °C above the dew point (ISO 8502-4)', () => {
+  // Air of 20 °C condenses at 17 °C at 83 % (1.9384 of 2.3393 kPa, IAPWS steam tables, from memory).
+  expect([82, 84].map((humidityPercent) => of({ humidityPercent, lowC: 18 }).verdict)).toEqual(['go', 'wait']);
+});
+
 describe('whatever the day', () => {
   const never = (name: string, change: (day: Day, by: number) => Partial<Day>) =>
     test(name, () => {
