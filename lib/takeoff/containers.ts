@@ -2,8 +2,8 @@ export type ContainerSize = { gal: number; priceCents: number };
 export type ContainerCount = { gal: number; count: number };
 
 /** Sizes are whole numbers of this: a fluid ounce, so that quarts and metric cans come out whole enough. */
-const unitGal = 1 / 128;
-/** What is searched through: 3,200 gal. */
+const fluidOunce = 1 / 128;
+/** What is searched through: 3,200 gal by fluid ounces. */
 const mostUnits = 409_600;
 const mostGal = 50_000;
 
@@ -12,13 +12,14 @@ const mostGal = 50_000;
  * Exact: dynamic programming over fluid ounces (1/128 gal), sizes rounded down and the need up to whole ounces. Of a need above
  * 3,200 gal the part above is filled with the size that is cheapest by the gallon, which is still exact for sizes up to 5 gal:
  * a cheapest mix exists that holds less than 640 × 640 ounces in the other sizes (any 640 of those have some among them whose
- * contents are whole containers of the cheapest).
+ * contents are whole containers of the cheapest). With a finer unit all of these bounds shrink by as much.
  * @param neededGal US gallons, 0 to 50,000
  * @param sizes container sizes in US gallons (at least an ounce) with prices in cents ≥ 0
+ * @param unitGal what sizes are counted in; a fluid ounce unless said
  * @returns counts above 0, largest size first; empty for no need
  * @throws RangeError for a need or size out of range, or no sizes
  */
-export function cheapestContainers(neededGal: number, sizes: readonly ContainerSize[]): ContainerCount[] {
+export function cheapestContainers(neededGal: number, sizes: readonly ContainerSize[], unitGal = fluidOunce): ContainerCount[] {
   if (!(neededGal >= 0) || neededGal > mostGal) throw new RangeError('the need must be between 0 and 50,000 gallons');
   if (sizes.length === 0) throw new RangeError('at least one container size is needed');
   const units = sizes.map(({ gal, priceCents }) => {
