@@ -1,5 +1,5 @@
+import { StainFigures } from '@/components/jobs/stain-figures';
 import { WallJob } from '@/components/jobs/wall-job';
-import { VisitStain } from '@/components/jobs/visit-stain';
 import { When } from '@/components/plan/when';
 import { LinkButton } from '@/components/ui/button';
 import { Course } from '@/components/ui/course';
@@ -19,7 +19,7 @@ function logAddress({ home, rows }: JobVisit): string {
 
 /** One trip to one home: one row a wall, in plan order, and what stain it takes. */
 export function VisitCourse({ visit, owner, units }: VisitCourseProps) {
-  const { home, rows, opensOn, closesOn, today } = visit;
+  const { home, rows, opensOn, closesOn, today, stain } = visit;
   const late = rows.every(({ works }) => works.every(({ state }) => state === 'overdue'));
   return (
     <Course
@@ -50,7 +50,7 @@ export function VisitCourse({ visit, owner, units }: VisitCourseProps) {
           <WallJob key={row.wallId} row={row} visit={visit} units={units} />
         ))}
       </ul>
-      <VisitStain visit={visit} units={units} />
+      <div className="border-t-2 border-lichen pt-3">{stain ? <StainFigures stain={stain} units={units} /> : <p className="text-quiet">No stain: caulk only.</p>}</div>
       <p className="no-print mt-4 flex flex-wrap gap-3">
         <LinkButton href={logAddress(visit)}>Log work here</LinkButton>
         <LinkButton href={`/work/${home.id}`} look="quiet">

@@ -4,7 +4,7 @@ import { type CalendarDay, dayIn, yearOf } from '@/lib/calendar';
 import { type Texture, type UnitSystem } from '@/lib/schemas/vocabulary';
 import { profileFactor, sidingProfile, wallAreaM2 } from '@/lib/takeoff';
 import { exampleContainers } from '@/lib/takeoff/stain';
-import { stainForWalls, type WallsEstimate } from '@/lib/takeoff/stain-for-walls';
+import { type StainedWall, stainForWalls, type WallsEstimate } from '@/lib/takeoff/stain-for-walls';
 import { metresToInches } from '@/lib/units';
 
 export type JobHome = { id: string; name: string; place: string; state: string; timeZone: string; sidingNominalIn: number; crownHeightM: number };
@@ -37,6 +37,10 @@ export function homeProfileFactor(home: Pick<JobHome, 'sidingNominalIn' | 'crown
   return face ? profileFactor(face, Math.min(metresToInches(home.crownHeightM), face / 2)) : 1;
 }
 
+/** Stain for some walls of a home, as a crew counts it. */
+export const stainForHome = (home: Pick<JobHome, 'sidingNominalIn' | 'crownHeightM'>, walls: readonly StainedWall[], units: UnitSystem): WallsEstimate | null =>
+  stainForWalls(walls, { ...crewHabit, units, profileFactor: homeProfileFactor(home) });
+
 const total = <T>(values: readonly T[], pick: (value: T) => number) => values.reduce((sum, value) => sum + pick(value), 0);
 
 function grouped<T, K>(values: readonly T[], keyOf: (value: T) => K): T[][] {
@@ -62,8 +66,7 @@ function visitsTo(jobs: readonly Job[], now: Date, units: UnitSystem): JobVisit[
       return job ? [rowOf(ofWall, job)] : [];
     });
     const stained = rows.filter((row) => row.works.some(({ kind }) => kind === 'restain'));
-    const stain = stainForWalls(stained, { ...crewHabit, units, profileFactor: homeProfileFactor(home) });
-    return { home, today, opensOn, closesOn, rows, stainM2: total(stained, ({ areaM2 }) => areaM2), stain };
+    return { home, today, opensOn, closesOn, rows, stainM2: total(stained, ({ areaM2 }) => areaM2), stain: stainForHome(home, stained, units) };
   });
 }
 

@@ -4,15 +4,18 @@ import { health } from '@/db/queries/health';
 
 export const dynamic = 'force-dynamic';
 
-/** 200 when the service can work, 503 when its database does not answer. */
+const unwell = (body: object) => Response.json(body, { status: 503, headers: { 'cache-control': 'no-store' } });
+
+/** 200 when the service can work; 503 when its database does not answer or lacks a migration. */
 export const GET = defineHandler({
   verb: 'anyone',
   run: () => {
     try {
-      return { ok: true, ...health(new Date()) };
+      const found = health(new Date());
+      return found.ok ? found : unwell(found);
     } catch (error) {
       logFault(error);
-      return Response.json({ ok: false, database: 'down' }, { status: 503 });
+      return unwell({ ok: false, database: 'down' });
     }
   },
 });

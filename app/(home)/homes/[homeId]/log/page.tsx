@@ -7,23 +7,17 @@ import { PageHead } from '@/components/ui/page-head';
 import { unitsOf } from '@/db/queries/units';
 import { addDays, dayIn } from '@/lib/calendar';
 import { directionWord } from '@/lib/home/direction';
-import { workGroups } from '@/lib/home/next-work';
-import { workKinds, type WorkKind } from '@/lib/schemas/vocabulary';
+import { logStart } from '@/lib/home/log-start';
 import { log } from './actions';
 
 export const metadata: Metadata = { title: 'Log work' };
 
-type Props = { params: Promise<{ homeId: string }>; searchParams: Promise<{ kind?: string; wall?: string | string[] }> };
-
-const isKind = (kind: string | undefined): kind is WorkKind => kind !== undefined && Object.hasOwn(workKinds, kind);
+type Props = { params: Promise<{ homeId: string }>; searchParams: Promise<{ kind?: string | string[]; wall?: string | string[] }> };
 
 export default async function LogPage({ params, searchParams }: Props) {
   const { actor, view } = await pageHome((await params).homeId);
-  const asked = await searchParams;
   const today = dayIn(view.home.timeZone, new Date());
-  const [next] = workGroups(view.walls.flatMap(({ items }) => items), view.walls.map(({ wall }) => wall), today);
-  const kind = isKind(asked.kind) ? asked.kind : (next?.kind ?? 'restain');
-  const chosen = asked.wall ? [asked.wall].flat() : kind === next?.kind ? next.walls.map(({ id }) => id) : [];
+  const { kind, chosen } = logStart(await searchParams, view.walls.flatMap(({ items }) => items), view.walls.map(({ wall }) => wall), today);
   const walls = view.walls.map(({ wall }) => ({ id: wall.id, name: wall.name, hint: `faces ${directionWord(wall.azimuthDeg)}`, stainBase: wall.stainBase, sealant: wall.sealant }));
   return (
     <main id="main">
