@@ -5,18 +5,18 @@ import { sidingProfile, wallAreaM2 } from '@/lib/takeoff';
 import { exampleContainers } from '@/lib/takeoff/stain';
 import { feetToMetres, squareMetresPerSquareFoot } from '@/lib/units';
 
-const between = (min: number, max: number, what: string) => z.number({ error: `${what} should be a number.` }).min(min, `${what} should be at least ${min}.`).max(max, `${what} should be at most ${max}.`);
-const whole = (min: number, max: number, words: string) => z.number({ error: words }).int(words).min(min, words).max(max, words);
+export const between = (min: number, max: number, what: string) => z.number({ error: `${what} should be a number.` }).min(min, `${what} should be at least ${min}.`).max(max, `${what} should be at most ${max}.`);
+export const whole = (min: number, max: number, words: string) => z.number({ error: words }).int(words).min(min, words).max(max, words);
 
 /** A list whose length is judged before its members, so that an endless one costs nothing. */
-const list = <S extends z.ZodType>(member: S, most: number, what: string, least = 0) =>
+export const list = <S extends z.ZodType>(member: S, most: number, what: string, least = 0) =>
   z.array(z.unknown(), { error: `${what} should be a list.` }).min(least, `At least one of ${what.toLowerCase()}.`).max(most, `${what}: at most ${most}.`).pipe(z.array(member));
 
 const opening = z
   .object({ widthFt: between(0, 60, 'Width'), heightFt: between(0, 60, 'Height'), count: whole(1, 100, 'The count should be a whole number from 1 to 100.').default(1) })
   .transform(({ widthFt, heightFt, count }) => ({ widthM: feetToMetres(widthFt), heightM: feetToMetres(heightFt), count }));
 
-const wall = z
+export const wall = z
   .object({ widthFt: between(0.1, 400, 'Width'), heightFt: between(0.1, 100, 'Height'), gableHeightFt: between(0, 60, 'Gable height').default(0), openings: list(opening, 100, 'Openings').default([]) })
   .transform(({ widthFt, heightFt, gableHeightFt, openings }, ctx) => {
     const solid = { widthM: feetToMetres(widthFt), heightM: feetToMetres(heightFt), gableHeightM: feetToMetres(gableHeightFt) };
