@@ -27,6 +27,8 @@ export type StainCalculatorProps = {
   start: FormValues;
   /** The estimate of `start`, made on the server. */
   first?: StainAnswer | undefined;
+  /** Told of every new estimate. */
+  onAnswer?: ((answer: StainAnswer | undefined) => void) | undefined;
 };
 
 /** Where the keyboard goes on after a row was added or removed. */
@@ -39,15 +41,16 @@ function focusAfter(edit: string, values: FormValues): string {
 }
 
 /** How much stain to buy. Answers while one types; without scripts the form is sent and answered by the page. */
-export function StainCalculator({ walls, start, first }: StainCalculatorProps) {
+export function StainCalculator({ walls, start, first, onAnswer }: StainCalculatorProps) {
   const form = useRef<HTMLFormElement>(null);
   const focus = useRef<string | null>(null);
   const [values, setValues] = useState<FormValues>(start);
   const reading = readCalculator(values);
   const [left, setLeft] = useState<ReadonlySet<string>>(() => new Set(Object.keys(reading.missing)));
-  const { answer, failure, waiting, retry } = useEstimate(reading.body, first);
+  const { answer, failure, waiting, retry } = useEstimate<StainAnswer>('stain', reading.body, first);
   const units: UnitSystem = values.units === 'metric' ? 'metric' : 'us';
 
+  useEffect(() => onAnswer?.(answer), [answer, onAnswer]);
   useEffect(() => {
     if (focus.current) form.current?.querySelector<HTMLElement>(focus.current)?.focus();
     focus.current = null;

@@ -2,20 +2,18 @@
 
 import { useEffect, useState } from 'react';
 import useSWR from 'swr';
-import { type EstimateBody } from '@/lib/schemas/estimate';
-import { type StainAnswer } from '@/lib/takeoff/estimate';
 
 /** A moment after the last keystroke, ms. */
 const pause = 250;
 
-async function ask(body: string): Promise<StainAnswer> {
-  const response = await fetch('/api/estimates/stain', { method: 'POST', headers: { 'content-type': 'application/json' }, body });
+async function ask<A>(kind: string, body: string): Promise<A> {
+  const response = await fetch(`/api/estimates/${kind}`, { method: 'POST', headers: { 'content-type': 'application/json' }, body });
   if (!response.ok) throw new Error('The estimate could not be made just now.');
-  return (await response.json()) as StainAnswer;
+  return (await response.json()) as A;
 }
 
 /** Asks for an estimate a moment after the last keystroke; the one before stays until the new one is here. No body, no answer. */
-export function useEstimate(body: EstimateBody | null, first: StainAnswer | undefined) {
+export function useEstimate<A>(kind: 'stain' | 'sealant', body: object | null, first: A | undefined) {
   const wanted = body ? JSON.stringify(body) : null;
   const [start] = useState(wanted);
   const [settled, setSettled] = useState(wanted);
@@ -25,6 +23,6 @@ export function useEstimate(body: EstimateBody | null, first: StainAnswer | unde
   }, [wanted]);
   // The answer to what the page began with came with the page.
   const options = { keepPreviousData: true, revalidateOnFocus: false, revalidateIfStale: false, ...(settled === start && first ? { fallbackData: first } : {}) };
-  const { data, error, isLoading, mutate } = useSWR<StainAnswer, Error>(settled ? ['stain', settled] : null, ([, sent]: [string, string]) => ask(sent), options);
+  const { data, error, isLoading, mutate } = useSWR<A, Error>(settled ? [kind, settled] : null, ([, sent]: [string, string]) => ask<A>(kind, sent), options);
   return { answer: wanted ? data : undefined, failure: error?.message, waiting: isLoading || settled !== wanted, retry: () => void mutate() };
 }

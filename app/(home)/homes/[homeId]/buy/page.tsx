@@ -2,13 +2,14 @@ import { type Metadata } from 'next';
 import { pageHome } from '@/app/_server/page-data';
 import { WorkCautions } from '@/components/home/work-cautions';
 import { When } from '@/components/plan/when';
-import { StainCalculator } from '@/components/takeoff/stain-calculator';
+import { Buying } from '@/components/takeoff/buying';
 import { Course } from '@/components/ui/course';
 import { EmptyState } from '@/components/ui/empty-state';
 import { PageHead } from '@/components/ui/page-head';
 import { unitsOf } from '@/db/queries/units';
 import { dayIn } from '@/lib/calendar';
 import { buyingStart } from '@/lib/home/buying';
+import { caulkStart } from '@/lib/home/caulk-start';
 import { workGroups, workWords } from '@/lib/home/next-work';
 import { answerForm } from '@/lib/takeoff/form-answer';
 import { areaText } from '@/lib/units';
@@ -23,11 +24,14 @@ export default async function BuyPage({ params, searchParams }: Props) {
   const units = unitsOf(actor);
   const rows = walls.map(({ wall }) => wall);
   const today = dayIn(home.timeZone, new Date());
-  const next = workGroups(walls.flatMap(({ items }) => items), rows, today).find(({ kind }) => kind === 'restain');
-  const { areas, start } = buyingStart(home, walls, next?.walls.map(({ id }) => id) ?? [], units, await searchParams);
+  const groups = workGroups(walls.flatMap(({ items }) => items), rows, today);
+  const next = groups.find(({ kind }) => kind === 'restain');
+  const toCaulk = groups.find(({ kind }) => kind === 'recaulk')?.walls.map(({ id }) => id) ?? [];
+  const sent = await searchParams;
+  const { areas, start } = buyingStart(home, walls, next?.walls.map(({ id }) => id) ?? [], units, sent);
   return (
     <main id="main">
-      <PageHead title="What to buy" lead="Stain for the walls you choose, and the cheapest cans that hold it." path={[{ href: '/homes', label: 'Homes' }, { href: `/homes/${home.id}`, label: home.name }]} />
+      <PageHead title="What to buy" lead="Stain, caulk and backer rod for the walls you choose, in the cheapest containers that hold them." path={[{ href: '/homes', label: 'Homes' }, { href: `/homes/${home.id}`, label: home.name }]} />
       {next ? (
         <Course heading="Next restain">
           <p className="text-lg">
@@ -38,15 +42,15 @@ export default async function BuyPage({ params, searchParams }: Props) {
           </p>
         </Course>
       ) : null}
-      <Course as="div">
-        {areas.length === 0 ? (
+      {areas.length === 0 ? (
+        <Course as="div">
           <EmptyState title="No walls to measure yet" action={{ href: `/homes/${home.id}/walls/new`, label: 'Add a wall' }}>
             <p>The amount follows from the size of the walls, their siding and their surface.</p>
           </EmptyState>
-        ) : (
-          <StainCalculator walls={areas.map((area) => ({ ...area, areaText: areaText(area.areaM2, units) }))} start={start} first={answerForm(start)} />
-        )}
-      </Course>
+        </Course>
+      ) : (
+        <Buying stain={{ walls: areas.map((area) => ({ ...area, areaText: areaText(area.areaM2, units) })), start, first: answerForm(start) }} caulk={caulkStart(home, walls, toCaulk, units, sent)} />
+      )}
       <Course heading="Before you open a can">
         <WorkCautions facts={{ kinds: ['restain'], yearBuilt: home.yearBuilt, stainBases: rows.map((wall) => wall.stainBase) }} />
       </Course>
