@@ -1,3 +1,4 @@
+import { CaulkFigures } from '@/components/jobs/caulk-figures';
 import { StainFigures } from '@/components/jobs/stain-figures';
 import { WallJob } from '@/components/jobs/wall-job';
 import { When } from '@/components/plan/when';
@@ -19,7 +20,7 @@ function logAddress({ home, rows }: JobVisit): string {
 
 /** One trip to one home: one row a wall, in plan order, and what stain it takes. */
 export function VisitCourse({ visit, owner, units }: VisitCourseProps) {
-  const { home, rows, opensOn, closesOn, today, stain } = visit;
+  const { home, rows, opensOn, closesOn, today, stain, caulk } = visit;
   const late = rows.every(({ works }) => works.every(({ state }) => state === 'overdue'));
   return (
     <Course
@@ -50,7 +51,10 @@ export function VisitCourse({ visit, owner, units }: VisitCourseProps) {
           <WallJob key={row.wallId} row={row} visit={visit} units={units} />
         ))}
       </ul>
-      <div className="border-t-2 border-lichen pt-3">{stain ? <StainFigures stain={stain} units={units} /> : <p className="text-quiet">No stain: caulk only.</p>}</div>
+      <div className="grid gap-3 border-t-2 border-lichen pt-3">
+        {stain ? <StainFigures stain={stain} units={units} /> : null}
+        {caulk ? <CaulkFigures caulk={caulk} units={units} /> : null}
+      </div>
       <p className="no-print mt-4 flex flex-wrap gap-3">
         <LinkButton href={logAddress(visit)}>Log work here</LinkButton>
         <LinkButton href={`/work/${home.id}`} look="quiet">

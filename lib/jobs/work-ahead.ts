@@ -1,9 +1,11 @@
 import { visitsOf, workState } from '@/lib/care';
 import { type WorkItem, type WorkState } from '@/lib/care/types';
 import { type CalendarDay, dayIn, yearOf } from '@/lib/calendar';
+import { caulkForHome } from '@/lib/jobs/caulk-for-home';
 import { type Texture, type UnitSystem } from '@/lib/schemas/vocabulary';
 import { profileFactor, sidingProfile, wallAreaM2 } from '@/lib/takeoff';
 import { exampleContainers } from '@/lib/takeoff/stain';
+import { type SealantAnswer } from '@/lib/takeoff/sealant-need';
 import { type StainedWall, stainForWalls, type WallsEstimate } from '@/lib/takeoff/stain-for-walls';
 import { metresToInches } from '@/lib/units';
 
@@ -18,8 +20,8 @@ export type JobWork = WorkItem & { state: WorkState };
 /** A wall in a visit, with its work in working order. */
 export type JobRow = { wallId: string; wallName: string; azimuthDeg: number; areaM2: number; texture: Texture; works: JobWork[] };
 
-/** One trip to one home: its walls in plan order, the days that suit all of it, and the stain that it takes. */
-export type JobVisit = { home: JobHome; today: CalendarDay; opensOn: CalendarDay; closesOn: CalendarDay; rows: JobRow[]; stainM2: number; stain: WallsEstimate | null };
+/** One trip to one home: its walls in plan order, the days that suit all of it, and the stain and caulk that it takes. */
+export type JobVisit = { home: JobHome; today: CalendarDay; opensOn: CalendarDay; closesOn: CalendarDay; rows: JobRow[]; stainM2: number; stain: WallsEstimate | null; caulk: SealantAnswer | null };
 
 export type JobTotals = { homes: number; works: number; stainM2: number; buyL: number };
 
@@ -65,8 +67,9 @@ function visitsTo(jobs: readonly Job[], now: Date, units: UnitSystem): JobVisit[
       const job = inPlanOrder.find(({ wall }) => wall.id === ofWall[0]?.wallId);
       return job ? [rowOf(ofWall, job)] : [];
     });
+    const caulked = inPlanOrder.filter(({ item }) => item.kind === 'recaulk' && items.includes(item)).map(({ wall, openings }) => ({ ...wall, openings }));
     const stained = rows.filter((row) => row.works.some(({ kind }) => kind === 'restain'));
-    return { home, today, opensOn, closesOn, rows, stainM2: total(stained, ({ areaM2 }) => areaM2), stain: stainForHome(home, stained, units) };
+    return { home, today, opensOn, closesOn, rows, stainM2: total(stained, ({ areaM2 }) => areaM2), stain: stainForHome(home, stained, units), caulk: caulkForHome(home, caulked, units) };
   });
 }
 
