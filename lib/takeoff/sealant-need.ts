@@ -69,8 +69,8 @@ export function sealantFigures({ joints, widthM, wasteShare, sizes }: SealantNee
   return { lengthM, widthM, depthM, lowL, highL, buyL, containers, priceCents: priceOfContainers(containers, sizes), rodDiameterM: backerRod(widthM).diameterM, rodLengthM: lengthM * (1 + wasteShare) };
 }
 
-/** The figures, each explained. */
+/** The figures, each explained; the joints by kind where they were counted from walls. */
 export function sealantAnswer(need: SealantNeed): SealantAnswer {
   const figures = sealantFigures(need);
-  return { ...figures, joints: [...need.joints], explanations: sealantExplained(need, figures) };
+  return { ...figures, joints: need.rule ? [...need.joints] : [], explanations: sealantExplained(need, figures) };
 }
