@@ -107,6 +107,7 @@ export const ownRules = [
   'When a reminder goes out: 120 days before to book, 28 days before to buy, on the opening day, and 14, 45 and 105 days after a chance has passed.',
   'A day without rain before and after the work; no stain above 90 °F (32 °C); caulk kept from frost for a night; oil stain kept above its 40 °F (4 °C) through the night.',
   'The order in which work follows the shade: by the middle of each wall’s longest time out of the sun; trees count as shade when less than half of the light passes.',
+  'Joints: boards of up to 16 ft, two log-end corners a wall, backer rod behind every joint; between two handbooks the deeper bead is bought for.',
   'Buying for the thirsty end of the published range, with a tenth for waste unless you say otherwise.',
   'The five steps of the sun-dose ramp on the house plan: 250 to 1,350 kWh/m² in equal parts.',
   'How walls are laid end to end on the house plan when measured widths leave a gap, and where doors and windows are drawn on a wall.',
