@@ -18,8 +18,8 @@ export type ShownEstimate = {
   fault: string | undefined;
   /** What does not count yet. */
   left: readonly string[];
-  /** Said while there is nothing to work out. */
-  nothing: string;
+  /** Said while there is nothing to work out; null when there is. */
+  nothing: string | null;
 };
 
 /** What to buy, beside the form on wide screens, after the walls on narrow ones. */
@@ -45,7 +45,7 @@ export function EstimateCourse({ answer, units, waiting, failure, retry, faulty,
         </FormMessage>
       ) : null}
       {answer ? <EstimateResult answer={answer} units={units} /> : null}
-      {!answer && !faulty && !failure && !waiting ? <p className="text-quiet">{nothing}</p> : null}
+      {nothing && !faulty ? <p className="text-quiet">{nothing}</p> : null}
     </section>
   );
 }

@@ -74,7 +74,8 @@ export function StainCalculator({ walls, start, first, onAnswer }: StainCalculat
   const reached = Object.entries(reading.missing).filter(([name]) => left.has(name));
   const errors = { ...Object.fromEntries(reached), ...reading.faults };
   const areas = walls?.map((wall) => ({ value: `${wall.areaM2}#${wall.id}`, label: wall.name, hint: wall.areaText }));
-  const result = { answer, units, failure, waiting, retry, faulty: Object.keys(reading.faults).length > 0, fault: reading.faults[''], left: notCounted(values, reading.missing), nothing: areas ? 'Choose a wall to see how much stain it takes.' : 'Type the width and height of a wall to see how much stain it takes.' };
+  const invitation = areas ? 'Choose a wall to see how much stain it takes.' : 'Type the width and height of a wall to see how much stain it takes.';
+  const result = { answer, units, failure, waiting, retry, faulty: Object.keys(reading.faults).length > 0, fault: reading.faults[''], left: notCounted(values, reading.missing), nothing: reading.body ? null : invitation };
   return (
     <FormContext value={{ ok: false, message: null, errors }}>
       <form ref={form} method="get" onInput={() => setValues(typed())} onBlur={onBlur} onSubmit={onSubmit} noValidate className="grid gap-x-10 gap-y-8 lg:grid-cols-[minmax(0,1fr)_minmax(0,24rem)] lg:grid-rows-[auto_1fr]">

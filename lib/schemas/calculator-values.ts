@@ -34,14 +34,16 @@ function changed(values: FormValues, path: string[], change: (group: FormValues)
 
 const without = (values: FormValues, key: string): FormValues => Object.fromEntries(Object.entries(values).filter(([one]) => one !== key));
 
+const addable = /^(walls|walls\.\d+\.openings|containers)$/;
+const droppable = /^(walls\.\d+|walls\.\d+\.openings\.\d+|containers\.\d+)$/;
+
 /** Does what a button of the form says: 'add walls', 'drop walls.1', 'to metric'. Anything else changes nothing. */
 export function editCalculator(values: FormValues, edit: string): FormValues {
   const [act, target = ''] = edit.split(' ');
   const path = target.split('.');
   if (act === 'to' && (target === 'us' || target === 'metric')) return inUnits(values, target);
-  if (!/^(walls(\.\d+(\.openings(\.\d+)?)?)?|containers(\.\d+)?)$/.test(target)) return values;
-  if (act === 'drop') return changed(values, path.slice(0, -1), (group) => without(group, path.at(-1) ?? ''));
-  if (act !== 'add') return values;
+  if (act === 'drop' && droppable.test(target)) return changed(values, path.slice(0, -1), (group) => without(group, path.at(-1) ?? ''));
+  if (act !== 'add' || !addable.test(target)) return values;
   const next = Math.max(-1, ...rowsOf(values, target).map(([key]) => Number(key))) + 1;
   return changed(values, path, (group) => ({ ...group, [next]: { width: '', height: '', size: '', price: '' } }));
 }
@@ -59,13 +61,14 @@ const exampleRows = (units: UnitSystem): FormValues =>
 
 /** Whatever was sent as the form's values: what is missing gets its usual value, what does not belong is left out. */
 export function calculatorStart(sent: FormValues, units: UnitSystem): FormValues {
-  const walls = tidied(rowsOf(sent, 'walls'), (wall) => ({ ...picked(wall, ['width', 'height', 'gable']), openings: tidied(rowsOf(wall, 'openings'), (one) => picked(one, ['width', 'height', 'count'])) }));
+  const sentWalls = rowsOf(sent, 'walls');
+  const walls = tidied(sentWalls.length > 0 ? sentWalls : [['0', {}]], (wall) => ({ ...picked(wall, ['width', 'height', 'gable']), openings: tidied(rowsOf(wall, 'openings'), (one) => picked(one, ['width', 'height', 'count'])) }));
   const containers = tidied(rowsOf(sent, 'containers'), (one) => picked(one, ['size', 'price']));
   const texts = Object.entries({ ...fields, crown: usualCrown[units] }).map(([name, usual]) => [name, typeof sent[name] === 'string' ? sent[name] : usual]);
   return {
     units,
     ...Object.fromEntries(texts),
-    walls: Object.keys(walls).length > 0 ? walls : asRows([{}]),
+    walls,
     containers: Object.keys(containers).length > 0 ? containers : exampleRows(units),
     ...(Array.isArray(sent.chosenM2) ? { chosenM2: sent.chosenM2.filter((one) => typeof one === 'string') } : {}),
   };
