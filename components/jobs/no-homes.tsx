@@ -24,7 +24,7 @@ export function NoHomes({ email, units }: { email: string; units: UnitSystem }) 
   return (
     <EmptyState title="No home is shared with you yet" example={example}>
       <p>
-        Ask an owner to share their home with <strong className="break-all">{email}</strong>: they open the home, choose Share, and type that address.
+        Ask an owner to share their home with <strong>{email}</strong>: they open the home, choose Share, and type that address.
       </p>
       <p>From then on its coming restains and recaulks stand here by season, each wall with its area and its stain.</p>
     </EmptyState>

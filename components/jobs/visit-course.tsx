@@ -18,7 +18,7 @@ function logAddress({ home, rows }: JobVisit): string {
   return `/work/${home.id}/log?${new URLSearchParams([['kind', kind], ...walls])}`;
 }
 
-/** One trip to one home: one row a wall, in plan order, and what stain it takes. */
+/** One trip to one home: one row a wall, in plan order, and what it takes. */
 export function VisitCourse({ visit, owner, units }: VisitCourseProps) {
   const { home, rows, opensOn, closesOn, today, stain, caulk } = visit;
   const late = rows.every(({ works }) => works.every(({ state }) => state === 'overdue'));
@@ -34,7 +34,7 @@ export function VisitCourse({ visit, owner, units }: VisitCourseProps) {
             <p>
               {owner.name ?? 'Owner'}
               <br />
-              <a className="link inline-flex min-h-11 items-center break-all" href={`mailto:${owner.email}?subject=${encodeURIComponent(home.name)}`}>
+              <a className="link inline-flex min-h-11 items-center" href={`mailto:${owner.email}?subject=${encodeURIComponent(home.name)}`}>
                 {owner.email}
               </a>
             </p>
@@ -56,7 +56,9 @@ export function VisitCourse({ visit, owner, units }: VisitCourseProps) {
         {caulk ? <CaulkFigures caulk={caulk} units={units} /> : null}
       </div>
       <p className="no-print mt-4 flex flex-wrap gap-3">
-        <LinkButton href={logAddress(visit)}>Log work here</LinkButton>
+        <LinkButton href={logAddress(visit)} look={late || opensOn <= today ? 'primary' : 'quiet'}>
+          Log work here
+        </LinkButton>
         <LinkButton href={`/work/${home.id}`} look="quiet">
           The home
         </LinkButton>

@@ -38,11 +38,11 @@ export function Figure({ explanation, value, label, because, size = 'line' }: Fi
           {explanation.figure} = {explanation.formula}
         </p>
         {explanation.inputs.length > 0 ? (
-          <dl className="mt-3 grid grid-cols-[minmax(0,1fr)_auto] gap-x-4 gap-y-1">
+          <dl className="mt-3 grid grid-cols-[fit-content(50%)_minmax(0,1fr)] gap-x-4 gap-y-1">
             {explanation.inputs.map((input) => (
               <div key={input.label} className="col-span-2 grid grid-cols-subgrid border-t border-line pt-1">
                 <dt>{input.label}</dt>
-                <dd className="text-right font-semibold tabular-nums">{input.value}</dd>
+                <dd className="text-right font-semibold wrap-anywhere tabular-nums">{input.value}</dd>
               </div>
             ))}
           </dl>

@@ -7,6 +7,9 @@ const names: Record<string, string> = { '0.25': '1 qt', '1': '1 gal', '5': '5 ga
 /** A container by its size: '1 qt', '5 gal', '3.8 L'. */
 export const containerText = (gal: number, units: UnitSystem): string => (units === 'us' ? names[String(gal)] : undefined) ?? volumeText(gal * litresPerGallon, units);
 
-/** '1 × 5 gal and 2 × 1 gal' in the reader's units. */
-export const containersText = (containers: readonly ContainerCount[], units: UnitSystem): string =>
-  containers.length === 0 ? 'nothing' : containers.map(({ gal, count }) => `${count} × ${containerText(gal, units)}`).join(' and ');
+/** '5 × 5 gal, 3 × 1 gal and 2 × 1 qt' in the reader's units. */
+export function containersText(containers: readonly ContainerCount[], units: UnitSystem): string {
+  const parts = containers.map(({ gal, count }) => `${count} × ${containerText(gal, units)}`);
+  const last = parts.pop() ?? 'nothing';
+  return parts.length > 0 ? `${parts.join(', ')} and ${last}` : last;
+}
