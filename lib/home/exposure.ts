@@ -1,6 +1,6 @@
 import { shadeHorizon } from '@/lib/home/shade';
 import { type Shade } from '@/lib/schemas/vocabulary';
-import { directSunHoursOn, type Place, sunDose, type SunPath, sunPath } from '@/lib/sun';
+import { directSunHoursOn, leafOnMonths, type Place, sunDose, type SunPath, sunPath } from '@/lib/sun';
 
 export type ExposedWall = { azimuthDeg: number; heightM: number; eaveDepthM: number; eaveDropM: number; shade: Shade; shadeHeightDeg: number };
 
@@ -12,13 +12,10 @@ export type SunSite = { place: Place; ghiKwhM2Day: number[]; leafOnMonths: boole
 /** Sun hours are counted in this year; another differs by less than two hours. Our rule. */
 const countedYear = 2026;
 
-/** Trees carry leaves in months with a mean of at least this, °C. Our rule. */
-const leafC = 10;
-
 export const sunSite = (place: Place, climate: { meanC: number[]; ghiKwhM2Day: number[] }): SunSite => ({
   place,
   ghiKwhM2Day: climate.ghiKwhM2Day,
-  leafOnMonths: climate.meanC.map((celsius) => celsius >= leafC),
+  leafOnMonths: leafOnMonths(place.latitude, climate.meanC),
 });
 
 /** The year's sun positions at a home; about a hundred milliseconds, so made once for all of its walls. */
@@ -42,7 +39,7 @@ export function exposureOf(wall: ExposedWall, site: SunSite, path: SunPath): Exp
 /** Everything that a wall's exposure depends on, as text: equal text, equal exposure. Raise the edition when the method changes. */
 export const exposureInputs = (wall: ExposedWall, site: SunSite, stationId: string): string =>
   JSON.stringify({
-    edition: 1,
+    edition: 2,
     at: [site.place.latitude, site.place.longitude],
     stationId,
     leaves: site.leafOnMonths.map(Number).join(''),

@@ -1,3 +1,4 @@
+import { leafOnMonths } from './leaf-months';
 import { type Place, sunPosition } from './position';
 import { directShare, eaveOf, sunlitShare, type WallFace } from './wall-face';
 
@@ -5,6 +6,7 @@ export type SunHours = { annual: number; monthly: number[] };
 
 /** Every daylight sample of one year at one place; the walls of a home share it. Angles in degrees; the rest saves trigonometry. */
 export type SunPath = {
+  latitude: number;
   hoursPerSample: number;
   month: Uint8Array;
   azimuthDeg: Float64Array;
@@ -44,14 +46,15 @@ export function sunPath(place: Place, year: number): SunPath {
     lit += 1;
   }
   const cut = (values: Float64Array) => values.subarray(0, lit);
-  return { hoursPerSample: stepMinutes / 60, month: month.subarray(0, lit), azimuthDeg: cut(azimuthDeg), elevationDeg: cut(elevationDeg), cosAzimuth: cut(cosAzimuth), sinAzimuth: cut(sinAzimuth), tanElevation: cut(tanElevation) };
+  return { latitude: place.latitude, hoursPerSample: stepMinutes / 60, month: month.subarray(0, lit), azimuthDeg: cut(azimuthDeg), elevationDeg: cut(elevationDeg), cosAzimuth: cut(cosAzimuth), sinAzimuth: cut(sinAzimuth), tanElevation: cut(tanElevation) };
 }
 
 /**
  * Hours in a year with the sun above a flat horizon and in front of the wall, weighted by the sunlit share under an eave
  * and by what passes the horizon's obstructions. cos(incidence) = cos(elevation)·cos(azimuth difference) > 0.
+ * @param leafOn the twelve months in which trees carry leaves; by latitude unless said
  */
-export function directSunHoursOn(path: SunPath, wall: WallFace, leafOnMonths: boolean[] = []): SunHours {
+export function directSunHoursOn(path: SunPath, wall: WallFace, leafOn: readonly boolean[] = leafOnMonths(path.latitude)): SunHours {
   const monthly = new Float64Array(12);
   const eave = eaveOf(wall);
   const cosWall = Math.cos(wall.azimuthDeg * radians);
@@ -62,7 +65,7 @@ export function directSunHoursOn(path: SunPath, wall: WallFace, leafOnMonths: bo
     if (inFront <= 0) continue;
     const month = path.month[k] as number;
     const lit = sunlitShare(eave, (path.tanElevation[k] as number) / inFront);
-    const passed = obstructed ? directShare(wall.horizon, leafOnMonths[month] ?? true, path.azimuthDeg[k] as number, path.elevationDeg[k] as number) : 1;
+    const passed = obstructed ? directShare(wall.horizon, leafOn[month] ?? true, path.azimuthDeg[k] as number, path.elevationDeg[k] as number) : 1;
     monthly[month] = (monthly[month] as number) + lit * passed * path.hoursPerSample;
   }
   return { annual: monthly.reduce((sum, hours) => sum + hours, 0), monthly: [...monthly] };

@@ -1,11 +1,13 @@
+import { leafOnMonths } from './leaf-months';
 import { type Place } from './position';
+import { skyOverHorizon } from './sky-view';
 import { directShare, eaveOf, skyShare, sunlitShare, type WallFace } from './wall-face';
 
 export type Dose = { annual: number; monthly: number[] };
 export type DoseOptions = {
   /** Of the ground, 0–1: one value or twelve. Default 0.2; snow about 0.6. */
   albedo?: number | number[] | undefined;
-  /** In which months trees carry leaves; needed only with a horizon of trees. */
+  /** In which months trees carry leaves; by latitude unless said. Counts only with a horizon of trees. */
   leafOnMonths?: boolean[] | undefined;
 };
 
@@ -59,7 +61,7 @@ function onMeanDay(day: Day, wall: WallFace, albedo: number, leafOn: boolean): n
   const diffuseDay = horizontal * diffuseShare(horizontal / day.h0, day.ws);
   const anisotropy = clamp((horizontal - diffuseDay) / day.h0, 0, 1);
   const eave = eaveOf(wall);
-  const sky = 0.5 * skyShare(eave) * skyPassed(wall, leafOn);
+  const sky = 0.5 * skyShare(eave) * skyOverHorizon(wall, leafOn);
   let onWall = 0.5 * albedo * horizontal;
   for (const { hourAngle, total, diffuse } of dayShape(day.ws)) {
     const up = Math.sin(latitude) * Math.sin(dec) + Math.cos(latitude) * Math.cos(dec) * Math.cos(hourAngle);
@@ -75,17 +77,6 @@ function onMeanDay(day: Day, wall: WallFace, albedo: number, leafOn: boolean): n
   return onWall;
 }
 
-/** Share of the wall's half of the sky that stays open behind obstructions: a horizon of elevation e over a share of the half circle hides sin²(e)… of it. Our rule. */
-function skyPassed(wall: WallFace, leafOn: boolean): number {
-  let hidden = 0;
-  for (const one of wall.horizon ?? []) {
-    const span = (((one.toAzimuthDeg - one.fromAzimuthDeg) % 360) + 360) % 360 || 360;
-    const opaque = 1 - (leafOn ? one.transmittanceLeafOn : one.transmittanceLeafOff);
-    hidden += opaque * Math.min(1, span / 180) * Math.sin(one.elevationDeg * radians);
-  }
-  return clamp(1 - hidden, 0, 1);
-}
-
 /**
  * Solar energy that a vertical wall receives in a mean year, kWh/m².
  * Method: monthly mean days, Erbs diffuse share, Collares-Pereira–Rabl and Liu–Jordan hourly shapes, Hay & Davies (1980) sky, overhang on beam and sky.
@@ -95,6 +86,7 @@ function skyPassed(wall: WallFace, leafOn: boolean): number {
 export function sunDose(place: Place, wall: WallFace, ghiKwhM2Day: number[], options: DoseOptions = {}): Dose {
   if (ghiKwhM2Day.length !== 12 || ghiKwhM2Day.some((value) => !(value >= 0))) throw new RangeError('twelve monthly values of radiation are needed');
   const latitude = place.latitude * radians;
+  const leafOn = options.leafOnMonths ?? leafOnMonths(place.latitude);
   const monthly = ghiKwhM2Day.map((horizontal, month) => {
     const dayOfYear = meanDay[month] ?? 1;
     const dec = declination(dayOfYear);
@@ -102,7 +94,7 @@ export function sunDose(place: Place, wall: WallFace, ghiKwhM2Day: number[], opt
     const h0 = extraterrestrial(latitude, dec, ws, dayOfYear);
     if (h0 < 0.01 || horizontal === 0) return 0;
     const albedo = Array.isArray(options.albedo) ? (options.albedo[month] ?? 0.2) : (options.albedo ?? 0.2);
-    return (daysInMonth[month] ?? 30) * onMeanDay({ latitude, dec, ws, h0, horizontal }, wall, albedo, options.leafOnMonths?.[month] ?? true);
+    return (daysInMonth[month] ?? 30) * onMeanDay({ latitude, dec, ws, h0, horizontal }, wall, albedo, leafOn[month] ?? true);
   });
   return { annual: monthly.reduce((sum, value) => sum + value, 0), monthly };
 }
