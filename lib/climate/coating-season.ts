@@ -19,6 +19,8 @@ const marginalBelowC = 5;
 const warmDayAboveC = 8;
 /** Chance of three dry days in a row, with wet days independent: (1 − wet days/days)³. At least 15 % is good, at least 7 % marginal. Our rule. */
 const dryChance = { good: 0.15, marginal: 0.07 };
+/** Days over this bring a caution, not a worse rating: no coat goes on a surface hot in the sun (Wood Handbook, p. 16-23); the figure is our rule. */
+const hotDayC = 32;
 
 const days = [31, 28.25, 31, 30, 31, 30, 31, 31, 30, 31, 30, 31] as const;
 const percent = (share: number) => `${Math.round(share * 100)} %`;
@@ -32,8 +34,9 @@ function rateMonth(climate: Climate, index: number, limitC: number): CoatingMont
   const byRain: MonthRating = threeDryDays >= dryChance.good ? 'good' : threeDryDays >= dryChance.marginal ? 'marginal' : 'no';
   const rating: MonthRating = byNight === 'no' || byRain === 'no' ? 'no' : byNight === 'marginal' || byRain === 'marginal' ? 'marginal' : 'good';
   const night = `nights fall to ${both(nightLowC)}${byNight === 'good' ? '' : `, under the ${both(limitC)} that the coat needs`}`;
-  const rain = `${percent(threeDryDays)} chance of three dry days in a row`;
-  return { month: index + 1, rating, reason: `${monthNames[index]}: ${night}; ${rain}.`, threeDryDays, nightLowC, dayHighC };
+  const rain = `${byRain === 'good' ? '' : 'only '}${percent(threeDryDays)} chance of three dry days in a row`;
+  const heat = dayHighC > hotDayC ? `; days reach ${both(dayHighC)}: start early and keep to the shade` : '';
+  return { month: index + 1, rating, reason: `${monthNames[index]}: ${night}; ${rain}${heat}.`, threeDryDays, nightLowC, dayHighC };
 }
 
 /** Runs of months of one rating, joined across the turn of the year. */

@@ -1,4 +1,4 @@
-import rows from './data/stations.json';
+import table from './data/stations.json';
 
 /**
  * Climate stations. Sources: NOAA NCEI U.S. Climate Normals 2006–2020 (temperature, wet days, rain); NREL TMY3 (radiation, humidity),
@@ -30,7 +30,7 @@ const toStation = ([id, name, state, latitude, longitude, elevationM, meanF, max
   id, name, state, latitude, longitude, elevationM, meanF, maxF, minF, wetDays, rainIn, ghiKwhM2Day, humidityPct, radiationFrom, radiationDistanceKm,
 });
 
-export const stations: Station[] = (rows as unknown as Row[]).map(toStation);
+export const stations: Station[] = (table.rows as unknown as Row[]).map(toStation);
 
 const byId = new Map(stations.map((station) => [station.id, station]));
 

@@ -5,8 +5,12 @@ export type ZoneGround = 'published' | 'memory';
 
 const zoneByCounty = new Map(Object.entries(countiesByZone).flatMap(([zone, counties]) => counties.split(' ').map((fips) => [fips, zone] as const)));
 
-/** Alaska's interior and northern boroughs and census areas, zone 8: from memory, medium confidence. The rest of Alaska is 7. */
-const coldAlaska = new Set(['02090', '02240', '02290', '02185', '02188', '02180', '02068', '02158', '02270']);
+/**
+ * Alaska's zone 8, its interior, west and north: Bethel, Dillingham, Fairbanks North Star, Kusilvak (Wade Hampton until 2015), Nome,
+ * North Slope, Northwest Arctic, Southeast Fairbanks, Yukon-Koyukuk. IECC before 2021, table R301.1, from memory, high confidence.
+ * The rest of Alaska, Denali too, is 7.
+ */
+const coldAlaska = new Set(['02050', '02070', '02090', '02158', '02270', '02180', '02185', '02188', '02240', '02290']);
 
 /** Counties that the list names otherwise: Oglala Lakota, SD (46102) was Shannon County (46113). */
 const renamed: Record<string, string> = { '46102': '46113' };

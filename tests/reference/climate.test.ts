@@ -58,7 +58,7 @@ describe('IECC climate zones, US DOE / PNNL county list', () => {
     expect(zoneGround(fips)).toBe('published');
   });
 
-  test.each([['09110', '5A'], ['09190', '5A'], ['46102', climateZone('46113')], ['15001', '1A'], ['11001', '4A'], ['02020', '7'], ['02090', '8'], ['72127', undefined], ['', undefined]])(
+  test.each([['09110', '5A'], ['09190', '5A'], ['46102', climateZone('46113')], ['15001', '1A'], ['11001', '4A'], ['02020', '7'], ['02090', '8'], ['02185', '8'], ['02050', '8'], ['02068', '7'], ['72127', undefined], ['', undefined]])(
     'outside the list: %s is %s',
     (fips, zone) => expect(climateZone(fips)).toBe(zone),
   );
