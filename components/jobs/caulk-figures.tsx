@@ -6,7 +6,7 @@ import { sealantContainersText } from '@/lib/takeoff/sealant-words';
 /** Caulk: the joints to fill, the containers, and the rod behind it. */
 export function CaulkFigures({ caulk, units }: { caulk: SealantAnswer; units: UnitSystem }) {
   return (
-    <div className="grid gap-x-10 sm:grid-cols-2 xl:grid-cols-3 sm:[&>details[open]]:col-span-full">
+    <div className="grid gap-x-10 sm:grid-cols-2 sm:[&>details[open]]:col-span-full">
       <Figure explanation={caulk.explanations.length} label="Joints to caulk" />
       <Figure explanation={caulk.explanations.containers} label="Caulk" value={sealantContainersText(caulk.containers, units)} />
       <Figure explanation={caulk.explanations.rod} />

@@ -22,7 +22,7 @@ export function WallJob({ row, visit, units }: WallJobProps) {
       </div>
       <ul>
         {row.works.map((work) => (
-          <li key={work.kind} className="grid grid-cols-[7rem_minmax(0,1fr)] gap-x-3 sm:grid-cols-[8rem_minmax(0,1fr)]">
+          <li key={work.kind} className="grid grid-cols-[7rem_minmax(0,1fr)] gap-x-3 sm:grid-cols-[8rem_minmax(0,1fr)] max-sm:[&>details[open]]:col-span-full">
             <p className="flex min-h-11 items-center self-start">
               <StateMark state={work.state} />
             </p>

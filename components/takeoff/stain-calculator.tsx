@@ -78,7 +78,7 @@ export function StainCalculator({ walls, start, first, onAnswer }: StainCalculat
   const result = { answer, units, failure, waiting, retry, faulty: Object.keys(reading.faults).length > 0, fault: reading.faults[''], left: notCounted(values, reading.missing), nothing: reading.body ? null : invitation };
   return (
     <FormContext value={{ ok: false, message: null, errors }}>
-      <form ref={form} method="get" onInput={() => setValues(typed())} onBlur={onBlur} onSubmit={onSubmit} noValidate className="grid gap-x-10 gap-y-8 lg:grid-cols-[minmax(0,1fr)_minmax(0,24rem)] lg:grid-rows-[auto_1fr]">
+      <form ref={form} method="get" onInput={() => setValues(typed())} onBlur={onBlur} onSubmit={onSubmit} noValidate className="grid gap-x-10 gap-y-8 lg:grid-cols-[minmax(0,1fr)_minmax(0,24rem)] lg:grid-rows-[auto_1fr] max-lg:[&_:is(input,select,button,summary)]:scroll-mb-24">
         {/* Enter in a field sends the form with its first button. */}
         <button type="submit" hidden />
         <input type="hidden" name="units" value={units} />
