@@ -1,31 +1,30 @@
+import { countingUnit, fluidOunce } from './counting-unit';
+
 export type ContainerSize = { gal: number; priceCents: number };
 export type ContainerCount = { gal: number; count: number };
 
-/** Sizes are whole numbers of this: a fluid ounce, so that quarts and metric cans come out whole enough. */
-const fluidOunce = 1 / 128;
 /** What is searched through: 3,200 gal by fluid ounces. */
 const mostUnits = 409_600;
 const mostGal = 50_000;
 
 /**
  * The cheapest mix of containers that holds at least the need; among equally cheap ones the fewest containers, then the least left over.
- * Exact: dynamic programming over fluid ounces (1/128 gal), sizes rounded down and the need up to whole ounces. Of a need above
- * 3,200 gal the part above is filled with the size that is cheapest by the gallon, which is still exact for sizes up to 5 gal:
- * a cheapest mix exists that holds less than 640 × 640 ounces in the other sizes (any 640 of those have some among them whose
- * contents are whole containers of the cheapest). With a finer unit all of these bounds shrink by as much.
+ * Exact: dynamic programming over the largest unit of which all sizes are whole multiples (see `countingUnit`); sizes that share none are
+ * rounded down to a small one, so that the mix always holds the need. Of a need above 409,600 units (3,200 gal by the ounce) the part
+ * above is filled with the size that is cheapest by the gallon, which is still exact for sizes up to 640 units: a cheapest mix exists that
+ * holds less than 640 × 640 units in the other sizes (any 640 of those have some among them whose contents are whole containers of the cheapest).
  * @param neededGal US gallons, 0 to 50,000
  * @param sizes container sizes in US gallons (at least an ounce) with prices in cents ≥ 0
- * @param unitGal what sizes are counted in; a fluid ounce unless said
+ * @param finestGal the ounces, or parts of one, that sizes may be whole multiples of; a fluid ounce unless said
  * @returns counts above 0, largest size first; empty for no need
  * @throws RangeError for a need or size out of range, or no sizes
  */
-export function cheapestContainers(neededGal: number, sizes: readonly ContainerSize[], unitGal = fluidOunce): ContainerCount[] {
+export function cheapestContainers(neededGal: number, sizes: readonly ContainerSize[], finestGal = fluidOunce): ContainerCount[] {
   if (!(neededGal >= 0) || neededGal > mostGal) throw new RangeError('the need must be between 0 and 50,000 gallons');
   if (sizes.length === 0) throw new RangeError('at least one container size is needed');
-  const units = sizes.map(({ gal, priceCents }) => {
-    if (!(gal >= unitGal) || !(priceCents >= 0) || !Number.isFinite(gal + priceCents)) throw new RangeError('a container needs a size and a price');
-    return Math.floor(gal / unitGal + 1e-6);
-  });
+  if (sizes.some(({ gal, priceCents }) => !(gal >= finestGal) || !(priceCents >= 0) || !Number.isFinite(gal + priceCents))) throw new RangeError('a container needs a size and a price');
+  const unitGal = countingUnit(sizes.map(({ gal }) => gal), neededGal, finestGal, mostUnits);
+  const units = sizes.map(({ gal }) => Math.floor(gal / unitGal + 1e-6));
   const need = Math.ceil(neededGal / unitGal - 1e-6);
   if (need === 0) return [];
   const best = bestByContents(units, sizes);

@@ -4,13 +4,17 @@ import { cheapestContainers } from '@/lib/takeoff';
 
 type Size = { gal: number; priceCents: number };
 
-/** Every mix up to the count that one size alone would need: slow and plainly right. */
-function bruteForce(need: number, sizes: Size[]): number {
+type Mix = { cost: number; count: number; held: number };
+const better = (a: Mix, b: Mix) => a.cost < b.cost || (a.cost === b.cost && (a.count < b.count || (a.count === b.count && a.held < b.held - 1e-9)));
+
+/** Every mix up to the count that one size alone would need: slow and plainly right. Cheapest, then fewest, then least left over. */
+function bruteForce(need: number, sizes: Size[], so: Mix = { cost: 0, count: 0, held: 0 }): Mix {
   const [size, ...rest] = sizes;
-  if (!size) return need <= 1e-9 ? 0 : Infinity;
-  let best = Infinity;
-  for (let count = 0; count <= Math.ceil(need / size.gal - 1e-9) || count === 0; count += 1) {
-    best = Math.min(best, count * size.priceCents + bruteForce(Math.max(0, need - count * size.gal), rest));
+  if (!size) return so.held >= need - 1e-9 ? so : { cost: Infinity, count: 0, held: 0 };
+  let best: Mix = { cost: Infinity, count: 0, held: 0 };
+  for (let n = 0; n === 0 || so.held + (n - 1) * size.gal < need - 1e-9; n += 1) {
+    const mix = bruteForce(need, rest, { cost: so.cost + n * size.priceCents, count: so.count + n, held: so.held + n * size.gal });
+    if (better(mix, best)) best = mix;
   }
   return best;
 }
@@ -20,14 +24,65 @@ const need = fc.integer({ min: 0, max: 80 }).map((quarters) => quarters / 4);
 const priceOf = (mix: { gal: number; count: number }[], of: Size[]) => mix.reduce((sum, { gal, count }) => sum + count * (of.find((size) => size.gal === gal)?.priceCents ?? NaN), 0);
 
 describe('cheapestContainers', () => {
-  test('covers the need at the price that trying every mix finds', () => {
+  const asMix = (mix: { gal: number; count: number }[], offered: Size[]): Mix => ({ cost: priceOf(mix, offered), count: mix.reduce((sum, { count }) => sum + count, 0), held: mix.reduce((sum, { gal, count }) => sum + gal * count, 0) });
+
+  test('is the mix that trying every one finds: cheapest, then fewest, then least left over', () => {
     fc.assert(
       fc.property(need, sizes, (gallons, offered) => {
-        const mix = cheapestContainers(gallons, offered);
-        expect(mix.reduce((sum, { gal, count }) => sum + gal * count, 0)).toBeGreaterThanOrEqual(gallons - 1e-9);
-        expect(priceOf(mix, offered)).toBe(bruteForce(gallons, offered));
+        const [ours, truth] = [asMix(cheapestContainers(gallons, offered), offered), bruteForce(gallons, offered)];
+        expect(ours.held).toBeGreaterThanOrEqual(gallons - 1e-9);
+        expect([ours.cost, ours.count]).toEqual([truth.cost, truth.count]);
+        expect(ours.held).toBeCloseTo(truth.held, 9);
       }),
       { numRuns: 300 },
+    );
+  });
+
+  test('the same at few prices, where much is equally cheap', () => {
+    const few = fc.uniqueArray(fc.record({ gal: fc.constantFrom(0.25, 0.5, 1, 2, 5), priceCents: fc.constantFrom(250, 500, 1000, 2000, 5000) }), { minLength: 1, maxLength: 4, selector: ({ gal }) => gal });
+    fc.assert(
+      fc.property(need, few, (gallons, offered) => {
+        const [ours, truth] = [asMix(cheapestContainers(gallons, offered), offered), bruteForce(gallons, offered)];
+        expect([ours.cost, ours.count]).toEqual([truth.cost, truth.count]);
+        expect(ours.held).toBeCloseTo(truth.held, 9);
+      }),
+      { numRuns: 300 },
+    );
+  });
+
+  test('metric cans, and cans in thousandths of a gallon, at any need, full ones included', () => {
+    const metric = fc.constantFrom(0.375, 0.75, 1, 2.5, 5, 10).map((litres) => litres / 3.785411784);
+    const typed = fc.constantFrom(0.198, 0.264, 0.66, 1.32, 2.5);
+    const offer = (gal: fc.Arbitrary<number>) => fc.uniqueArray(fc.record({ gal, priceCents: fc.integer({ min: 1, max: 20000 }) }), { minLength: 1, maxLength: 3, selector: (size) => size.gal });
+    const wanted = fc.integer({ min: 0, max: 8000 }).map((thousandths) => thousandths / 1000 + 1e-4);
+    fc.assert(
+      fc.property(fc.oneof(offer(metric), offer(typed)), wanted, fc.boolean(), (offered, amount, full) => {
+        const gallons = full ? Math.ceil(amount) * (offered[0]?.gal ?? 1) : amount;
+        const [ours, truth] = [asMix(cheapestContainers(gallons, offered), offered), bruteForce(gallons, offered)];
+        expect(ours.held).toBeGreaterThanOrEqual(gallons - 1e-6);
+        expect([ours.cost, ours.count]).toEqual([truth.cost, truth.count]);
+      }),
+      { numRuns: 200 },
+    );
+  });
+
+  test('one can of 0.75 L holds 0.75 L', () => {
+    const can = 0.75 / 3.785411784;
+    expect(cheapestContainers(can, [{ gal: can, priceCents: 2000 }, { gal: 2.5 / 3.785411784, priceCents: 5000 }])).toEqual([{ gal: can, count: 1 }]);
+  });
+
+  test('sizes that share no unit still hold the need, at most one part of the finest unit too careful', () => {
+    const cartridge = 10.1 / 128;
+    const sausage = 0.6 / 3.785411784;
+    fc.assert(
+      fc.property(fc.integer({ min: 0, max: 3000 }).map((n) => n / 1000), fc.integer({ min: 1, max: 3000 }), fc.integer({ min: 1, max: 3000 }), (gallons, a, b) => {
+        const offered = [{ gal: cartridge, priceCents: a }, { gal: sausage, priceCents: b }];
+        const ours = asMix(cheapestContainers(gallons, offered, 1 / 1280), offered);
+        expect(ours.held).toBeGreaterThanOrEqual(gallons - 1e-6);
+        expect(ours.cost).toBeGreaterThanOrEqual(bruteForce(gallons, offered).cost);
+        expect(ours.cost).toBeLessThanOrEqual(bruteForce(gallons + 40 / 1280 / 64, offered).cost);
+      }),
+      { numRuns: 100 },
     );
   });
 
