@@ -4,10 +4,33 @@ import { readCsv } from '../fixtures/csv';
 
 /**
  * Against hour-by-hour Perez on NREL TMY3 (pvlib), albedo 0.2. Annual: E, S, W within 8 %, N within 12 %.
- * By month, in % of the wall's mean month: at least four months in five within 10 %, none beyond 32 %.
- * Reason: monthly means cannot know that a place's afternoons are cloudier than its mornings (Golden and Bozeman, summer, E and W)
- * nor how clear the few sunny hours of a northern winter are (Duluth, January, S: +31 %).
+ * By month within 10 % of the wall's mean month, but for the months named in `astray` (55 of 336), and those within 32 %.
+ * Reason: monthly means cannot know that a place's afternoons are cloudier than its mornings (Golden and Bozeman, summer, E and W),
+ * nor that skies are more diffuse than their clearness says (by Erbs two thirds of the hours' diffuse light in Duluth's winter, four
+ * fifths in Miami's fall, which darkens north walls); at clear high places one anisotropy a day takes too much from the sky of a north
+ * wall. A separate program of the same formulas gives the same months within 0.1 % of the mean month, so the misses are the method's.
  */
+const astray: Record<string, number[]> = {
+  'asheville/0': [6],
+  'bozeman/0': [2, 3, 4, 8, 9, 10],
+  'bozeman/90': [7],
+  'bozeman/180': [3],
+  'bozeman/270': [2, 3, 6, 7, 12],
+  'duluth/0': [1, 2, 3, 4, 11],
+  'duluth/90': [8],
+  'duluth/180': [1, 2, 11, 12],
+  'golden/0': [3, 4, 9, 11],
+  'golden/90': [5, 6, 7, 8],
+  'golden/270': [6, 7, 8],
+  'greensboro/0': [1, 3, 6, 10],
+  'greensboro/180': [1],
+  'greensboro/270': [6],
+  'miami/0': [1, 3, 9, 10, 11, 12],
+  'miami/270': [6, 7],
+  'tallahassee/0': [4, 6, 9, 10, 11],
+  'tallahassee/270': [6],
+};
+
 type Site = { place: string; latitude: number; longitude: number; ghi: number[]; suspect: boolean };
 
 const sites = new Map<string, Site>();
@@ -49,9 +72,12 @@ describe('sun dose of a vertical wall', () => {
     expect(Math.abs(dose(of(180)).annual / dose(of(0)).annual / truth - 1)).toBeLessThan(1 / 6);
   });
 
-  test('the months', () => {
-    const errors = checked.flatMap(monthErrors).map(Math.abs);
-    expect(errors.filter((error) => error <= 0.1).length / errors.length).toBeGreaterThan(0.8);
-    expect(Math.max(...errors)).toBeLessThan(0.32);
+  test.each(checked.map((wall) => [wall.site.place, wall.azimuthDeg, wall] as const))('%s, wall %d°: its months', (place, azimuthDeg, wall) => {
+    const known = astray[`${place}/${azimuthDeg}`] ?? [];
+    monthErrors(wall).forEach((error, month) => {
+      expect({ month: month + 1, far: Math.abs(error) > (known.includes(month + 1) ? 0.32 : 0.1) }).toEqual({ month: month + 1, far: false });
+    });
   });
+
+  test('at most one month in six is astray', () => expect(Object.values(astray).flat().length / (12 * checked.length)).toBeLessThan(1 / 6));
 });
