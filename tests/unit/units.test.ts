@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { parseLength } from '@/lib/schemas/measures';
-import { areaText, celsiusToFahrenheit, fahrenheitToCelsius, feetToMetres, gallonsToLitres, lengthField, lengthText, litresToGallons, metresToFeet, volumeText } from '@/lib/units';
+import { areaText, celsiusToFahrenheit, distanceText, fahrenheitToCelsius, feetToMetres, ft2ToM2, gallonsToLitres, inchesToMetres, lengthField, lengthText, litresToGallons, m2ToFt2, metresToFeet, metresToInches, smallLengthText, temperatureText, volumeText } from '@/lib/units';
 
 describe('units (NIST Handbook 44, appendix C)', () => {
   test('exact factors', () => {
@@ -18,6 +18,24 @@ describe('units (NIST Handbook 44, appendix C)', () => {
     expect(lengthText(9.144, 'metric')).toBe('9.14 m');
     expect(areaText(234 * 0.09290304, 'us')).toBe('234 ft²');
     expect(volumeText(gallonsToLitres(4.96), 'us')).toBe('5 gal');
+    expect(areaText(21.739, 'metric')).toBe('21.7 m²');
+    expect(volumeText(18.776, 'metric')).toBe('18.8 L');
+    expect(temperatureText(10, 'us')).toBe('50 °F');
+    expect(temperatureText(4.4, 'metric')).toBe('4 °C');
+    expect(smallLengthText(0.4572, 'us')).toBe('18 in');
+    expect(smallLengthText(0.4572, 'metric')).toBe('45.7 cm');
+    expect(distanceText(16.09344, 'us')).toBe('10 mi');
+    expect(distanceText(12.4, 'metric')).toBe('12 km');
+  });
+
+  test('there and back is where it started', () => {
+    fc.assert(
+      fc.property(fc.double({ min: -1e6, max: 1e6, noNaN: true }), (value) => {
+        expect(metresToInches(inchesToMetres(value))).toBeCloseTo(value, 6);
+        expect(m2ToFt2(ft2ToM2(value))).toBeCloseTo(value, 6);
+        expect(fahrenheitToCelsius(celsiusToFahrenheit(value))).toBeCloseTo(value, 6);
+      }),
+    );
   });
 });
 
