@@ -3,6 +3,14 @@
 /** Where a step's authority comes from. 'published' was read in the source; 'memory' was not; 'our rule' is our own judgement. */
 export type Ground = 'published' | 'memory' | 'common practice' | 'our rule';
 
+/** A ground as a reader sees it. */
+export const groundWords: Record<Ground, string> = {
+  published: 'published',
+  memory: 'from memory, not read again',
+  'common practice': 'common practice, no source',
+  'our rule': 'our rule',
+};
+
 export type Source = {
   /** Author, title, edition and table, equation or page. */
   text: string;

@@ -1,16 +1,9 @@
 import { StateShape } from '@/components/ui/state-shape';
 import { type Check, type Verdict } from '@/lib/day/checks';
-import { type Ground } from '@/lib/explain';
+import { groundWords } from '@/lib/explain';
 
 const shapes = { go: 'done', wait: 'put off', no: 'overdue' } as const;
 export const verdictWords: Record<Verdict, string> = { go: 'Go', wait: 'Wait', no: 'No' };
-
-const grounds: Record<Ground, string> = {
-  published: 'published',
-  memory: 'from memory, not read again',
-  'common practice': 'common practice, no source',
-  'our rule': 'our rule',
-};
 
 export const VerdictShape = ({ verdict, size }: { verdict: Verdict; size?: number }) => <StateShape state={shapes[verdict]} {...(size ? { size } : {})} />;
 
@@ -36,7 +29,7 @@ export function CheckList({ checks }: { checks: readonly Check[] }) {
             <div className="mb-3 border-l-4 border-lichen bg-inset px-4 py-3 text-sm">
               <p>Limit: {check.limit}.</p>
               <p className="mt-1 text-quiet">
-                {check.source.text} ({grounds[check.source.ground]})
+                {check.source.text} ({groundWords[check.source.ground]})
               </p>
             </div>
           </details>

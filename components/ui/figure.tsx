@@ -1,12 +1,5 @@
 import { type ReactNode } from 'react';
-import { type Explanation, type Ground } from '@/lib/explain';
-
-const grounds: Record<Ground, string> = {
-  published: 'published',
-  memory: 'from memory, not read again',
-  'common practice': 'common practice, no source',
-  'our rule': 'our rule',
-};
+import { type Explanation, groundWords } from '@/lib/explain';
 
 type FigureProps = {
   explanation: Explanation;
@@ -50,7 +43,7 @@ export function Figure({ explanation, value, label, because, size = 'line' }: Fi
         <ul className="mt-3 grid gap-1 text-quiet">
           {explanation.sources.map((source) => (
             <li key={source.text}>
-              {source.text} <span className="whitespace-nowrap">({grounds[source.ground]})</span>
+              {source.text} <span className="whitespace-nowrap">({groundWords[source.ground]})</span>
             </li>
           ))}
         </ul>

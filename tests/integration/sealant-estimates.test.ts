@@ -4,17 +4,14 @@ import { POST } from '@/app/api/estimates/sealant/route';
 import { type SealantAnswer } from '@/lib/takeoff/sealant-need';
 import { litresPerGallon, metresToFeet } from '@/lib/units';
 import { setEnvironment } from '@/tests/fixtures/environment';
+import { postJson } from '@/tests/fixtures/post-json';
 
 vi.mock('@/app/_server/actor', () => ({ currentActor: () => Promise.resolve(null) }));
 setEnvironment();
 
 type Problem = { status: number; title: string; errors?: Record<string, string> };
 
-async function ask(body: unknown): Promise<{ status: number; type: string | null; json: unknown }> {
-  const text = typeof body === 'string' ? body : JSON.stringify(body);
-  const response = await POST(new Request('https://eavewright.example/api/estimates/sealant', { method: 'POST', body: text }), { params: Promise.resolve({}) });
-  return { status: response.status, type: response.headers.get('content-type'), json: await response.json() };
-}
+const ask = (body: unknown) => postJson(POST, body);
 
 const wall = { widthFt: 30, heightFt: 9, openings: [{ widthFt: 3, heightFt: 4, count: 3 }] };
 
