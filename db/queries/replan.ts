@@ -2,15 +2,14 @@ import { and, eq, inArray, isNull, lte, sql } from 'drizzle-orm';
 import { type CalendarDay, dayIn } from '@/lib/calendar';
 import { planHome } from '@/lib/care';
 import { nextStageDay, stageOn } from '@/lib/care/stages';
-import { type CareHome, type WallPlan, type WorkItem } from '@/lib/care/types';
-import { type Climate, climateAt, coatingSeason, stationById } from '@/lib/climate';
-import { wallAreaM2 } from '@/lib/takeoff';
+import { type HomePlan, type WorkItem } from '@/lib/care/types';
+import { climateAt, stationById } from '@/lib/climate';
 import { database, transaction } from '../client';
-import { careRule, home, wall, wallPlan, workItem } from '../schema';
+import { home, wall, wallPlan, workItem } from '../schema';
+import { careHomeOf } from './care-home';
 import { refreshExposures } from './exposure';
 import { type HomeRow } from './homes';
-import { type WallDetail, wallsOfHome } from './walls';
-import { recordsOfHome } from './work';
+import { wallsOfHome } from './walls';
 
 /**
  * Every change to a home, its walls or its records goes through here: one transaction that makes the change, recomputes the
@@ -37,45 +36,14 @@ export function replanHome(homeId: string, now: Date): void {
     const doses = refreshExposures(row, climate, walls, now);
     const today = dayIn(row.timeZone, now);
     const plan = planHome(careHomeOf(row, climate, walls, doses), today);
-    writePlan(row, plan.walls, today, now);
+    writePlan(row, plan, today, now);
   });
 }
-
-function careHomeOf(row: HomeRow, climate: Climate, walls: WallDetail[], doses: Map<string, number>): CareHome {
-  const oil = coatingSeason(climate, 'oil');
-  const waterborne = coatingSeason(climate, 'waterborne');
-  return {
-    id: row.id,
-    latitude: row.latitude,
-    scheffer: climate.scheffer,
-    seasons: { oil: { seasons: oil.seasons, warning: oil.warning }, waterborne: { seasons: waterborne.seasons, warning: waterborne.warning } },
-    since: dayIn(row.timeZone, row.createdAt),
-    walls: walls.map(({ wall: one, openings }) => ({ ...one, wood: row.wood, areaM2: wallAreaM2({ ...one, openings }), doseKwhM2: doses.get(one.id) ?? 0 })),
-    records: recordsOfHome(row.id).map((record) => ({
-      id: record.id,
-      kind: record.kind,
-      doneOn: record.doneOn,
-      wallIds: record.wallIds,
-      finish: record.finish ?? undefined,
-      stainBase: record.stainBase ?? undefined,
-      sealant: record.sealant ?? undefined,
-    })),
-    ownRules: ownRulesOf(row.id),
-  };
-}
-
-const ownRulesOf = (homeId: string) =>
-  database()
-    .select({ wallId: careRule.wallId, kind: careRule.kind, rule: careRule.rule, startOn: careRule.startOn })
-    .from(careRule)
-    .innerJoin(wall, eq(wall.id, careRule.wallId))
-    .where(and(eq(wall.homeId, homeId), isNull(wall.removedAt)))
-    .all();
 
 /** The day on which the next reminder of an item falls: the stage it is in, which the unique key keeps from going out twice, or the next. */
 const remindDay = (item: WorkItem, today: CalendarDay): CalendarDay | null => stageOn(item, today)?.onDay ?? nextStageDay(item, today);
 
-function writePlan(row: HomeRow, plans: WallPlan[], today: CalendarDay, now: Date) {
+function writePlan(row: HomeRow, { walls: plans, grouping }: HomePlan, today: CalendarDay, now: Date) {
   const everyWall = database().select({ id: wall.id }).from(wall).where(eq(wall.homeId, row.id));
   database().delete(workItem).where(eq(workItem.homeId, row.id)).run();
   database().delete(wallPlan).where(inArray(wallPlan.wallId, everyWall)).run();
@@ -86,7 +54,7 @@ function writePlan(row: HomeRow, plans: WallPlan[], today: CalendarDay, now: Dat
     database().insert(workItem).values(rows).run();
   }
   const lapses = items.flatMap((item) => item.lapsesOn ?? []).sort();
-  database().update(home).set({ plannedAt: now, replanOn: lapses[0] ?? null }).where(eq(home.id, row.id)).run();
+  database().update(home).set({ plannedAt: now, replanOn: lapses[0] ?? null, grouping }).where(eq(home.id, row.id)).run();
 }
 
 /** Plans anew every home in whose plan something has lapsed by now; returns how many. A home that fails does not hold up the others; then throws. */

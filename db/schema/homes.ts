@@ -1,6 +1,7 @@
 import { sql } from 'drizzle-orm';
 import { check, index, integer, primaryKey, real, sqliteTable, text, uniqueIndex } from 'drizzle-orm/sqlite-core';
-import { finishes, keysOf, memberships, sealants, shades, stainBases, textures, woods } from '../../lib/schemas/vocabulary';
+import { covers, finishes, keysOf, memberships, sealants, shades, stainBases, textures, woods } from '../../lib/schemas/vocabulary';
+import { type Grouping } from '../../lib/care/grouping';
 import { createdAt, id, instant } from './columns';
 import { user } from './people';
 
@@ -47,6 +48,8 @@ export const home = sqliteTable(
     plannedAt: instant('planned_at'),
     /** The first day on which something in the stored plan lapses; the nightly run plans the home anew then. */
     replanOn: text('replan_on'),
+    /** Which walls' work is gathered into one trip, as last planned: see `lib/care/grouping.ts`. */
+    grouping: text('grouping', { mode: 'json' }).$type<Grouping>(),
     archivedAt: instant('archived_at'),
   },
   (t) => [
@@ -89,6 +92,14 @@ export const wall = sqliteTable(
     shade: text('shade', { enum: keysOf(shades) }).notNull().default('open'),
     /** How high the shade stands above the horizon as seen from the wall's middle, degrees. */
     shadeHeightDeg: real('shade_height_deg').notNull().default(0),
+    /** A porch roof or a deck over part of the wall; depth and height of its underside above the wall's foot in m, share of the wall's width 0–1. */
+    cover: text('cover', { enum: keysOf(covers) }).notNull().default('none'),
+    coverDepthM: real('cover_depth_m').notNull().default(0),
+    coverHeightM: real('cover_height_m').notNull().default(0),
+    coverShare: real('cover_share').notNull().default(1),
+    /** Log-end corners, and pipes, vents, lamps and sockets through the wall. */
+    corners: integer('corners').notNull().default(2),
+    pipes: integer('pipes').notNull().default(0),
     weatherSide: integer('weather_side', { mode: 'boolean' }).notNull().default(false),
     finish: text('finish', { enum: keysOf(finishes) }).notNull().default('semitransparent'),
     stainBase: text('stain_base', { enum: keysOf(stainBases) }).notNull().default('oil'),

@@ -1,8 +1,9 @@
 import { sql } from 'drizzle-orm';
-import { check, index, integer, primaryKey, real, sqliteTable, text } from 'drizzle-orm/sqlite-core';
+import { check, index, integer, primaryKey, real, sqliteTable, text, uniqueIndex } from 'drizzle-orm/sqlite-core';
 import { type FilmLife, type WorkItem } from '../../lib/care/types';
 import { type Explanation } from '../../lib/explain';
-import { finishes, keysOf, sealants, stainBases, workKinds } from '../../lib/schemas/vocabulary';
+import { type WalkaroundAnswers } from '../../lib/home/walkaround';
+import { doers, filmStates, finishes, keysOf, sealants, stainBases, workKinds } from '../../lib/schemas/vocabulary';
 import { createdAt, id, instant } from './columns';
 import { home, wall } from './homes';
 import { user } from './people';
@@ -91,4 +92,57 @@ export const workItem = sqliteTable(
     explanation: text('explanation', { mode: 'json' }).$type<Explanation>().notNull(),
   },
   (t) => [primaryKey({ columns: [t.wallId, t.kind] }), index('work_item_home').on(t.homeId), index('work_item_opens').on(t.opensOn), index('work_item_remind').on(t.remindOn)],
+);
+
+/** How the films of a wall were found: on a walkaround, or when the old coat or caulk was renewed. */
+export const finding = sqliteTable(
+  'finding',
+  {
+    id: id(),
+    workRecordId: text('work_record_id').notNull().references(() => workRecord.id, { onDelete: 'cascade' }),
+    wallId: text('wall_id').notNull().references(() => wall.id, { onDelete: 'cascade' }),
+    coat: text('coat', { enum: keysOf(filmStates) }),
+    seal: text('seal', { enum: keysOf(filmStates) }),
+    /** What was seen, as answered; null where only the state was said. */
+    answers: text('answers', { mode: 'json' }).$type<WalkaroundAnswers>(),
+  },
+  (t) => [uniqueIndex('finding_once').on(t.workRecordId, t.wallId), index('finding_wall').on(t.wallId)],
+);
+
+/** Work that somebody put off: not before a day. Taken back, it keeps who and when. */
+export const deferral = sqliteTable(
+  'deferral',
+  {
+    id: id(),
+    homeId: text('home_id').notNull().references(() => home.id, { onDelete: 'cascade' }),
+    wallId: text('wall_id').notNull().references(() => wall.id, { onDelete: 'cascade' }),
+    kind: text('kind', { enum: keysOf(workKinds) }).notNull(),
+    /** Which piece of work: `workKey` of lib/care/work-key.ts. */
+    workKey: text('work_key').notNull(),
+    /** The opening day of the window that was passed up, and the day before which it is not asked for again. */
+    fromOpensOn: text('from_opens_on').notNull(),
+    notBefore: text('not_before').notNull(),
+    createdBy: text('created_by').references(() => user.id, { onDelete: 'set null' }),
+    createdAt: createdAt(),
+    withdrawnAt: instant('withdrawn_at'),
+    withdrawnBy: text('withdrawn_by').references(() => user.id, { onDelete: 'set null' }),
+  },
+  (t) => [index('deferral_home').on(t.homeId), uniqueIndex('deferral_once').on(t.workKey, t.fromOpensOn).where(sql`withdrawn_at is null`)],
+);
+
+/** What work costs at one home, as its owner says; without a row the example prices stand in. Cents. */
+export const homeCost = sqliteTable(
+  'home_cost',
+  {
+    homeId: text('home_id').primaryKey().references(() => home.id, { onDelete: 'cascade' }),
+    doer: text('doer', { enum: keysOf(doers) }).notNull(),
+    tripCents: integer('trip_cents').notNull(),
+    restainCentsPerM2: real('restain_cents_per_m2').notNull(),
+    stripCentsPerM2: real('strip_cents_per_m2').notNull(),
+    recaulkCentsPerM: real('recaulk_cents_per_m').notNull(),
+    washCentsPerM2: real('wash_cents_per_m2').notNull(),
+    setBy: text('set_by').references(() => user.id, { onDelete: 'set null' }),
+    setAt: instant('set_at').notNull(),
+  },
+  (t) => [check('home_cost_amounts', sql`${t.tripCents} >= 0 and ${t.restainCentsPerM2} >= 0 and ${t.stripCentsPerM2} >= 0 and ${t.recaulkCentsPerM} >= 0 and ${t.washCentsPerM2} >= 0`)],
 );

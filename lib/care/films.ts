@@ -26,6 +26,8 @@ function asItStands(wall: CareWall, records: CareRecord[]): CareWall {
   };
 }
 
+const nothingLearned = { factor: 1, learned: [], assumed: false, found: null };
+
 /** What is on a wall of a home and how long it lasts. */
 export function knownWall(home: CareHome, drawn: CareWall): KnownWall {
   const records = home.records.filter((record) => record.wallIds.includes(drawn.id)).sort(byDay);
@@ -35,7 +37,7 @@ export function knownWall(home: CareHome, drawn: CareWall): KnownWall {
   return {
     wall,
     records,
-    coat: { film: 'coat', startedOn: lastDone(records, 'restain'), lifeMonths: coatMonths, ...coat },
-    seal: { film: 'seal', startedOn: lastDone(records, 'recaulk'), lifeMonths: sealMonths, ...seal },
+    coat: { ...nothingLearned, film: 'coat', startedOn: lastDone(records, 'restain'), lifeMonths: coatMonths, ...coat },
+    seal: { ...nothingLearned, film: 'seal', startedOn: lastDone(records, 'recaulk'), lifeMonths: sealMonths, ...seal },
   };
 }

@@ -29,5 +29,5 @@ function planWall(home: CareHome, wall: CareWall, today: CalendarDay): WallPlan 
  */
 export function planHome(home: CareHome, today: CalendarDay): HomePlan {
   const walls = [...home.walls].sort(inPosition).map((wall) => planWall(home, wall, today));
-  return { homeId: home.id, walls, visits: visitsOf(walls.flatMap(({ items }) => items)) };
+  return { homeId: home.id, walls, visits: visitsOf(walls.flatMap(({ items }) => items)), grouping: { months: 0, choices: [] } };
 }

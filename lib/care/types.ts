@@ -1,6 +1,9 @@
 import { type CalendarDay } from '@/lib/calendar';
 import { type Explanation } from '@/lib/explain';
-import { type Finish, type Sealant, type StainBase, type Texture, type WorkKind, type Wood } from '@/lib/schemas/vocabulary';
+import { type WorkCosts } from './costs';
+import { type Grouping } from './grouping';
+import { type LearnedStep } from '@/lib/coat/learning';
+import { type FilmState, type Finish, type Sealant, type StainBase, type Texture, type WorkKind, type Wood } from '@/lib/schemas/vocabulary';
 
 /** One wall as the care rules see it. Lengths in m, areas in m², dose in kWh/m² a year. */
 export type CareWall = {
@@ -11,7 +14,10 @@ export type CareWall = {
   heightM: number;
   eaveDepthM: number;
   weatherSide: boolean;
+  /** Flat area of wood. */
   areaM2: number;
+  /** Length of the joints that take caulk. */
+  jointM: number;
   finish: Finish;
   stainBase: StainBase;
   texture: Texture;
@@ -33,6 +39,12 @@ export type CareRecord = {
   sealant?: Sealant | undefined;
 };
 
+/** How a wall's films were found on a day: on a walkaround, or just before they were renewed. */
+export type CareFinding = { wallId: string; recordId: string; on: CalendarDay; coat: FilmState | null; seal: FilmState | null };
+
+/** A piece of work (`workKey`) that somebody put off until a day. */
+export type CareDeferral = { workKey: string; notBefore: CalendarDay };
+
 /** An owner's own rule in place of the computed one. */
 export type OwnRule = { wallId: string; kind: WorkKind; rule: string; startOn: CalendarDay };
 
@@ -49,14 +61,17 @@ export type CareHome = {
   since: CalendarDay;
   walls: CareWall[];
   records: CareRecord[];
+  findings: CareFinding[];
+  deferrals: CareDeferral[];
   ownRules: OwnRule[];
+  costs: WorkCosts;
 };
 
 export type Window = {
   opensOn: CalendarDay;
   closesOn: CalendarDay;
   /** How the window came out of the raw date. */
-  moved: 'in season' | 'to the season before' | 'to the next season' | 'to the coming season' | 'no season';
+  moved: 'in season' | 'to the season before' | 'to the next season' | 'to the coming season' | 'no season' | 'put off' | 'to a visit';
 };
 
 /** The next work of one kind on one wall, as stored. Nothing in it depends on today except through `lapsesOn`. */
@@ -74,7 +89,7 @@ export type WorkItem = {
   /** The home is planned anew on this day: yearly work that nobody did gives way to the next, film work moves to the coming season. */
   lapsesOn: CalendarDay | null;
   /** 'walkaround first' when a date is not known. */
-  basis: 'computed' | 'own rule' | 'date not known' | 'pulled to the restain';
+  basis: 'computed' | 'own rule' | 'date not known' | 'pulled to the restain' | 'found' | 'put off' | 'joined to a visit';
   lifeMonths: number | null;
   /** One plain sentence: why this work, why then. */
   because: string;
@@ -90,6 +105,14 @@ export type FilmLife = {
   highYears: number;
   /** 0 (gentlest published life) to 1 (hardest). */
   severity: number;
+  /** The wall's own factor k on the modelled life, 0.5–2; 1 when nothing has been learned. */
+  factor: number;
+  /** What earlier films of the wall taught, oldest first. */
+  learned: LearnedStep[];
+  /** True when nobody knows the day and `startedOn` was reckoned back from how the film was found. */
+  assumed: boolean;
+  /** How the film that is on the wall was last found, if it was looked at. */
+  found: { state: FilmState; on: CalendarDay } | null;
   explanation: Explanation;
 };
 
@@ -103,7 +126,7 @@ export type WallPlan = {
 /** What falls on one home in one window, offered as one trip. */
 export type Visit = { opensOn: CalendarDay; closesOn: CalendarDay; items: WorkItem[] };
 
-export type HomePlan = { homeId: string; walls: WallPlan[]; visits: Visit[] };
+export type HomePlan = { homeId: string; walls: WallPlan[]; visits: Visit[]; grouping: Grouping };
 
 /** How an item stands on a given day. */
 export type WorkState = 'later' | 'due soon' | 'due' | 'overdue';

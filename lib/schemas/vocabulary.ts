@@ -39,6 +39,18 @@ export const shades = {
 } as const;
 export type Shade = keyof typeof shades;
 
+/** A roof against the wall, lower than its eave or deeper, that keeps sun and rain off the wall under it. */
+export const covers = { none: 'Nothing', porch: 'A porch roof', deck: 'A deck above' } as const;
+export type Cover = keyof typeof covers;
+
+/** How a coat or the caulk was found: still doing its work, ready to be renewed, or past that. */
+export const filmStates = { sound: 'Sound', due: 'Due', 'past due': 'Past due' } as const;
+export type FilmState = keyof typeof filmStates;
+
+/** Who does the work; it decides what a trip and a coat cost. */
+export const doers = { self: 'I do it myself', hired: 'A contractor does it' } as const;
+export type Doer = keyof typeof doers;
+
 export const roles = { homeowner: 'Homeowner', contractor: 'Contractor', operator: 'Operator' } as const;
 export type Role = keyof typeof roles;
 

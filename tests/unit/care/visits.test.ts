@@ -58,6 +58,6 @@ describe('the most pressing work', () => {
   it('is overdue work first, then what closes first', () => {
     expect(nextItem(planHome(home, '2026-03-20'), '2026-03-20')).toMatchObject({ kind: 'wash', wallId: 'w1' });
     expect(nextItem(planHome(home, '2026-10-05'), '2026-10-05')).toMatchObject({ kind: 'wash', wallId: 'w1', window: { closesOn: '2026-05-31' } });
-    expect(nextItem({ homeId: 'h', walls: [], visits: [] }, '2026-10-05')).toBeUndefined();
+    expect(nextItem({ homeId: 'h', walls: [], visits: [], grouping: { months: 0, choices: [] } }, '2026-10-05')).toBeUndefined();
   });
 });

@@ -50,7 +50,7 @@ describe('a wall in words', () => {
   });
 
   it('says what is left of a coat, and nothing where its start is not known', () => {
-    const film = { film: 'coat' as const, startedOn: '2026-01-01', lifeMonths: 12, lowYears: 1, highYears: 2, severity: 1, explanation: { figure: '', value: '', formula: '', inputs: [], sources: [] } };
+    const film = { film: 'coat' as const, startedOn: '2026-01-01', lifeMonths: 12, lowYears: 1, highYears: 2, severity: 1, factor: 1, learned: [], assumed: false, found: null, explanation: { figure: '', value: '', formula: '', inputs: [], sources: [] } };
     // 73 of 365 days are a fifth.
     expect(leftExplained(film, '2026-03-15')?.percent).toBe(80);
     expect(leftExplained({ ...film, startedOn: null }, '2026-03-15')).toBeNull();
