@@ -1,6 +1,6 @@
 import { and, eq } from 'drizzle-orm';
 import { dayIn } from '@/lib/calendar';
-import { workKey } from '@/lib/care/stages';
+import { workKey } from '@/lib/care/work-key';
 import { type ReminderItem, type ReminderProps } from '@/lib/mail/kinds/reminder';
 import { isReminderStage } from '@/lib/mail/kinds/reminder-stages';
 import { logUrl, planUrl, accountUrl } from '@/lib/mail/links';

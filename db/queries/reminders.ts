@@ -1,7 +1,8 @@
 import { createHash } from 'node:crypto';
 import { and, eq, inArray, lte } from 'drizzle-orm';
 import { type CalendarDay, dayIn } from '@/lib/calendar';
-import { deliveryKey, nextStageDay, stageOn, workKey } from '@/lib/care/stages';
+import { deliveryKey, nextStageDay, stageOn } from '@/lib/care/stages';
+import { workKey } from '@/lib/care/work-key';
 import { database, transaction } from '../client';
 import { delivery, home, wall, workItem } from '../schema';
 import { toWorkItem } from './home-view';

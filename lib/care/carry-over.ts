@@ -10,7 +10,7 @@ const periodDays = 90;
 const source: Source = { text: 'Work whose window passed without it moves to the season that comes, and stays overdue', ground: 'our rule' };
 
 /** The coming window after one that closed on `missedOn`; the same on every day until it closes itself. */
-function comingWindow(missedOn: CalendarDay, seasons: SeasonMonths[], today: CalendarDay): Window {
+export function comingWindow(missedOn: CalendarDay, seasons: SeasonMonths[], today: CalendarDay): Window {
   const after = addDays(missedOn, 1);
   const run = seasons.some(isAllYear) ? undefined : runsAround(today, seasons).find(({ closesOn }) => closesOn >= today);
   if (run) return { opensOn: run.opensOn > after ? run.opensOn : after, closesOn: run.closesOn, moved: 'to the coming season' };
@@ -32,7 +32,7 @@ export function carriedOver(item: WorkItem, seasons: SeasonMonths[], today: Cale
   return {
     ...item,
     window,
-    missedOn,
+    missedOn: item.missedOn ?? missedOn,
     lapsesOn: addDays(window.closesOn, 1),
     because: `${item.because} That time has passed; the next chance is ${aboutRange(window.opensOn, window.closesOn)}.`,
     explanation: {

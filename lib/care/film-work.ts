@@ -1,9 +1,11 @@
-import { addMonths, type CalendarDay } from '@/lib/calendar';
+import { addDays, addMonths, type CalendarDay } from '@/lib/calendar';
 import { aboutDay, exactDay, exactRange, monthNames } from '@/lib/calendar-words';
 import { monthsInWords } from '@/lib/coat';
 import { type Explanation, type Source } from '@/lib/explain';
-import { workKinds } from '@/lib/schemas/vocabulary';
+import { filmStates, workKinds } from '@/lib/schemas/vocabulary';
+import { comingWindow } from './carry-over';
 import { type KnownWall } from './films';
+import { learnedWords } from './learned-words';
 import { monthlyRule, withSafeDay } from './rule-build';
 import { readRule } from './rule-check';
 import { walkRule } from './rule-days';
@@ -17,6 +19,10 @@ export const windowSource: Source = { text: 'Window: the coating season that hol
 const ruleSource: Source = { text: 'RFC 5545 (2009), §3.3.10, recurrence rules', ground: 'published' };
 const caulkSeason: Source = { text: 'Caulk keeps to the coating season; ASTM C1193 gives 40 to 100 °F for sealants (recalled, not read again)', ground: 'memory' };
 
+/** A film found sound is asked for again after this many months at the earliest: the next walkaround comes first. Our rule. */
+const soundMonths = 6;
+const foundSource: Source = { text: 'A film found due is due from that day, one found past due is overdue; one found sound is not due within half a year', ground: 'our rule' };
+
 /** The next restain or recaulk of a wall; null when there is no date to start from, or the owner's rule has ended. */
 export function filmWork(home: CareHome, known: KnownWall, kind: FilmKind): WorkItem | null {
   const film = kind === 'restain' ? known.coat : known.seal;
@@ -25,26 +31,44 @@ export function filmWork(home: CareHome, known: KnownWall, kind: FilmKind): Work
   const turn = own ? ownTurn(own, film.startedOn, season.seasons) : computedTurn(film, season.seasons);
   if (!turn) return null;
   const because = [whyThen(kind, film, turn, own), whyWindow(turn.window), season.warning].filter(Boolean).join(' ');
+  const isFound = !own && turn.dueOn !== turn.byRule;
+  const { byRule: _byRule, ...facts } = turn;
   return {
     wallId: known.wall.id,
     kind,
-    ...turn,
-    missedOn: null,
+    ...facts,
+    missedOn: !own && film.found?.state === 'past due' ? film.found.on : null,
     lapsesOn: null,
-    basis: own ? 'own rule' : 'computed',
+    basis: own ? 'own rule' : isFound ? 'found' : 'computed',
     lifeMonths: film.lifeMonths,
     because,
     explanation: explain(kind, film, turn, season.seasons),
   };
 }
 
-type Turn = { rule: string; startOn: CalendarDay; dueOn: CalendarDay; window: Window };
+/** `byRule` is what the care rule says; how the film was found may move the date away from it. */
+type Turn = { rule: string; startOn: CalendarDay; byRule: CalendarDay; dueOn: CalendarDay; window: Window };
 
-function computedTurn({ startedOn, lifeMonths }: FilmLife, seasons: SeasonMonths[]): Turn | null {
+function computedTurn({ startedOn, lifeMonths, found }: FilmLife, seasons: SeasonMonths[]): Turn | null {
   if (!startedOn) return null;
   const rule = monthlyRule(startedOn, lifeMonths);
-  const dueOn = nextOfRule(rule, startedOn, startedOn);
-  return dueOn ? { rule, startOn: startedOn, dueOn, window: windowFor(dueOn, seasons, dueOn) } : null;
+  const byRule = nextOfRule(rule, startedOn, startedOn);
+  if (!byRule) return null;
+  const dueOn = afterLooking(byRule, found);
+  return { rule, startOn: startedOn, byRule, dueOn, window: windowOnceFound(windowFor(dueOn, seasons, dueOn), found, seasons) };
+}
+
+/** What was seen goes before what was reckoned. */
+function afterLooking(byRule: CalendarDay, found: FilmLife['found']): CalendarDay {
+  if (!found) return byRule;
+  if (found.state !== 'sound') return found.on < byRule ? found.on : byRule;
+  const rested = addMonths(found.on, soundMonths);
+  return rested > byRule ? rested : byRule;
+}
+
+/** Nothing is asked for in a season that was over when the film was found. */
+function windowOnceFound(window: Window, found: FilmLife['found'], seasons: SeasonMonths[]): Window {
+  return found && window.closesOn < found.on ? comingWindow(addDays(found.on, -1), seasons, found.on) : window;
 }
 
 /** The owner's rule, from the latest work if that is later; its first date whose window opens after that work. */
@@ -54,7 +78,7 @@ function ownTurn(own: OwnRule, doneOn: CalendarDay | null, seasons: SeasonMonths
   let turn: Turn | null = null;
   walkRule(readRule(rule), startOn, addMonths(startOn, horizonMonths), (dueOn) => {
     const window = windowFor(dueOn, seasons, dueOn);
-    if (!doneOn || window.opensOn > doneOn) turn = { rule, startOn, dueOn, window };
+    if (!doneOn || window.opensOn > doneOn) turn = { rule, startOn, byRule: dueOn, dueOn, window };
     return turn === null;
   });
   return turn;
@@ -62,10 +86,18 @@ function ownTurn(own: OwnRule, doneOn: CalendarDay | null, seasons: SeasonMonths
 
 const filmWords = { restain: 'coat', recaulk: 'caulk' } as const;
 
-function whyThen(kind: FilmKind, film: FilmLife, { dueOn, startOn }: Turn, own: OwnRule | undefined): string {
+function whyThen(kind: FilmKind, film: FilmLife, { dueOn, startOn, byRule }: Turn, own: OwnRule | undefined): string {
   if (own) return `The owner’s own rule, counted from ${exactDay(startOn)}, falls on ${exactDay(dueOn)}.`;
+  const what = filmWords[kind];
+  const found = film.found && `found ${filmStates[film.found.state].toLowerCase()} on ${exactDay(film.found.on)}`;
+  const learned = learnedWords(film);
+  const worn = found && film.found?.state !== 'sound';
+  if (film.assumed) return `Nobody knows the day of this ${what}. It was ${found}, ${worn ? 'so its life is taken to be used up' : `so it is taken to last until ${aboutDay(dueOn)}`} (assumed).`;
   const month = `${monthNames[Number(startOn.slice(5, 7)) - 1]} ${startOn.slice(0, 4)}`;
-  return `The ${filmWords[kind]} of ${month} lasts about ${monthsInWords(film.lifeMonths)} on this wall, until ${aboutDay(dueOn)}.`;
+  if (worn) return [`The ${what} of ${month} was ${found}; it had been expected to last until ${aboutDay(byRule)}.`, learned].filter(Boolean).join(' ');
+  const reckoned = `The ${what} of ${month} lasts about ${monthsInWords(film.lifeMonths)} on this wall, until ${aboutDay(byRule)}.`;
+  const rested = dueOn === byRule ? null : `It was ${found}, so it is left until ${aboutDay(dueOn)} at least.`;
+  return [reckoned, rested, learned].filter(Boolean).join(' ');
 }
 
 function whyWindow({ moved }: Window): string | null {
@@ -82,12 +114,13 @@ function explain(kind: FilmKind, film: FilmLife, { startOn, dueOn, window, rule 
     value: exactRange(window.opensOn, window.closesOn),
     formula: 'date = start + life, by the care rule; window = the coating season for that date',
     inputs: [
-      { label: 'Counted from', value: exactDay(startOn) },
+      { label: 'Counted from', value: `${exactDay(startOn)}${film.assumed ? ' (assumed)' : ''}` },
       { label: `Expected life of the ${filmWords[kind]}`, value: `${monthsInWords(film.lifeMonths)} (range ${film.lowYears} to ${film.highYears} years, severity ${film.severity.toFixed(2)})` },
       { label: 'Care rule (RFC 5545)', value: rule },
+      ...(film.found ? [{ label: 'Found', value: `${filmStates[film.found.state].toLowerCase()} on ${exactDay(film.found.on)}` }] : []),
       { label: 'Date', value: exactDay(dueOn) },
       { label: 'Coating season', value: seasonWords(seasons) },
     ],
-    sources: [...film.explanation.sources, ruleSource, windowSource, ...(kind === 'recaulk' ? [caulkSeason] : [])],
+    sources: [...film.explanation.sources, ruleSource, windowSource, ...(film.found ? [foundSource] : []), ...(kind === 'recaulk' ? [caulkSeason] : [])],
   };
 }

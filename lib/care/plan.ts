@@ -3,6 +3,7 @@ import { carriedOver } from './carry-over';
 import { filmWork } from './film-work';
 import { knownWall } from './films';
 import { type CareHome, type CareWall, type HomePlan, type WallPlan, type WorkItem } from './types';
+import { putOff } from './put-off';
 import { visitsOf } from './visits';
 import { withRestain } from './with-restain';
 import { yearlyWork } from './yearly-work';
@@ -12,7 +13,7 @@ const inPosition = (a: CareWall, b: CareWall) => a.position - b.position || (a.i
 function planWall(home: CareHome, wall: CareWall, today: CalendarDay): WallPlan {
   const known = knownWall(home, wall);
   const { seasons } = home.seasons[known.wall.stainBase];
-  const carried = (item: WorkItem | null) => item && carriedOver(item, seasons, today);
+  const carried = (item: WorkItem | null) => item && carriedOver(putOff(item, home.deferrals, seasons), seasons, today);
   const restain = carried(filmWork(home, known, 'restain'));
   const items: (WorkItem | null)[] = [
     yearlyWork(home, known, 'walkaround', today),

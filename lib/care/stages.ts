@@ -1,6 +1,7 @@
 import { addDays, type CalendarDay } from '@/lib/calendar';
 import { type WorkKind } from '@/lib/schemas/vocabulary';
 import { type WorkItem } from './types';
+import { workKey } from './work-key';
 
 type Stage = 'book' | 'buy' | 'open' | 'overdue';
 
@@ -44,10 +45,6 @@ export function stageOn(item: Staged, today: CalendarDay): ReachedStage | null {
 export const nextStageDay = (item: Staged, today: CalendarDay): CalendarDay | null => stagesOf(item).find(({ onDay }) => onDay > today)?.onDay ?? null;
 
 type Identified = Pick<WorkItem, 'wallId' | 'kind' | 'startOn' | 'dueOn' | 'window'>;
-
-/** What makes a piece of work itself: film work is the same until its film is renewed, however its date moves; yearly work is that of its day. */
-export const workKey = ({ wallId, kind, startOn, dueOn }: Omit<Identified, 'window'>): string =>
-  [wallId, kind, (films.includes(kind) ? startOn : null) ?? dueOn].join(':');
 
 /** One delivery: the same person is told of a stage of one piece of work once, whatever happens. The season of another month has its own stages. */
 export function deliveryKey(item: Identified, { stage, step }: Pick<ReachedStage, 'stage' | 'step'>, userId: string): string {

@@ -41,7 +41,7 @@ function moved(item: WorkItem, window: Window, because: string, restain: WorkIte
 
 /** A recaulk or wash of the wall that belongs with its restain takes the restain's window; other work stays as it is, and so do the owner's own rules. */
 export function withRestain(item: WorkItem | null, restain: WorkItem | null): WorkItem | null {
-  if (!item || !restain || item.basis !== 'computed') return item;
+  if (!item || !restain || !['computed', 'found'].includes(item.basis)) return item;
   if (item.kind === 'recaulk') {
     const window = sharedWindow(item.dueOn, restain);
     const because = `Caulk goes on before stain, so it is done with this wall’s restain and left to cure as its label says; on its own the caulk would last until ${aboutDay(item.dueOn)}.`;

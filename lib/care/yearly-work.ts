@@ -6,6 +6,7 @@ import { firstLook, isUnknown, unknownWords } from './first-look';
 import { type KnownWall } from './films';
 import { withSafeDay, yearlyRule } from './rule-build';
 import { type CareHome, type CareRecord, type OwnRule, type SeasonMonths, type WorkItem } from './types';
+import { workKey } from './work-key';
 import { type Turn, turnsOf, turnToAsk } from './yearly-turns';
 
 type YearlyKind = 'wash' | 'walkaround';
@@ -63,7 +64,8 @@ export function yearlyWork(home: CareHome, known: KnownWall, kind: YearlyKind, t
   const unknown = kind === 'walkaround' && isUnknown(home, known);
   const regular = turnsOf(rule, startOn, home.since, today);
   const turns = unknown && !own ? firstLook(home.since, regular) : regular;
-  const turn = turnToAsk(turns, (one, next) => isSettled(kind, known.records, own, one, next), today);
+  const isPutOff = ({ dueOn }: Turn) => home.deferrals.some((deferral) => deferral.workKey === workKey({ wallId: known.wall.id, kind, startOn: null, dueOn }));
+  const turn = turnToAsk(turns, (one, next) => isPutOff(one) || isSettled(kind, known.records, own, one, next), today);
   if (!turn) return null;
   const byRule = regular.some(({ dueOn }) => dueOn === turn.dueOn);
   const reason = unknown ? unknownWords(home, known) : own ? `The owner’s own rule falls on ${exactDay(turn.dueOn)}.` : reasons[kind];

@@ -1,4 +1,5 @@
 import { type CalendarDay } from '@/lib/calendar';
+import { type Source } from '@/lib/explain';
 import { type FilmState } from '@/lib/schemas/vocabulary';
 
 /** A film of the past that was looked at: how old it was, how it was found, how long the model had it last. Ages in years. */
@@ -16,6 +17,9 @@ const sightings: Record<FilmState, { ageTimes: number; sd: number }> = {
 };
 const least = 0.5;
 const most = 2;
+
+/** Where a factor comes from, for whoever opens a life that was learned from. */
+export const learningSource: Source = { text: 'The wall’s own factor: a normal-normal update of its logarithm, from 1 with a deviation of 0.25, by each earlier film that was looked at', ground: 'our rule' };
 
 /** An age below this (a month) says nothing: its logarithm would run away. Our rule. */
 const youngestYears = 1 / 12;
