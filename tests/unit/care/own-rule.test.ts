@@ -15,7 +15,7 @@ import { anyCareHome, careHome, careRecord } from '@/tests/fixtures/care-home';
 const today = '2026-12-01';
 const simple: fc.Arbitrary<SimpleRule> = fc.oneof(
   fc.record({ every: fc.integer({ min: 1, max: 30 }), unit: fc.constant('years' as const), months: fc.subarray([1, 2, 3, 4, 5, 6, 7, 8, 9, 10, 11, 12]) }),
-  fc.record({ every: fc.integer({ min: 1, max: 360 }), unit: fc.constant('months' as const), months: fc.constant([]) }),
+  fc.record({ every: fc.integer({ min: 1, max: 360 }), unit: fc.constant('months' as const), months: fc.constant<number[]>([]) }),
 );
 const anyStart = fc.integer({ min: -9000, max: 4000 }).map((n) => addDays(today, n));
 const faultOf = (rule: string, startOn = today) => {
