@@ -1,6 +1,7 @@
 import { leafOnMonths } from './leaf-months';
 import { type Place, sunPosition } from './position';
-import { directShare, eaveOf, sunlitShare, type WallFace } from './wall-face';
+import { litShare, stripsOf } from './strips';
+import { directShare, type WallFace } from './wall-face';
 
 export type SunHours = { annual: number; monthly: number[] };
 
@@ -50,13 +51,13 @@ export function sunPath(place: Place, year: number): SunPath {
 }
 
 /**
- * Hours in a year with the sun above a flat horizon and in front of the wall, weighted by the sunlit share under an eave
- * and by what passes the horizon's obstructions. cos(incidence) = cos(elevation)·cos(azimuth difference) > 0.
+ * Hours in a year with the sun above a flat horizon and in front of the wall, weighted by the sunlit share under an eave and a
+ * cover and by what passes the horizon's obstructions. cos(incidence) = cos(elevation)·cos(azimuth difference) > 0.
  * @param leafOn the twelve months in which trees carry leaves; by latitude unless said
  */
 export function directSunHoursOn(path: SunPath, wall: WallFace, leafOn: readonly boolean[] = leafOnMonths(path.latitude)): SunHours {
   const monthly = new Float64Array(12);
-  const eave = eaveOf(wall);
+  const strips = stripsOf(wall);
   const cosWall = Math.cos(wall.azimuthDeg * radians);
   const sinWall = Math.sin(wall.azimuthDeg * radians);
   const obstructed = (wall.horizon?.length ?? 0) > 0;
@@ -64,12 +65,12 @@ export function directSunHoursOn(path: SunPath, wall: WallFace, leafOn: readonly
     const inFront = (path.cosAzimuth[k] as number) * cosWall + (path.sinAzimuth[k] as number) * sinWall;
     if (inFront <= 0) continue;
     const month = path.month[k] as number;
-    const lit = sunlitShare(eave, (path.tanElevation[k] as number) / inFront);
+    const lit = litShare(strips, (path.tanElevation[k] as number) / inFront);
     const passed = obstructed ? directShare(wall.horizon, leafOn[month] ?? true, path.azimuthDeg[k] as number, path.elevationDeg[k] as number) : 1;
     monthly[month] = (monthly[month] as number) + lit * passed * path.hoursPerSample;
   }
   return { annual: monthly.reduce((sum, hours) => sum + hours, 0), monthly: [...monthly] };
 }
 
-/** As `directSunHoursOn`, for one wall at a place. Hours; with an eave weighted by the sunlit share. */
+/** As `directSunHoursOn`, for one wall at a place. Hours; with an eave or a cover weighted by the sunlit share. */
 export const directSunHours = (place: Place, wall: WallFace, year: number): SunHours => directSunHoursOn(sunPath(place, year), wall);

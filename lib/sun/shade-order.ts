@@ -1,7 +1,8 @@
 import { TZDate } from '@date-fns/tz';
 import { addDays, type CalendarDay, toUtcDate } from '@/lib/calendar';
 import { type Place, type SunPosition, sunPosition } from './position';
-import { directShare, eaveOf, sunlitShare, type WallFace } from './wall-face';
+import { litShare, type Strip, stripsOf } from './strips';
+import { directShare, type WallFace } from './wall-face';
 
 /** A stretch of one day at a place: instants (ms), and what its clock shows, in minutes after midnight; 1440 is the day's end. */
 export type DaySpan = { from: number; to: number; fromMinute: number; toMinute: number };
@@ -32,11 +33,11 @@ function boundsOf(day: CalendarDay, timeZone: string): { start: number; end: num
   return { start: midnight(day), end: midnight(addDays(day, 1)) };
 }
 
-/** Any part of the wall's height lit: above the horizon, in front of the wall, not wholly under the eave's shadow, not behind what stands in front. */
-function strikes(sun: SunPosition, wall: WallFace, leafOn: boolean): boolean {
+/** Any part of the wall lit: above the horizon, in front of the wall, not wholly in the shadow of its eave and cover, not behind what stands in front. */
+function strikes(sun: SunPosition, wall: WallFace, strips: readonly Strip[], leafOn: boolean): boolean {
   const inFront = Math.cos((sun.azimuthDeg - wall.azimuthDeg) * radians);
   if (sun.elevationDeg <= 0 || inFront <= 0) return false;
-  const lit = sunlitShare(eaveOf(wall), Math.tan(sun.elevationDeg * radians) / inFront);
+  const lit = litShare(strips, Math.tan(sun.elevationDeg * radians) / inFront);
   return lit > 0 && directShare(wall.horizon, leafOn, sun.azimuthDeg, sun.elevationDeg) >= dappled;
 }
 
@@ -62,7 +63,7 @@ const middle = (span: DaySpan) => (span.from + span.to) / 2;
  * When each wall is in the sun on a day, to the minute (judged at its middle, without refraction), and the walls in the order in which
  * work follows the shade: by the middle of each wall's longest time out of the sun in daylight, walls that the sun never leaves last. Our rule;
  * that work follows the shade around the house: Wood Handbook, FPL-GTR-190 (2010), p. 16-20.
- * Eave and horizon count: a wall is in the sun while any of its height is lit; under trees when at least half of the light passes.
+ * Eave, cover and horizon count: a wall is in the sun while any of it is lit; under trees when at least half of the light passes.
  * @param day calendar day in the IANA `timeZone` of the place; days on which the clock changes have 23 or 25 hours
  * @param leafOn whether trees in front carry leaves
  */
@@ -78,7 +79,8 @@ export function shadeOrder<W extends WallFace>(place: Place, walls: readonly W[]
   const first = path.findIndex(({ elevationDeg }) => elevationDeg > 0);
   const last = path.findLastIndex(({ elevationDeg }) => elevationDeg > 0);
   const shaded = walls.map((wall): WallShade<W> => {
-    const lit = path.map((sun) => strikes(sun, wall, leafOn));
+    const strips = stripsOf(wall);
+    const lit = path.map((sun) => strikes(sun, wall, strips, leafOn));
     const shade = runs(count, (minute) => minute >= first && minute <= last && !lit[minute]).map(span);
     const best = shade.reduce<DaySpan | null>((longest, one) => (longest && length(longest) >= length(one) ? longest : one), null);
     return { wall, sun: runs(count, (minute) => lit[minute] === true).map(span), shade, best };

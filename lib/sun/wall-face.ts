@@ -1,3 +1,9 @@
+/**
+ * A roof against a wall, lower than its eave or deeper: a porch roof, or a deck above. Its horizontal depth and the height of its underside
+ * above the wall's foot, m; the share of the wall's width under it, 0–1.
+ */
+export type WallCover = { depthM: number; heightM: number; share: number };
+
 /** A vertical wall: azimuth of its outward normal, degrees clockwise from true north; lengths in m. */
 export type WallFace = {
   azimuthDeg: number;
@@ -5,6 +11,7 @@ export type WallFace = {
   /** Horizontal depth of the overhang and how far its underside is above the wall's top. */
   eaveDepthM?: number | undefined;
   eaveDropM?: number | undefined;
+  cover?: WallCover | undefined;
   horizon?: Obstruction[] | undefined;
 };
 
@@ -21,6 +28,12 @@ const defaultHeightM = 2.44;
 
 /** The eave of a wall as numbers; depth 0 when there is none. */
 export const eaveOf = (wall: WallFace) => ({ depth: wall.eaveDepthM ?? 0, drop: wall.eaveDropM ?? 0, height: wall.heightM ?? defaultHeightM });
+
+/** The cover of a wall where it covers anything, its share within 0–1. */
+export function coverOf({ cover }: Pick<WallFace, 'cover'>): WallCover | undefined {
+  if (!cover || !(cover.depthM > 0) || !(cover.heightM > 0) || !(cover.share > 0)) return undefined;
+  return { ...cover, share: Math.min(1, cover.share) };
+}
 
 /**
  * Share of a wall's height that direct sun reaches under an infinite overhang, 0–1: f = clamp(1 − (d·tan p − g)/h),
