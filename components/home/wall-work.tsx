@@ -7,12 +7,21 @@ import { type WorkItem } from '@/lib/care/types';
 import { type CalendarDay } from '@/lib/calendar';
 import { urgency } from '@/lib/home/next-work';
 import { withRule } from '@/lib/home/plan-view';
-import { workKinds } from '@/lib/schemas/vocabulary';
+import { keysOf, type WorkKind, workKinds } from '@/lib/schemas/vocabulary';
 
-type WallWorkProps = { homeId: string; wallId: string; items: readonly WorkItem[]; today: CalendarDay; mayLog: boolean };
+type WallWorkProps = { homeId: string; wallId: string; items: readonly WorkItem[]; today: CalendarDay; mayLog: boolean; mayEdit: boolean };
+
+function OwnRuleLink({ homeId, wallId, kind }: { homeId: string; wallId: string; kind: WorkKind }) {
+  return (
+    <LinkButton href={`/homes/${homeId}/walls/${wallId}/rule?kind=${kind}`} look="plain">
+      Own rule<span className="sr-only"> for the {workKinds[kind].toLowerCase()}</span>
+    </LinkButton>
+  );
+}
 
 /** What comes next on one wall, soonest first, each with its reason. */
-export function WallWork({ homeId, wallId, items, today, mayLog }: WallWorkProps) {
+export function WallWork({ homeId, wallId, items, today, mayLog, mayEdit }: WallWorkProps) {
+  const unplanned = mayEdit ? keysOf(workKinds).filter((kind) => items.every((item) => item.kind !== kind)) : [];
   return (
     <ul>
       {items.toSorted((a, b) => urgency[workState(a, today)] - urgency[workState(b, today)]).map((item) => (
@@ -27,13 +36,20 @@ export function WallWork({ homeId, wallId, items, today, mayLog }: WallWorkProps
             <p className="max-w-prose">{item.because}</p>
             <Figure explanation={withRule(item)} />
           </div>
-          {mayLog ? (
-            <div className="no-print -ml-2 md:ml-0">
+          <div className="no-print -ml-2 flex flex-wrap md:ml-0 md:flex-col md:items-start">
+            {mayLog ? (
               <LinkButton href={`/homes/${homeId}/log?kind=${item.kind}&wall=${wallId}`} look="plain">
                 Log it
               </LinkButton>
-            </div>
-          ) : null}
+            ) : null}
+            {mayEdit ? <OwnRuleLink homeId={homeId} wallId={wallId} kind={item.kind} /> : null}
+          </div>
+        </li>
+      ))}
+      {unplanned.map((kind) => (
+        <li key={kind} className="no-print flex flex-wrap items-center justify-between gap-x-6 border-t border-line py-1 first:border-t-0">
+          <p className="text-quiet">{workKinds[kind]}: nothing is planned.</p>
+          <OwnRuleLink homeId={homeId} wallId={wallId} kind={kind} />
         </li>
       ))}
     </ul>

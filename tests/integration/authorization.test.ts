@@ -7,8 +7,10 @@ import { archiveHome, createHome, homeOf, listHomes, restoreHome, updateHome } f
 import { upcomingJobs } from '@/db/queries/job-list';
 import { recentJobRuns } from '@/db/queries/job-runs';
 import { listDeliveries, listMails, oneMail, retryMail } from '@/db/queries/mail-view';
+import { removeOwnRule, setOwnRule } from '@/db/queries/own-rules';
 import { membersOf, shareHome, withdrawShare } from '@/db/queries/sharing';
 import { siteFor } from '@/db/queries/site';
+import { careOfWall } from '@/db/queries/wall-care';
 import { addWall, removeWall, restoreWall, turnWalls, updateWall, wallOf, wallsOfHome } from '@/db/queries/walls';
 import { logWork, removeRecord, restoreRecord } from '@/db/queries/work';
 import { type Actor, can, homeVerbs, Refused, roleVerbs } from '@/lib/permissions';
@@ -102,6 +104,9 @@ const homeQueries: [name: string, verb: keyof typeof homeRights, call: (actor: A
   ['removeWall', 'home.edit', (actor, { wallId }) => removeWall(actor, wallId, now)],
   ['restoreWall', 'home.edit', (actor, { homeId, wallId }) => restoreWall(actor, homeId, wallId)],
   ['turnWalls', 'home.edit', (actor, { homeId }) => turnWalls(actor, homeId, 10)],
+  ['careOfWall', 'home.edit', (actor, { homeId, wallId }) => careOfWall(actor, homeId, wallId, now)],
+  ['setOwnRule', 'home.edit', (actor, { homeId, wallId }) => setOwnRule(actor, homeId, wallId, 'wash', { rule: 'FREQ=YEARLY', startOn: '2027-05-01' })],
+  ['removeOwnRule', 'home.edit', (actor, { homeId, wallId }) => removeOwnRule(actor, homeId, wallId, 'wash')],
   ['logWork', 'work.log', (actor, { homeId, wallId }) => logWork(actor, work(homeId, wallId))],
   ['removeRecord', 'work.remove', (actor, { recordId }) => removeRecord(actor, recordId, now)],
   ['restoreRecord', 'work.remove', (actor, { removedId }) => restoreRecord(actor, removedId)],

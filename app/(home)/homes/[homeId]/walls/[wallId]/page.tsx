@@ -51,7 +51,7 @@ export default async function WallPage({ params }: Props) {
         </div>
       </Course>
       <Course heading="Next work">
-        <WallWork homeId={homeId} wallId={wallId} items={items} today={today} mayLog={can(actor, 'work.log', { membership })} />
+        <WallWork homeId={homeId} wallId={wallId} items={items} today={today} mayLog={can(actor, 'work.log', { membership })} mayEdit={mayEdit} />
       </Course>
       <Course heading="Sun">
         <div className="mb-4 grid gap-x-10 gap-y-2 sm:grid-cols-2 sm:[&>details[open]]:col-span-full">
