@@ -1,13 +1,15 @@
+import { groundAlbedo } from '@/lib/climate';
+import { coverOfStored, type StoredCover } from '@/lib/home/cover';
 import { shadeHorizon } from '@/lib/home/shade';
 import { type Shade } from '@/lib/schemas/vocabulary';
-import { directSunHoursOn, leafOnMonths, type Place, sunDose, type SunPath, sunPath } from '@/lib/sun';
+import { directSunHoursOn, leafOnMonths, type Place, sunDose, type SunPath, sunPath, type WallFace } from '@/lib/sun';
 
-export type ExposedWall = { azimuthDeg: number; heightM: number; eaveDepthM: number; eaveDropM: number; shade: Shade; shadeHeightDeg: number };
+export type ExposedWall = { azimuthDeg: number; heightM: number; eaveDepthM: number; eaveDropM: number; shade: Shade; shadeHeightDeg: number } & StoredCover;
 
 export type Exposure = { sunHours: number; sunHoursMonthly: number[]; doseKwhM2: number; doseMonthly: number[] };
 
 /** What the sun does at a home's place in a mean year, shared by its walls. */
-export type SunSite = { place: Place; ghiKwhM2Day: number[]; leafOnMonths: boolean[] };
+export type SunSite = { place: Place; ghiKwhM2Day: number[]; leafOnMonths: boolean[]; albedo: number[] };
 
 /** Sun hours are counted in this year; another differs by less than two hours. Our rule. */
 const countedYear = 2026;
@@ -16,6 +18,7 @@ export const sunSite = (place: Place, climate: { meanC: number[]; ghiKwhM2Day: n
   place,
   ghiKwhM2Day: climate.ghiKwhM2Day,
   leafOnMonths: leafOnMonths(place.latitude, climate.meanC),
+  albedo: groundAlbedo(climate.meanC),
 });
 
 /** The year's sun positions at a home; about a hundred milliseconds, so made once for all of its walls. */
@@ -23,11 +26,21 @@ export const pathOf = (site: SunSite): SunPath => sunPath(site.place, countedYea
 
 const rounded = (values: number[]) => values.map((value) => Number(value.toFixed(2)));
 
+/** A stored wall as the sun sees it. */
+export const faceOf = (wall: ExposedWall): WallFace => ({
+  azimuthDeg: wall.azimuthDeg,
+  heightM: wall.heightM,
+  eaveDepthM: wall.eaveDepthM,
+  eaveDropM: wall.eaveDropM,
+  cover: coverOfStored(wall),
+  horizon: shadeHorizon(wall),
+});
+
 /** Direct sun hours and sun dose (kWh/m²) of a wall in a mean year, rounded to hundredths. */
 export function exposureOf(wall: ExposedWall, site: SunSite, path: SunPath): Exposure {
-  const face = { azimuthDeg: wall.azimuthDeg, heightM: wall.heightM, eaveDepthM: wall.eaveDepthM, eaveDropM: wall.eaveDropM, horizon: shadeHorizon(wall) };
+  const face = faceOf(wall);
   const hours = directSunHoursOn(path, face, site.leafOnMonths);
-  const dose = sunDose(site.place, face, site.ghiKwhM2Day, { leafOnMonths: site.leafOnMonths });
+  const dose = sunDose(site.place, face, site.ghiKwhM2Day, { leafOnMonths: site.leafOnMonths, albedo: site.albedo });
   return {
     sunHours: Number(hours.annual.toFixed(2)),
     sunHoursMonthly: rounded(hours.monthly),
@@ -39,9 +52,11 @@ export function exposureOf(wall: ExposedWall, site: SunSite, path: SunPath): Exp
 /** Everything that a wall's exposure depends on, as text: equal text, equal exposure. Raise the edition when the method changes. */
 export const exposureInputs = (wall: ExposedWall, site: SunSite, stationId: string): string =>
   JSON.stringify({
-    edition: 2,
+    edition: 3,
     at: [site.place.latitude, site.place.longitude],
     stationId,
     leaves: site.leafOnMonths.map(Number).join(''),
+    albedo: site.albedo,
     wall: [wall.azimuthDeg, wall.heightM, wall.eaveDepthM, wall.eaveDropM, wall.shade, wall.shadeHeightDeg],
+    cover: coverOfStored(wall) ?? null,
   });

@@ -6,7 +6,7 @@ import { climateAt, nearestStation } from '@/lib/climate';
 /** One home of four walls, a whole year in steps of five minutes, against the same number of bare suncalc calls. */
 const place = { latitude: 45.68, longitude: -111.04 };
 const site = sunSite(place, climateAt(nearestStation(place).station));
-const walls = [0, 90, 180, 270].map((azimuthDeg) => ({ azimuthDeg, heightM: 2.7, eaveDepthM: 0.45, eaveDropM: 0, shade: 'open' as const, shadeHeightDeg: 0 }));
+const walls = [0, 90, 180, 270].map((azimuthDeg) => ({ azimuthDeg, heightM: 2.7, eaveDepthM: 0.45, eaveDropM: 0, shade: 'open' as const, shadeHeightDeg: 0, cover: 'none' as const, coverDepthM: 0, coverHeightM: 0, coverShare: 1 }));
 const calls = (365 * 24 * 60) / 5;
 const start = Date.UTC(2026, 0, 1);
 

@@ -45,12 +45,19 @@ describe('DayCheck', () => {
 
 describe('ShadeList', () => {
   const home = { latitude: 40, longitude: -105, elevationM: null, timeZone: 'America/Denver', stationId: 'none' };
-  const wall = (name: string, azimuthDeg: number) => ({ id: name, name, azimuthDeg, heightM: 2.7, eaveDepthM: 0, eaveDropM: 0, shade: 'open' as const, shadeHeightDeg: 0 });
+  const wall = (name: string, azimuthDeg: number) => ({ id: name, name, azimuthDeg, heightM: 2.7, eaveDepthM: 0, eaveDropM: 0, shade: 'open' as const, shadeHeightDeg: 0, cover: 'none' as const, coverDepthM: 0, coverHeightM: 0, coverShare: 1 });
 
   it('says the walls in the order of work', () => {
     // Due south at 1:09 PM on this day (equation of time −9 minutes, Astronomical Almanac, from memory).
     render(<ShadeList homeId="h" order={shadeToday(home, [wall('East', 90), wall('North', 0), wall('West', 270)], '2027-03-14')} />);
     expect(screen.getAllByRole('listitem').map((item) => item.textContent)).toEqual(['1West: in the shade until 1:10 PM', '2North: in the shade all day', '3East: in the shade from 1:10 PM']);
+  });
+
+  it('counts a porch roof that is deeper than the sun is low', () => {
+    // At noon on June 21 the sun stands 73° high at 40°: under a roof 2.4 m deep and 2.7 m up its shadow is 7.8 m long.
+    const porch = { ...wall('South', 180), cover: 'porch' as const, coverDepthM: 2.4, coverHeightM: 2.7 };
+    render(<ShadeList homeId="h" order={shadeToday(home, [porch, { ...porch, id: 'Open', name: 'Open', cover: 'none' }], '2027-06-21')} />);
+    expect(screen.getAllByRole('listitem').map((item) => item.textContent?.replace(/\d+:\d+ [AP]M/g, 'a time'))).toEqual(['1Open: in the shade until a time and from a time', '2South: in the shade all day']);
   });
 
   it('counts a building in front of a wall as shade', () => {
