@@ -12,6 +12,7 @@ const homePolicy = {
   'home.edit': keepers,
   'work.log': everyMember,
   'work.remove': keepers,
+  'work.putOff': keepers,
   'home.share': ['owner'],
   'home.archive': ['owner'],
 } satisfies Record<string, Membership[]>;

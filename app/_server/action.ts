@@ -4,7 +4,7 @@ import { unstable_rethrow } from 'next/navigation';
 import { type z } from 'zod';
 import { transaction } from '@/db/queries/transaction';
 import { type Actor, can, type HomeVerb, isRoleVerb, nobody, Refused, type RoleVerb } from '@/lib/permissions';
-import { type ActionState } from '@/lib/schemas/action-state';
+import { type ActionState, type FormValues } from '@/lib/schemas/action-state';
 import { currentActor } from './actor';
 import { readForm } from '@/lib/schemas/form-values';
 import { logFault } from './log';
@@ -27,6 +27,8 @@ export class FieldFault {
   constructor(readonly errors: Record<string, string>) {}
 }
 
+const marked = (errors: Record<string, string>, values: FormValues): ActionState => ({ ok: false, errors, values, message: errors[''] ?? 'Please look at the marked fields.' });
+
 /** Fields that are never sent back. */
 const secrets = ['password', 'current'];
 
@@ -45,10 +47,10 @@ export function defineAction<S extends z.ZodType, R>(definition: Definition<S, R
         return { ok: false, message: 'Your account may not do this.', values };
       }
       const parsed = definition.schema.safeParse(sent);
-      if (!parsed.success) return { ok: false, errors: fieldErrors(parsed.error), values, message: 'Please look at the marked fields.' };
+      if (!parsed.success) return marked(fieldErrors(parsed.error), values);
       const prepared = await definition.prepare?.(parsed.data);
       const result = transaction(() => definition.run(actor, parsed.data, prepared));
-      if (result instanceof FieldFault) return { ok: false, errors: result.errors, values, message: result.errors[''] ?? 'Please look at the marked fields.' };
+      if (result instanceof FieldFault) return marked(result.errors, values);
       await definition.after?.(result, parsed.data, actor);
       return { ok: true, message: null };
     } catch (error) {

@@ -9,7 +9,7 @@ export function HomeActions({ homeId, mayEdit, mayLog }: HomeActionsProps) {
     <>
       {mayLog ? <LinkButton href={to('log')}>Log work</LinkButton> : null}
       <nav aria-label="This home" className="-ml-2 flex flex-wrap">
-        {[['day', 'Today'], ['plan', 'Plan'], ['record', 'Record'], ['buy', 'Buy'], ['share', 'Share'], ...(mayEdit ? [['edit', 'Edit']] : [])].map(([page, label]) => (
+        {[['day', 'Today'], ...(mayLog ? [['walkaround', 'Walkaround']] : []), ['plan', 'Plan'], ['record', 'Record'], ['buy', 'Buy'], ['share', 'Share'], ...(mayEdit ? [['edit', 'Edit']] : [])].map(([page, label]) => (
           <LinkButton key={page} href={to(page ?? '')} look="plain">
             {label}
           </LinkButton>

@@ -2,6 +2,7 @@
 
 import { useRef, useState } from 'react';
 import { CoatPutOn } from '@/components/home/coat-put-on';
+import { OldFilmField } from '@/components/home/old-film-field';
 import { WorkCautions } from '@/components/home/work-cautions';
 import { ActionForm } from '@/components/ui/action-form';
 import { Button } from '@/components/ui/button';
@@ -31,7 +32,7 @@ const kinds: Choice[] = [
   { value: 'restain', label: 'Restain', hint: 'A coat on the wood' },
   { value: 'recaulk', label: 'Recaulk', hint: 'New caulk in the joints' },
   { value: 'wash', label: 'Wash', hint: 'Dirt and mildew off' },
-  { value: 'walkaround', label: 'Walkaround', hint: 'Looked at every wall' },
+  { value: 'walkaround', label: 'Walkaround', hint: 'Looked at every wall, without notes on each' },
 ];
 
 /** Logs work beside the wall: what, which walls, when; the rest may stay empty. */
@@ -58,6 +59,7 @@ export function LogForm(props: LogFormProps) {
       <DateInput label="Which day?" name="doneOn" defaultValue={today} max={today} quick={[{ label: 'Today', value: today }, { label: 'Yesterday', value: yesterday }]} />
       {kind === 'restain' ? <CoatPutOn units={units} /> : null}
       {kind === 'recaulk' ? <SelectField label="Caulk" name="sealant" options={sealants} empty="The same as before" /> : null}
+      {kind === 'restain' || kind === 'recaulk' ? <OldFilmField film={kind === 'restain' ? 'coat' : 'caulk'} /> : null}
       {kind === 'walkaround' ? null : <Field label="Product" name="product" optional maxLength={120} placeholder="As on the can" />}
       <div className="max-w-56">
         <Field label="Cost" name="cost" optional inputMode="decimal" unit="$" />

@@ -1,4 +1,5 @@
 import { type ReactNode } from 'react';
+import { FoundList } from '@/components/home/found-list';
 import { exactDay } from '@/lib/calendar-words';
 import { wallWords } from '@/lib/home/wall-words';
 import { finishes, sealants, stainBases, type UnitSystem, workKinds } from '@/lib/schemas/vocabulary';
@@ -47,6 +48,7 @@ export function RecordCourse({ record, walls, units, children }: RecordCoursePro
               {known.join(' · ')}
             </p>
           ) : null}
+          <FoundList findings={record.findings} walls={walls} />
           {record.note ? <p className="max-w-prose whitespace-pre-line">{record.note}</p> : null}
           <p className="text-sm text-quiet">{record.origin === 'recalled' ? 'As remembered when the wall was set up' : `Logged by ${record.byName ?? 'somebody who has left'}`}</p>
         </div>

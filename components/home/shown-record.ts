@@ -1,5 +1,6 @@
 import { type CalendarDay } from '@/lib/calendar';
-import { type Finish, type Sealant, type StainBase, type WorkKind } from '@/lib/schemas/vocabulary';
+import { type WalkaroundAnswers } from '@/lib/home/walkaround';
+import { type FilmState, type Finish, type Sealant, type StainBase, type WorkKind } from '@/lib/schemas/vocabulary';
 
 /** A piece of work as the record shows it. */
 export type ShownRecord = {
@@ -17,4 +18,6 @@ export type ShownRecord = {
   colorHex: string | null;
   sealant: Sealant | null;
   byName: string | null;
+  /** How the walls were found with this work. */
+  findings: readonly { wallId: string; coat: FilmState | null; seal: FilmState | null; answers: WalkaroundAnswers | null }[];
 };

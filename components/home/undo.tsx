@@ -7,7 +7,8 @@ type UndoProps = {
   done: string;
   label: string;
   action: (previous: ActionState, form: FormData) => Promise<ActionState>;
-  fields: Record<string, string>;
+  /** Hidden fields of the form; a list under a name like 'wallIds[]'. */
+  fields: Record<string, string | readonly string[]>;
 };
 
 /** Takes the last act back, right where it was done. */
@@ -16,9 +17,7 @@ export function Undo({ done, label, action, fields }: UndoProps) {
     <div className="course course-honey">
       <ActionForm action={action} className="within flex flex-wrap items-center gap-x-6 gap-y-3 py-4">
         <p className="font-semibold">{done}</p>
-        {Object.entries(fields).map(([name, value]) => (
-          <input key={name} type="hidden" name={name} value={value} />
-        ))}
+        {Object.entries(fields).flatMap(([name, values]) => [values].flat().map((value) => <input key={`${name} ${value}`} type="hidden" name={name} value={value} />))}
         <SubmitButton look="quiet" pendingLabel="Bringing it back…">
           {label}
         </SubmitButton>

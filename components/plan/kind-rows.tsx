@@ -8,7 +8,7 @@ import { type CalendarDay } from '@/lib/calendar';
 import { type PlanItem, type PlanVisit } from '@/lib/home/plan-view';
 import { workKinds, type WorkKind } from '@/lib/schemas/vocabulary';
 
-type KindRowsProps = { homeId: string; kind: WorkKind; items: PlanItem[]; visit: PlanVisit; today: CalendarDay; wallCount: number; mayLog: boolean };
+type KindRowsProps = { homeId: string; kind: WorkKind; items: PlanItem[]; visit: PlanVisit; today: CalendarDay; wallCount: number; mayLog: boolean; mayPutOff: boolean };
 
 /** Items with the same reason and days are one row. */
 function alike(items: PlanItem[]): PlanItem[][] {
@@ -21,7 +21,7 @@ function alike(items: PlanItem[]): PlanItem[][] {
 }
 
 /** One kind of work in a visit: on which walls, how it stands, why. */
-export function KindRows({ homeId, kind, items, visit, today, wallCount, mayLog }: KindRowsProps) {
+export function KindRows({ homeId, kind, items, visit, today, wallCount, mayLog, mayPutOff }: KindRowsProps) {
   const query = new URLSearchParams([['kind', kind], ...items.map((item) => ['wall', item.wallId])]);
   return (
     <div>
@@ -30,13 +30,18 @@ export function KindRows({ homeId, kind, items, visit, today, wallCount, mayLog 
           {workKinds[kind]}
           {items.length > 1 && items.length === wallCount ? ` all ${wallCount} walls` : ''}
         </h3>
-        {mayLog ? (
-          <span className="no-print">
-            <LinkButton href={`/homes/${homeId}/log?${query}`} look="plain">
-              Log this {workKinds[kind].toLowerCase()}
+        <span className="no-print flex flex-wrap">
+          {mayLog ? (
+            <LinkButton href={kind === 'walkaround' ? `/homes/${homeId}/walkaround?${query}` : `/homes/${homeId}/log?${query}`} look="plain">
+              {kind === 'walkaround' ? 'Walk around now' : `Log this ${workKinds[kind].toLowerCase()}`}
             </LinkButton>
-          </span>
-        ) : null}
+          ) : null}
+          {mayPutOff ? (
+            <LinkButton href={`/homes/${homeId}/put-off?${query}`} look="plain">
+              Put off
+            </LinkButton>
+          ) : null}
+        </span>
       </div>
       <ul>
         {alike(items).map((row) => (

@@ -3,13 +3,10 @@ import { type CalendarDay, dayIn } from '@/lib/calendar';
 import { planHome } from '@/lib/care';
 import { nextStageDay, stageOn } from '@/lib/care/stages';
 import { type HomePlan, type WorkItem } from '@/lib/care/types';
-import { climateAt, stationById } from '@/lib/climate';
 import { database, transaction } from '../client';
 import { home, wall, wallPlan, workItem } from '../schema';
-import { careHomeOf } from './care-home';
-import { refreshExposures } from './exposure';
+import { careHomeAt } from './care-home';
 import { type HomeRow } from './homes';
-import { wallsOfHome } from './walls';
 
 /**
  * Every change to a home, its walls or its records goes through here: one transaction that makes the change, recomputes the
@@ -27,15 +24,8 @@ export function changeHome<T>(homeId: string, now: Date, work: () => T): T {
 /** Writes the plan of a home as it stands at `now` (the day at the home). Throws when the home or its station does not exist. */
 export function replanHome(homeId: string, now: Date): void {
   transaction(() => {
-    const row = database().select().from(home).where(eq(home.id, homeId)).get();
-    if (!row) throw new Error('the home to plan does not exist');
-    const station = stationById(row.stationId);
-    if (!station) throw new Error(`the climate station ${row.stationId} does not exist`);
-    const climate = climateAt(station, row.elevationM);
-    const walls = wallsOfHome(homeId);
-    const doses = refreshExposures(row, climate, walls, now);
-    const today = dayIn(row.timeZone, now);
-    const plan = planHome(careHomeOf(row, climate, walls, doses), today);
+    const { row, home: planned, today } = careHomeAt(homeId, now);
+    const plan = planHome(planned, today);
     writePlan(row, plan, today, now);
   });
 }

@@ -4,11 +4,12 @@ import { type LogWorkInput } from '@/lib/schemas/work';
 import { database, transaction } from '../client';
 import { homeFor, recordFor } from '../scope';
 import { user, wall, workRecord, workRecordWall } from '../schema';
+import { type FindingFacts, findingsOf, foundBefore, writeFindings } from './findings';
 
 export type RecordRow = typeof workRecord.$inferSelect;
-export type RecordDetail = RecordRow & { wallIds: string[]; byName: string | null };
+export type RecordDetail = RecordRow & { wallIds: string[]; byName: string | null; findings: FindingFacts[] };
 
-/** Every record of a home that was not taken back, newest work first, with its walls and who wrote it. The caller has checked the home. */
+/** Every record of a home that was not taken back, newest work first, with its walls, who wrote it and how the walls were found. The caller has checked the home. */
 export function recordsOfHome(homeId: string): RecordDetail[] {
   const rows = database()
     .select({ record: workRecord, wallId: workRecordWall.wallId, byName: user.name })
@@ -18,9 +19,10 @@ export function recordsOfHome(homeId: string): RecordDetail[] {
     .where(and(eq(workRecord.homeId, homeId), isNull(workRecord.removedAt)))
     .orderBy(desc(workRecord.doneOn), desc(workRecord.createdAt), desc(workRecord.id))
     .all();
+  const findings = findingsOf(homeId);
   const byId = new Map<string, RecordDetail>();
   for (const { record, wallId, byName } of rows) {
-    const detail = byId.get(record.id) ?? { ...record, wallIds: [], byName };
+    const detail = byId.get(record.id) ?? { ...record, wallIds: [], byName, findings: findings.filter(({ recordId }) => recordId === record.id) };
     detail.wallIds.push(wallId);
     byId.set(record.id, detail);
   }
@@ -29,14 +31,16 @@ export function recordsOfHome(homeId: string): RecordDetail[] {
 
 export type LogResult = { record: RecordRow; isNew: boolean };
 
+type LoggedWork = Pick<LogWorkInput, 'homeId' | 'submissionKey' | 'kind' | 'doneOn' | 'wallIds'> & Partial<LogWorkInput>;
+
 /**
- * Logs a piece of work. The same submission arriving again returns the record that it made.
+ * Logs a piece of work, and how the walls were found with it. The same submission arriving again returns the record that it made.
  * Throws `Refused` when a wall is not (or no longer) one of this home's.
  */
-export function logWork(actor: Actor, input: Omit<LogWorkInput, 'homeId'> & { homeId: string }): LogResult {
+export function logWork(actor: Actor, input: LoggedWork, findings: readonly FindingFacts[] = []): LogResult {
   homeFor(actor, input.homeId, 'work.log');
   return transaction(() => {
-    const { wallIds, ...facts } = input;
+    const { wallIds, oldFilm, ...facts } = input;
     const standing = database()
       .select({ id: wall.id })
       .from(wall)
@@ -51,6 +55,7 @@ export function logWork(actor: Actor, input: Omit<LogWorkInput, 'homeId'> & { ho
       .get();
     if (!made) return { record: earlierSubmission(actor, input.submissionKey), isNew: false };
     database().insert(workRecordWall).values(wallIds.map((wallId) => ({ workRecordId: made.id, wallId }))).run();
+    writeFindings(made.id, oldFilm ? foundBefore(input.kind, wallIds, oldFilm) : findings);
     return { record: made, isNew: true };
   });
 }

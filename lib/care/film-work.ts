@@ -61,7 +61,8 @@ function computedTurn({ startedOn, lifeMonths, found }: FilmLife, seasons: Seaso
 /** What was seen goes before what was reckoned. */
 function afterLooking(byRule: CalendarDay, found: FilmLife['found']): CalendarDay {
   if (!found) return byRule;
-  if (found.state !== 'sound') return found.on < byRule ? found.on : byRule;
+  if (found.state === 'due') return found.on;
+  if (found.state === 'past due') return found.on < byRule ? found.on : byRule;
   const rested = addMonths(found.on, soundMonths);
   return rested > byRule ? rested : byRule;
 }

@@ -10,7 +10,8 @@ import { yearlyWork } from './yearly-work';
 
 const inPosition = (a: CareWall, b: CareWall) => a.position - b.position || (a.id < b.id ? -1 : 1);
 
-function planWall(home: CareHome, wall: CareWall, today: CalendarDay): WallPlan {
+/** The films and next work of one wall, before walls are gathered into visits. */
+export function planWall(home: CareHome, wall: CareWall, today: CalendarDay): WallPlan {
   const known = knownWall(home, wall);
   const { seasons } = home.seasons[known.wall.stainBase];
   const carried = (item: WorkItem | null) => item && carriedOver(putOff(item, home.deferrals, seasons), seasons, today);

@@ -13,9 +13,15 @@ const caulkFirst: Source = { text: 'Caulk takes up color with the next coat and 
 const nearSource: Source = { text: 'A recaulk due within 18 months of the wall’s restain joins it, if the caulk is not left more than 60 days past its life', ground: 'our rule' };
 const washSource: Source = { text: 'A restain begins with a wash, so the wash of that year is part of it', ground: 'our rule' };
 
+/** The day on which work is taken to be done: its date where the window holds it, else the nearest end of the window; once missed, the opening. Our rule. */
+export function dayOfVisit({ dueOn, window, missedOn }: Pick<WorkItem, 'dueOn' | 'window' | 'missedOn'>): CalendarDay {
+  if (missedOn || dueOn < window.opensOn) return window.opensOn;
+  return dueOn > window.closesOn ? window.closesOn : dueOn;
+}
+
 /** The restain's window for a recaulk, or null when the two are too far apart. */
 function sharedWindow(recaulkOn: CalendarDay, restain: WorkItem): Window | null {
-  const restainOn = restain.missedOn ? restain.window.opensOn : restain.dueOn;
+  const restainOn = dayOfVisit(restain);
   if (recaulkOn > addMonths(restainOn, nearMonths) || recaulkOn < addMonths(restainOn, -nearMonths)) return null;
   const limit = addDays(recaulkOn, graceDays);
   if (addDays(restain.window.opensOn, shortestDays) > limit) return null;

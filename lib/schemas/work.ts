@@ -1,11 +1,11 @@
 import { z } from 'zod';
 import { isCalendarDay } from '@/lib/calendar';
 import { choice, dollars, neededText, shortText } from '@/lib/schemas/measures';
-import { finishes, keysOf, sealants, stainBases, unitSystems, workKinds } from '@/lib/schemas/vocabulary';
+import { filmStates, finishes, keysOf, sealants, stainBases, unitSystems, workKinds } from '@/lib/schemas/vocabulary';
 
 const litresPerGallon = 3.785411784;
 
-const optionalChoice = <T extends [string, ...string[]]>(values: T) =>
+export const optionalChoice = <T extends [string, ...string[]]>(values: T) =>
   z.union([z.enum(values), z.literal('')]).optional().transform((value) => (value || undefined) as T[number] | undefined);
 
 const amount = z.string().trim().optional().transform((text, ctx) => {
@@ -31,6 +31,8 @@ const fields = z.object({
   stainBase: optionalChoice(keysOf(stainBases)),
   colorHex: z.union([z.string().regex(/^#[0-9a-fA-F]{6}$/, 'Choose a color.'), z.literal('')]).optional().transform((hex) => hex || undefined),
   sealant: optionalChoice(keysOf(sealants)),
+  /** How the coat or caulk that was renewed was found. */
+  oldFilm: optionalChoice(keysOf(filmStates)),
 });
 
 /** The log form: the amount in gallons or litres as typed; out come litres. What does not belong to the kind of work is dropped. */
@@ -47,6 +49,7 @@ export const logWorkSchema = fields.transform((form) => {
     stainBase: coat ? rest.stainBase : undefined,
     colorHex: coat ? rest.colorHex : undefined,
     sealant: rest.kind === 'recaulk' ? rest.sealant : undefined,
+    oldFilm: coat || rest.kind === 'recaulk' ? rest.oldFilm : undefined,
   };
 });
 

@@ -8,9 +8,9 @@ import { upcomingJobs } from '@/db/queries/job-list';
 import { recentJobRuns } from '@/db/queries/job-runs';
 import { listDeliveries, listMails, oneMail, retryMail } from '@/db/queries/mail-view';
 import { removeOwnRule, setOwnRule } from '@/db/queries/own-rules';
+import { takeUpWork } from '@/db/queries/put-off';
 import { membersOf, shareHome, withdrawShare } from '@/db/queries/sharing';
 import { siteFor } from '@/db/queries/site';
-import { careOfWall } from '@/db/queries/wall-care';
 import { addWall, removeWall, restoreWall, turnWalls, updateWall, wallOf, wallsOfHome } from '@/db/queries/walls';
 import { logWork, removeRecord, restoreRecord } from '@/db/queries/work';
 import { type Actor, can, homeVerbs, Refused, roleVerbs } from '@/lib/permissions';
@@ -31,6 +31,7 @@ const homeRights: Record<(typeof homeVerbs)[number], string> = {
   'home.edit': 'owner co-owner',
   'work.log': 'owner co-owner caretaker contractor',
   'work.remove': 'owner co-owner',
+  'work.putOff': 'owner co-owner',
   'home.share': 'owner',
   'home.archive': 'owner',
 };
@@ -104,12 +105,12 @@ const homeQueries: [name: string, verb: keyof typeof homeRights, call: (actor: A
   ['removeWall', 'home.edit', (actor, { wallId }) => removeWall(actor, wallId, now)],
   ['restoreWall', 'home.edit', (actor, { homeId, wallId }) => restoreWall(actor, homeId, wallId)],
   ['turnWalls', 'home.edit', (actor, { homeId }) => turnWalls(actor, homeId, 10)],
-  ['careOfWall', 'home.edit', (actor, { homeId, wallId }) => careOfWall(actor, homeId, wallId, now)],
   ['setOwnRule', 'home.edit', (actor, { homeId, wallId }) => setOwnRule(actor, homeId, wallId, 'wash', { rule: 'FREQ=YEARLY', startOn: '2027-05-01' })],
   ['removeOwnRule', 'home.edit', (actor, { homeId, wallId }) => removeOwnRule(actor, homeId, wallId, 'wash')],
   ['logWork', 'work.log', (actor, { homeId, wallId }) => logWork(actor, work(homeId, wallId))],
   ['removeRecord', 'work.remove', (actor, { recordId }) => removeRecord(actor, recordId, now)],
   ['restoreRecord', 'work.remove', (actor, { removedId }) => restoreRecord(actor, removedId)],
+  ['takeUpWork', 'work.putOff', (actor, { homeId, wallId }) => takeUpWork(actor, homeId, 'restain', [wallId], now)],
   ['shareHome', 'home.share', (actor, { homeId }) => shareHome(actor, homeId, 'nobody@example.test', 'caretaker')],
   ['withdrawShare', 'home.share', (actor, { homeId }) => withdrawShare(actor, homeId, 'nobody')],
   ['archiveHome', 'home.archive', (actor, { homeId }) => archiveHome(actor, homeId, now)],

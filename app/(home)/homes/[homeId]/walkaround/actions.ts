@@ -1,0 +1,38 @@
+'use server';
+
+import { revalidatePath } from 'next/cache';
+import { redirect } from 'next/navigation';
+import { defineAction, FieldFault } from '@/app/_server/action';
+import { say } from '@/app/_server/said';
+import { homeView } from '@/db/queries/home-view';
+import { homeOf } from '@/db/queries/homes';
+import { changeHome } from '@/db/queries/replan';
+import { logWork } from '@/db/queries/work';
+import { dayIn } from '@/lib/calendar';
+import { learnedChange } from '@/lib/home/learned-change';
+import { dayNotYet } from '@/lib/home/not-yet';
+import { planChange } from '@/lib/home/plan-change';
+import { walkaroundSchema } from '@/lib/schemas/walkaround';
+
+/** Keeps a walkaround; the plan moves by what was seen, and the home's page says by how much and why. */
+export const keepWalkaround = defineAction({
+  verb: 'work.log',
+  schema: walkaroundSchema,
+  run: (actor, { homeId, submissionKey, doneOn, note, findings }) => {
+    const now = new Date();
+    const { home } = homeOf(actor, homeId, 'work.log');
+    const today = dayIn(home.timeZone, now);
+    if (doneOn > today) return new FieldFault({ doneOn: dayNotYet(doneOn, today) });
+    const before = homeView(actor, homeId).walls;
+    const work = { homeId, submissionKey, kind: 'walkaround' as const, doneOn, note, wallIds: findings.map(({ wallId }) => wallId) };
+    changeHome(homeId, now, () => logWork(actor, work, findings));
+    const after = homeView(actor, homeId).walls;
+    const items = (walls: typeof before) => walls.flatMap((wall) => wall.items);
+    return [...planChange(items(before), items(after), after.map(({ wall }) => wall)), ...learnedChange(before, after)];
+  },
+  after: async (changes, { homeId }) => {
+    await say(['Walkaround kept.', ...(changes.length > 0 ? changes : ['Nothing in the plan moves.'])].join(' '));
+    revalidatePath(`/homes/${homeId}`, 'layout');
+    redirect(`/homes/${homeId}`);
+  },
+});
