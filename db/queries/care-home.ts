@@ -2,6 +2,7 @@ import { eq } from 'drizzle-orm';
 import { type CalendarDay, dayIn } from '@/lib/calendar';
 import { type CareHome } from '@/lib/care/types';
 import { type Climate, climateAt, coatingSeason, stationById } from '@/lib/climate';
+import { coverOfStored } from '@/lib/home/cover';
 import { wallJointM } from '@/lib/home/wall-joints';
 import { wallAreaM2 } from '@/lib/takeoff';
 import { database } from '../client';
@@ -42,6 +43,7 @@ function careHomeOf(row: HomeRow, climate: Climate, walls: WallDetail[], doses: 
     since: dayIn(row.timeZone, row.createdAt),
     walls: walls.map(({ wall, openings }) => ({
       ...wall,
+      cover: coverOfStored(wall),
       wood: row.wood,
       areaM2: wallAreaM2({ ...wall, openings }),
       jointM: wallJointM({ ...wall, openings }, row.sidingNominalIn),

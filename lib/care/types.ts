@@ -4,6 +4,7 @@ import { type WorkCosts } from './costs';
 import { type Grouping } from './grouping';
 import { type LearnedStep } from '@/lib/coat/learning';
 import { type FilmState, type Finish, type Sealant, type StainBase, type Texture, type WorkKind, type Wood } from '@/lib/schemas/vocabulary';
+import { type WallCover } from '@/lib/sun';
 
 /** One wall as the care rules see it. Lengths in m, areas in m², dose in kWh/m² a year. */
 export type CareWall = {
@@ -13,6 +14,8 @@ export type CareWall = {
   azimuthDeg: number;
   heightM: number;
   eaveDepthM: number;
+  /** A porch roof or a deck above. */
+  cover?: WallCover | undefined;
   weatherSide: boolean;
   /** Flat area of wood. */
   areaM2: number;

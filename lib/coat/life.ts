@@ -1,7 +1,7 @@
 import { type ExplainedInput, type Explanation } from '@/lib/explain';
 import { monthsInWords } from './life-words';
 import { type ServiceLife } from './service-life';
-import { severityInputs, severityOf, severitySources, type Weathering, type Weights } from './severity';
+import { severityInputs, severityOf, sourcesOfSeverity, type Weathering, type Weights } from './severity';
 
 /** How long a film lasts on one wall. */
 export type Life = {
@@ -42,7 +42,7 @@ export function filmLife(film: Film, weathering: Weathering): Life {
         ...severityInputs(weathering, film.weights),
         { label: 'The wall’s own factor', value: film.factor.toFixed(2) },
       ],
-      sources: [source, ...severitySources],
+      sources: [source, ...sourcesOfSeverity(weathering)],
     },
   };
 }

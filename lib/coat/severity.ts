@@ -1,4 +1,5 @@
 import { type ExplainedInput, type Source } from '@/lib/explain';
+import { coverOf, type WallCover } from '@/lib/sun/wall-face';
 
 /** What wears a film on one wall. */
 export type Weathering = {
@@ -12,6 +13,8 @@ export type Weathering = {
   eaveDepthM: number;
   /** True for a wall that faces the driving rain. */
   weatherSide: boolean;
+  /** A porch roof or a deck above. */
+  cover?: WallCover | undefined;
 };
 
 /** How much sun and rain count; the two add up to 1. */
@@ -31,9 +34,26 @@ const clamp = (x: number) => Math.min(1, Math.max(0, x));
 /** Sun share, 0–1: where the dose lies between 250 and 1350 kWh/m² a year. Our rule. Example: 800 → 0.5. */
 export const sunShare = (doseKwhM2: number): number => clamp((doseKwhM2 - gentlestDose) / (hardestDose - gentlestDose));
 
-/** Share of the rain that reaches the wall, 0.3–1. Our rule. Example: a 0.6 m eave over 2.4 m of wall → 0.65. */
-export function rainExposure({ heightM, eaveDepthM, weatherSide }: Pick<Weathering, 'heightM' | 'eaveDepthM' | 'weatherSide'>): number {
-  const sheltered = clamp(Math.max(0, eaveDepthM) / (shelteringDepth * heightM));
+/** How far an overhang shelters the wall under it, 0–1: in full when it is half as deep as that wall is high. Our rule. */
+const shelter = (depthM: number, heightM: number) => clamp(Math.max(0, depthM) / (shelteringDepth * heightM));
+
+/** The part of the wall's area under its cover, and how deep the cover is for the height of that part. */
+function underCover({ heightM, cover }: Pick<Weathering, 'heightM' | 'cover'>) {
+  const over = coverOf({ cover });
+  if (!over) return undefined;
+  const below = Math.min(over.heightM, heightM);
+  return { area: (over.share * below) / heightM, share: over.share, deep: over.depthM / below, sheltered: shelter(over.depthM, below) };
+}
+
+/**
+ * Share of the rain that reaches the wall, 0.3–1. Our rule. What is under a cover counts by its area, sheltered by the cover or the
+ * eave, whichever shelters more. Examples: a 0.6 m eave over 2.4 m of wall → 0.65; no eave, and half of the width under a porch roof
+ * 1.2 m deep and 2.4 m up → 0.65.
+ */
+export function rainExposure({ heightM, eaveDepthM, weatherSide, cover }: Pick<Weathering, 'heightM' | 'eaveDepthM' | 'weatherSide' | 'cover'>): number {
+  const byEave = shelter(eaveDepthM, heightM);
+  const under = underCover({ heightM, cover });
+  const sheltered = under ? (1 - under.area) * byEave + under.area * Math.max(byEave, under.sheltered) : byEave;
   return Math.min(1, (1 - (1 - shelteredShare) * sheltered) * (weatherSide ? weatherSideFactor : 1));
 }
 
@@ -44,19 +64,27 @@ export const rainShare = (weathering: Weathering): number => clamp(weathering.sc
 export const severityOf = (weathering: Weathering, weights: Weights): number =>
   clamp(weights.sun * sunShare(weathering.doseKwhM2) + weights.rain * rainShare(weathering));
 
-export const severitySources: Source[] = [
+const severitySources: Source[] = [
   { text: 'Where on the published range a wall falls: sun share (dose − 250) / 1100 kWh/m², rain share Scheffer / 100 × exposure', ground: 'our rule' },
   { text: 'Scheffer, A climate index for estimating potential for decay in wood structures above ground, Forest Products Journal 21(10), 1971', ground: 'published' },
 ];
 
+/** Named only where a wall has a cover. */
+const coverSource: Source = { text: 'Under a porch roof or a deck rain is kept off as under an eave of its depth; what is under it counts by its area', ground: 'our rule' };
+
+export const sourcesOfSeverity = (weathering: Weathering): Source[] => (underCover(weathering) ? [...severitySources, coverSource] : severitySources);
+
 const share = (x: number) => x.toFixed(2);
+const percent = (x: number) => `${Math.round(x * 100)} %`;
 
 export function severityInputs(weathering: Weathering, weights: Weights): ExplainedInput[] {
   const { doseKwhM2, scheffer, heightM, eaveDepthM, weatherSide } = weathering;
+  const under = underCover(weathering);
   return [
     { label: 'Sun dose', value: `${Math.round(doseKwhM2)} kWh/m² a year` },
     { label: 'Scheffer index', value: String(Math.round(scheffer)) },
-    { label: 'Eave depth', value: `${Math.round((eaveDepthM / heightM) * 100)} % of the wall's height` },
+    { label: 'Eave depth', value: `${percent(eaveDepthM / heightM)} of the wall's height` },
+    ...(under ? [{ label: 'Porch roof or deck', value: `over ${percent(under.share)} of the width, ${percent(under.deep)} as deep as the wall under it is high` }] : []),
     { label: 'Weather side', value: weatherSide ? 'yes' : 'no' },
     { label: `Sun share, weight ${weights.sun.toFixed(2)}`, value: share(sunShare(doseKwhM2)) },
     { label: `Rain share, weight ${weights.rain.toFixed(2)}`, value: share(rainShare(weathering)) },

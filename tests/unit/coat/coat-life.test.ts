@@ -129,3 +129,44 @@ describe('explanations', () => {
     expect(sealLife({ ...input({ doseKwhM2: 1350, scheffer: 0 }), sealant: 'acrylic-latex' })).toMatchObject({ months: 84, lowYears: 5, highYears: 10 });
   });
 });
+
+describe('a coat under a porch roof or a deck', () => {
+  // Rain alone, as above: dose 250; severity 0.35 × exposure on a wall 2.5 m high.
+  const rain = (values: Partial<CoatInput>) => coatLife(input({ doseKwhM2: 250, scheffer: 100, ...values }));
+  const porch = (values = {}) => ({ depthM: 2.4, heightM: 2, share: 0.5, ...values });
+
+  it('is sheltered by area, worked by hand', () => {
+    // 0.5 × 2 / 2.5 = 0.4 of the wall is under it, deeper than half of its 2 m: 1 − 0.7 × 0.4 = 0.72.
+    expect(rain({ cover: porch() }).severity).toBeCloseTo(0.35 * 0.72, 12);
+    // 0.5 m deep: half sheltered; 1 − 0.7 × 0.4 × 0.5 = 0.86.
+    expect(rain({ cover: porch({ depthM: 0.5 }) }).severity).toBeCloseTo(0.35 * 0.86, 12);
+    // An eave of 0.625 m shelters by half; under the porch wholly: 1 − 0.7 × (0.6 × 0.5 + 0.4) = 0.51.
+    expect(rain({ cover: porch(), eaveDepthM: 0.625 }).severity).toBeCloseTo(0.35 * 0.51, 12);
+    // All of it under a deck at its top: an eave of that depth.
+    expect(rain({ cover: porch({ heightM: 2.5, share: 1 }) }).severity).toBeCloseTo(0.35 * 0.3, 12);
+  });
+
+  it('never shortens a life and never keeps more off than the deepest eave; without one nothing changes', () => {
+    const metres = (min: number, max: number) => fc.double({ min, max, noNaN: true });
+    fc.assert(
+      fc.property(metres(1.5, 8), metres(0, 3), fc.boolean(), fc.record({ depthM: metres(0.3, 5), heightM: metres(0.5, 9), share: metres(0, 1) }), (heightM, eaveDepthM, weatherSide, cover) => {
+        const bare = input({ heightM, eaveDepthM, weatherSide });
+        const covered = coatLife({ ...bare, cover });
+        expect(covered.severity).toBeLessThanOrEqual(coatLife(bare).severity + 1e-12);
+        expect(covered.severity).toBeGreaterThanOrEqual(coatLife({ ...bare, eaveDepthM: heightM }).severity - 1e-12);
+        expect(sealLife({ ...bare, sealant: 'silicone', cover }).months).toBeGreaterThanOrEqual(sealLife({ ...bare, sealant: 'silicone' }).months);
+        for (const none of [undefined, { ...cover, share: 0 }, { ...cover, depthM: 0 }]) expect(coatLife({ ...bare, cover: none })).toEqual(coatLife(bare));
+      }),
+    );
+  });
+
+  it('is named among what the life came from, and only then', () => {
+    const named = { label: 'Porch roof or deck', value: 'over 50 % of the width, 120 % as deep as the wall under it is high' };
+    for (const { explanation } of [coatLife(input({ cover: porch() })), sealLife({ ...input({ cover: porch() }), sealant: 'silicone' })]) {
+      expect(explanation.inputs).toContainEqual(named);
+      expect(explanation.sources.at(-1)).toMatchObject({ ground: 'our rule', text: expect.stringContaining('porch roof') as string });
+    }
+    expect(coatLife(input()).explanation.inputs.map(({ label }) => label)).not.toContain(named.label);
+    expect(coatLife(input()).explanation.sources.map(({ text }) => text).join()).not.toContain('porch roof');
+  });
+});
