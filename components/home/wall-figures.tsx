@@ -2,18 +2,20 @@ import { Figure } from '@/components/ui/figure';
 import { monthsInWords } from '@/lib/coat';
 import { type CalendarDay } from '@/lib/calendar';
 import { type FilmLife } from '@/lib/care/types';
+import { type Station } from '@/lib/climate';
+import { type StoredCover } from '@/lib/home/cover';
 import { leftExplained, sunDoseExplained, sunHoursExplained } from '@/lib/home/explained';
 import { type Shade, type UnitSystem } from '@/lib/schemas/vocabulary';
 
 type WallFiguresProps = {
   planned: {
-    wall: { name: string; azimuthDeg: number; eaveDepthM: number; shade: Shade; shadeHeightDeg: number };
+    wall: { name: string; azimuthDeg: number; eaveDepthM: number; shade: Shade; shadeHeightDeg: number } & StoredCover;
     exposure: { sunHours: number; doseKwhM2: number } | null;
     coat: FilmLife;
     seal: FilmLife;
   };
-  home: { latitude: number; longitude: number };
-  station: { name: string; state: string } | undefined;
+  home: { latitude: number; longitude: number; elevationM: number | null };
+  station: Station | undefined;
   today: CalendarDay;
   units: UnitSystem;
   films: readonly ('coat' | 'seal')[];

@@ -2,6 +2,7 @@ import { type ComponentProps } from 'react';
 import { WallFigures } from '@/components/home/wall-figures';
 import { Course } from '@/components/ui/course';
 import { directionWord } from '@/lib/home/direction';
+import { coverWords } from '@/lib/home/cover';
 import { wallMeasures } from '@/lib/home/wall-measures';
 import { finishes, type Finish, type Sealant, sealants, type StainBase, stainBases, type Texture, textures } from '@/lib/schemas/vocabulary';
 import { smallLengthText } from '@/lib/units';
@@ -19,6 +20,7 @@ type SharedWallProps = Omit<FigureProps, 'planned' | 'home' | 'films'> & {
 export function SharedWall({ planned, home, station, today, units }: SharedWallProps) {
   const { wall, openings } = planned;
   const eave = wall.eaveDepthM > 0 ? `Eave ${smallLengthText(wall.eaveDepthM, units)} deep` : 'No eave';
+  const cover = coverWords(wall, units);
   return (
     <Course id={`wall-${wall.id}`} heading={wall.name} aside={`faces ${directionWord(wall.azimuthDeg)}`} level={3}>
       <p className="text-lg">{wallMeasures(wall, openings, home.sidingNominalIn, units).words}</p>
@@ -27,7 +29,7 @@ export function SharedWall({ planned, home, station, today, units }: SharedWallP
         {[finishes[wall.finish], wall.colorName, stainBases[wall.stainBase], textures[wall.texture]].filter(Boolean).join(' · ')}
       </p>
       <p>
-        {sealants[wall.sealant]} caulk · {eave}
+        {[`${sealants[wall.sealant]} caulk`, eave, cover].filter(Boolean).join(' · ')}
       </p>
       <div className="mt-2 grid max-w-4xl gap-x-10 sm:grid-cols-2 sm:[&>details[open]]:col-span-full">
         <WallFigures planned={planned} home={home} station={station} today={today} units={units} films={['coat', 'seal']} />
