@@ -1,4 +1,5 @@
 import { addMonths, type CalendarDay, daysBetween } from '@/lib/calendar';
+import { exactDay } from '@/lib/calendar-words';
 import { type WorkKind } from '@/lib/schemas/vocabulary';
 import { knownWall } from './films';
 import { ruleInWords } from './own-rule';
@@ -48,6 +49,14 @@ function monthsPast({ startedOn, lifeMonths }: FilmLife, days: CalendarDay[]): n
 
 const windowOf = (kind: WorkKind, dueOn: CalendarDay, seasons: SeasonMonths[]): Window => (isFilm(kind) ? windowFor(dueOn, seasons, dueOn) : monthWindow(dueOn));
 
+/** The plan looks forty years ahead for yearly work; a day so far off is not the reason that the last one is done. */
+const farMonths = 12 * 39;
+
+function whyNoWork([next]: CalendarDay[], today: CalendarDay): string {
+  const far = next !== undefined && next > addMonths(today, farMonths);
+  return far ? `The next day of this rule is ${exactDay(next)}: that is too far ahead to plan for.` : 'This rule has no day left: the work of its last one is done.';
+}
+
 /**
  * An owner's own rule before it is saved: the days on which it falls, with the window that each would get, or why it is refused.
  * A rule that is accepted always gives the plan a piece of work on one of its days.
@@ -64,7 +73,7 @@ export function previewOwnRule(home: CareHome, own: OwnRule, today: CalendarDay)
   if (stuck) return stuck;
   const same = sameWork(own);
   const item = planned(home, own, [...home.ownRules.filter((one) => !same(one)), own], today);
-  if (!item) return { ok: false, about: 'rule', error: 'This rule has no day left: the work of its last one is done.' };
+  if (!item) return { ok: false, about: 'rule', error: whyNoWork(shown.days, today) };
   const later = shown.days.filter((day) => day > item.dueOn);
   const { seasons } = home.seasons[wall.stainBase];
   const windows = later.map((dueOn) => ({ dueOn, window: windowOf(own.kind, dueOn, seasons) }));

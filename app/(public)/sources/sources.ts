@@ -104,6 +104,7 @@ export const ownRules = [
   'When a month counts as good, marginal or no: on published limits of temperature, and the chance of three dry days in a row.',
   'That a raw date moves into the coating season, never later than 60 days after the coat is used up; that work which missed its season moves to the coming one and stays overdue.',
   'That caulk due within 18 months of a restain joins it, and that a restain begins with a wash.',
+  'A rule of your own falls at most once in 28 days, starts within 50 years of today, and a rule for restaining or recaulking must fall on some day whenever logged work restarts it.',
   'When a reminder goes out: 120 days before to book, 28 days before to buy, on the opening day, and 14, 45 and 105 days after a chance has passed.',
   'A day without rain before and after the work; no stain above 90 °F (32 °C); caulk kept from frost for a night; oil stain kept above its 40 °F (4 °C) through the night.',
   'The order in which work follows the shade: by the middle of each wall’s longest time out of the sun; trees count as shade when less than half of the light passes.',
