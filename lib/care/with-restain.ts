@@ -1,4 +1,4 @@
-import { addDays, addMonths, type CalendarDay, yearOf } from '@/lib/calendar';
+import { addDays, addMonths, type CalendarDay, dayOf, yearOf } from '@/lib/calendar';
 import { aboutDay, exactDay, exactRange } from '@/lib/calendar-words';
 import { type Source } from '@/lib/explain';
 import { type Window, type WorkItem } from './types';
@@ -20,12 +20,19 @@ export function dayOfVisit({ dueOn, window, missedOn }: Pick<WorkItem, 'dueOn' |
 }
 
 /** The restain's window for a recaulk, or null when the two are too far apart. */
-function sharedWindow(recaulkOn: CalendarDay, restain: WorkItem): Window | null {
+export function restainWindowFor(recaulkOn: CalendarDay, restain: Pick<WorkItem, 'dueOn' | 'window' | 'missedOn'>): Window | null {
   const restainOn = dayOfVisit(restain);
   if (recaulkOn > addMonths(restainOn, nearMonths) || recaulkOn < addMonths(restainOn, -nearMonths)) return null;
   const limit = addDays(recaulkOn, graceDays);
   if (addDays(restain.window.opensOn, shortestDays) > limit) return null;
   return { ...restain.window, closesOn: restain.window.closesOn < limit ? restain.window.closesOn : limit };
+}
+
+/** The part of a window that lies in a year: a wash settles the wash of its own year, so it is not moved out of it. */
+function withinYear(window: Window, year: number): Window | null {
+  const [first, last] = [dayOf(year, 1, 1), dayOf(year, 12, 31)];
+  if (window.closesOn < first || window.opensOn > last) return null;
+  return { ...window, opensOn: window.opensOn > first ? window.opensOn : first, closesOn: window.closesOn < last ? window.closesOn : last };
 }
 
 function moved(item: WorkItem, window: Window, because: string, restain: WorkItem, sources: Source[]): WorkItem {
@@ -49,10 +56,10 @@ function moved(item: WorkItem, window: Window, because: string, restain: WorkIte
 export function withRestain(item: WorkItem | null, restain: WorkItem | null): WorkItem | null {
   if (!item || !restain || !['computed', 'found'].includes(item.basis)) return item;
   if (item.kind === 'recaulk') {
-    const window = sharedWindow(item.dueOn, restain);
+    const window = restainWindowFor(item.dueOn, restain);
     const because = `Caulk goes on before stain, so it is done with this wall’s restain and left to cure as its label says; on its own the caulk would last until ${aboutDay(item.dueOn)}.`;
     return window ? moved(item, window, because, restain, [caulkFirst, nearSource]) : item;
   }
-  const inYear = [restain.window.opensOn, restain.window.closesOn].some((day) => yearOf(day) === yearOf(item.dueOn));
-  return item.kind === 'wash' && inYear ? moved(item, restain.window, 'The restain of this wall begins with a wash.', restain, [washSource]) : item;
+  const window = withinYear(restain.window, yearOf(item.dueOn));
+  return item.kind === 'wash' && window ? moved(item, window, 'The restain of this wall begins with a wash.', restain, [washSource]) : item;
 }

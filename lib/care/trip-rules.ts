@@ -1,0 +1,52 @@
+import { addMonths, type CalendarDay, daysBetween } from '@/lib/calendar';
+import { type Source } from '@/lib/explain';
+import { type FilmJob } from './film-jobs';
+import { stripAtShare } from './stripping';
+import { type Window } from './types';
+import { dayOfVisit } from './with-restain';
+
+const daysInMonth = 30.44;
+
+export const joinSource: Source = { text: 'A wall due within so many months of a trip joins it when the share of film life thrown away costs less than another trip', ground: 'our rule' };
+export const visitDaySource: Source = { text: 'A trip is reckoned to take place on the day on which its first film is used up, or on the nearest day of its window', ground: 'our rule' };
+
+/** The day on which a trip for this work is reckoned to take place; not before a given day. */
+export function visitDay(job: Pick<FilmJob, 'dueOn' | 'window' | 'missedOn'>, notBefore: CalendarDay | null): CalendarDay {
+  const day = dayOfVisit(job);
+  return notBefore !== null && notBefore > day ? notBefore : day;
+}
+
+export const holds = (window: Window, day: CalendarDay): boolean => window.opensOn <= day && day <= window.closesOn;
+
+/** Months of a film's life that are left when it is renewed on a day; 0 once it is used up. */
+export const thrownAwayMonths = (on: CalendarDay, usedUpOn: CalendarDay): number => Math.max(0, daysBetween(on, usedUpOn) / daysInMonth);
+
+/** Whether a coat renewed on a day has to be stripped first: it is older than 1.15 times its life. Our rule. */
+export const needsStripping = (on: CalendarDay, { kind, usedUpOn, lifeMonths }: Pick<FilmJob, 'kind' | 'usedUpOn' | 'lifeMonths'>): boolean =>
+  kind === 'restain' && daysBetween(usedUpOn, on) / daysInMonth / lifeMonths > stripAtShare - 1;
+
+/** What renewing a film early throws away: the share of its life that is left, in cents of its renewal. */
+export const wasteCents = (months: number, { lifeMonths, cents }: Pick<FilmJob, 'lifeMonths' | 'cents'>): number => (months / lifeMonths) * cents;
+
+/** A job that would join a trip early, with the caulk that goes where its restain goes, and what that throws away. */
+export type Joining = { job: FilmJob; caulk: FilmJob | null; months: number; wasteCents: number };
+
+/**
+ * What joins a trip on a day although its window opens later: work whose window opens within `joinMonths` of the trip and whose
+ * film life thrown away costs less than another trip. Caulk that belongs to a restain goes with it; it counts for no more months
+ * than the coat, because it would have gone early with the coat in any case.
+ *
+ * Example: a coat of 60 months for $140, renewed 12 months early: 12 / 60 × $140 = $28, less than a trip of $90, so it joins.
+ */
+export function joinings(jobs: readonly FilmJob[], on: CalendarDay, joinMonths: number, tripCents: number): Joining[] {
+  if (joinMonths <= 0) return [];
+  const limit = addMonths(on, joinMonths);
+  return jobs.flatMap((job): Joining[] => {
+    if (!job.mayJoin || job.withRestain || job.window.opensOn <= on || job.window.opensOn > limit) return [];
+    const caulk = (job.kind === 'restain' && jobs.find(({ wallId, withRestain }) => withRestain && wallId === job.wallId)) || null;
+    const months = thrownAwayMonths(on, job.usedUpOn);
+    const ofCaulk = caulk ? wasteCents(Math.min(months, thrownAwayMonths(on, caulk.usedUpOn)), caulk) : 0;
+    const waste = wasteCents(months, job) + ofCaulk;
+    return waste < tripCents ? [{ job, caulk, months, wasteCents: waste }] : [];
+  });
+}
