@@ -5,9 +5,6 @@ import { lengthText } from '@/lib/units';
 /** The cover of a wall as it is stored: what was entered stays when there is none. Lengths in m. */
 export type StoredCover = { cover: Cover; coverDepthM: number; coverHeightM: number; coverShare: number };
 
-/** Shares of a wall's width that a form offers; keys are what it sends. */
-export const coverShares = { '0.25': 'A quarter of it', '0.5': 'Half of it', '0.75': 'Three quarters', '1': 'All of it' } as const;
-
 /** The porch roof or deck of a stored wall as the sun and the rain see it. */
 export const coverOfStored = ({ cover, coverDepthM, coverHeightM, coverShare }: StoredCover): WallCover | undefined =>
   cover === 'none' ? undefined : { depthM: coverDepthM, heightM: coverHeightM, share: coverShare };

@@ -1,5 +1,7 @@
+import { type StoredCover } from '@/lib/home/cover';
 import { lengthInput } from '@/lib/home/length-input';
-import { type UnitSystem } from '@/lib/schemas/vocabulary';
+import { type Cover, type UnitSystem } from '@/lib/schemas/vocabulary';
+import { coverShares } from '@/lib/schemas/wall-cover';
 
 type StoredWall = { widthM: number; heightM: number; gableHeightM: number; eaveDepthM: number; eaveDropM: number; azimuthDeg: number };
 type StoredOpening = { kind: 'window' | 'door'; widthM: number; heightM: number; count: number };
@@ -8,6 +10,17 @@ type StoredOpening = { kind: 'window' | 'door'; widthM: number; heightM: number;
 export function wallLengths(wall: StoredWall, units: UnitSystem) {
   const text = (metres: number) => lengthInput(metres, units);
   return { width: text(wall.widthM), height: text(wall.heightM), gableHeight: text(wall.gableHeightM), eaveDepth: text(wall.eaveDepthM), eaveDrop: text(wall.eaveDropM), azimuthDeg: Number(wall.azimuthDeg.toFixed(2)) };
+}
+
+export type CoverValues = { cover: Cover; coverDepth: string; coverHeight: string; coverShare: (typeof coverShares)[number] };
+
+export const noCover: CoverValues = { cover: 'none', coverDepth: '', coverHeight: '', coverShare: '1' };
+
+/** A stored porch roof or deck as its form shows it; a length that was never given is empty, a share the nearest that is offered. */
+export function coverValues({ cover, coverDepthM, coverHeightM, coverShare }: StoredCover, units: UnitSystem): CoverValues {
+  const text = (metres: number) => (metres > 0 ? lengthInput(metres, units) : '');
+  const off = (share: string) => Math.abs(Number(share) - coverShare);
+  return { cover, coverDepth: text(coverDepthM), coverHeight: text(coverHeightM), coverShare: coverShares.reduce((best, share) => (off(share) < off(best) ? share : best), '1') };
 }
 
 export const openingValues = (openings: readonly StoredOpening[], units: UnitSystem) =>

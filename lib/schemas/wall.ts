@@ -1,7 +1,8 @@
 import { z } from 'zod';
 import { isCalendarDay } from '@/lib/calendar';
 import { checkbox, choice, neededText, readLength, shortText } from '@/lib/schemas/measures';
-import { finishes, keysOf, sealants, shades, stainBases, textures, unitSystems } from '@/lib/schemas/vocabulary';
+import { coverShares, readCover } from '@/lib/schemas/wall-cover';
+import { covers, finishes, keysOf, sealants, shades, stainBases, textures, unitSystems } from '@/lib/schemas/vocabulary';
 
 /** Plausible sizes of a house's parts, m. Our rule. */
 export const sizes = {
@@ -58,6 +59,10 @@ const wallFields = coatSchema.extend({
   azimuthDeg: azimuth,
   shade: choice(keysOf(shades), 'what stands in front'),
   shadeHeightDeg: z.coerce.number({ error: 'Height of the shade should be a number of degrees.' }).min(0).max(80, 'At most 80 degrees.').default(0),
+  cover: choice(keysOf(covers), 'what is over it').default('none'),
+  coverShare: choice(coverShares, 'how much of the width is under it').default('1').transform(Number),
+  corners: z.coerce.number({ error: 'How many corners?' }).int('How many corners? A whole number.').min(0, 'None is 0.').max(2, 'A wall has at most two corners.').default(2),
+  pipes: z.coerce.number({ error: 'How many pipes and fittings?' }).int('How many pipes and fittings? A whole number.').min(0, 'None is 0.').max(100, 'At most 100.').default(0),
   weatherSide: checkbox,
   openings: z.record(z.string().regex(/^\d+$/), opening).default({}),
   stained: recalledDay('stained'),
@@ -69,16 +74,18 @@ const typedOpening = z.object({ width: typed, height: typed }).catch({});
 
 /** The lengths of the wall form, read on their own so that every wrong field is marked at once. In m. */
 const wallLengths = z
-  .object({ units: lengthUnits, width: typed, height: typed, gableHeight: typed, eaveDepth: typed, eaveDrop: typed, openings: z.record(z.string(), typedOpening).catch({}) })
+  .object({ units: lengthUnits, width: typed, height: typed, gableHeight: typed, eaveDepth: typed, eaveDrop: typed, cover: typed, coverDepth: typed, coverHeight: typed, openings: z.record(z.string(), typedOpening).catch({}) })
   .transform(({ units, openings, ...form }, ctx) => {
     const read = (text: string | undefined, size: keyof typeof sizes, ...path: string[]) => readLength(text, units, sizes[size], ctx, path);
+    const heightM = read(form.height, 'height', 'height');
     return {
       metres: {
         widthM: read(form.width, 'width', 'width'),
-        heightM: read(form.height, 'height', 'height'),
+        heightM,
         gableHeightM: read(form.gableHeight, 'gable', 'gableHeight'),
         eaveDepthM: read(form.eaveDepth, 'eaveDepth', 'eaveDepth'),
         eaveDropM: read(form.eaveDrop, 'eaveDrop', 'eaveDrop'),
+        ...readCover(form, units, heightM, ctx),
       },
       openingMetres: Object.entries(openings).map(([row, one]) => ({
         row,

@@ -6,7 +6,7 @@ import { PageHead } from '@/components/ui/page-head';
 import { homeOf } from '@/db/queries/homes';
 import { unitsOf } from '@/db/queries/units';
 import { dayIn } from '@/lib/calendar';
-import { wallLengths } from '@/lib/home/form-values';
+import { noCover, wallLengths } from '@/lib/home/form-values';
 import { addWallToHome } from '../actions';
 
 export const metadata: Metadata = { title: 'Add a wall' };
@@ -22,7 +22,7 @@ export default async function NewWallPage({ params }: Props) {
   const like = view.walls.at(-1)?.wall;
   const start = like ? { ...plainWall, azimuthDeg: (like.azimuthDeg + 90) % 360, heightM: like.heightM, eaveDepthM: like.eaveDepthM } : plainWall;
   const coat = like ? { finish: like.finish, stainBase: like.stainBase, colorHex: like.colorHex, colorName: like.colorName ?? '', texture: like.texture, sealant: like.sealant } : usualCoat;
-  const values = { name: '', shade: 'open' as const, shadeHeightDeg: 0, weatherSide: false, ...wallLengths(start, units), openings: [], coat, stained: undefined, caulked: undefined };
+  const values = { name: '', shade: 'open' as const, shadeHeightDeg: 0, weatherSide: false, cover: noCover, corners: like?.corners ?? 2, pipes: 0, ...wallLengths(start, units), openings: [], coat, stained: undefined, caulked: undefined };
   return (
     <main id="main">
       <PageHead title="Add a wall" lead={like ? `Filled in after ${like.name}, a quarter turn on: change what differs.` : undefined} path={[{ href: '/homes', label: 'Homes' }, { href: `/homes/${home.id}`, label: home.name }]} />

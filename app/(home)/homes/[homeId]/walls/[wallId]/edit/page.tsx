@@ -8,7 +8,7 @@ import { recalledDays } from '@/db/queries/recalled';
 import { unitsOf } from '@/db/queries/units';
 import { wallOf, wallsOfHome } from '@/db/queries/walls';
 import { dayIn } from '@/lib/calendar';
-import { openingValues, wallLengths } from '@/lib/home/form-values';
+import { coverValues, openingValues, wallLengths } from '@/lib/home/form-values';
 import { saveWall, takeOutWall } from '../../actions';
 
 export const metadata: Metadata = { title: 'Edit a wall' };
@@ -22,8 +22,8 @@ export default async function EditWallPage({ params }: Props) {
   const openings = wallsOfHome(homeId).find((one) => one.wall.id === wallId)?.openings ?? [];
   const units = unitsOf(actor);
   const logged = (kind: 'restain' | 'recaulk') => view.records.find((record) => record.kind === kind && record.origin === 'logged' && record.wallIds.includes(wallId))?.doneOn;
-  const { name, shade, shadeHeightDeg, weatherSide, finish, stainBase, colorHex, colorName, texture, sealant } = wall;
-  const values = { name, shade, shadeHeightDeg, weatherSide, ...wallLengths(wall, units), openings: openingValues(openings, units), coat: { finish, stainBase, colorHex, colorName: colorName ?? '', texture, sealant }, ...recalledDays(wallId), logged: { restain: logged('restain'), recaulk: logged('recaulk') } };
+  const { name, shade, shadeHeightDeg, weatherSide, corners, pipes, finish, stainBase, colorHex, colorName, texture, sealant } = wall;
+  const values = { name, shade, shadeHeightDeg, weatherSide, corners, pipes, cover: coverValues(wall, units), ...wallLengths(wall, units), openings: openingValues(openings, units), coat: { finish, stainBase, colorHex, colorName: colorName ?? '', texture, sealant }, ...recalledDays(wallId), logged: { restain: logged('restain'), recaulk: logged('recaulk') } };
   const target = { homeId, wallId };
   return (
     <main id="main">
