@@ -71,8 +71,8 @@ const larchRidge: SeedHome = {
   walls: [
     wall({ name: 'Front', azimuthDeg: 200, feet: [42, 9], gableHeightM: ft(8), eaveDepthM: ft(1), openings: [windows(4), door()] }),
     wall({ name: 'West end', azimuthDeg: 290, feet: [28, 9], weatherSide: true, eaveDepthM: ft(2), openings: [windows(2)] }),
-    wall({ name: 'Back', azimuthDeg: 20, feet: [42, 9], shade: 'evergreens', shadeHeightDeg: 35, openings: [windows(3), door()] }),
-    wall({ name: 'East porch', azimuthDeg: 110, feet: [28, 9], eaveDepthM: ft(8), eaveDropM: ft(0.5), openings: [windows(2), door(6)] }),
+    wall({ name: 'Back', azimuthDeg: 20, feet: [42, 9], shade: 'evergreens', shadeHeightDeg: 35, pipes: 6, openings: [windows(3), door()] }),
+    wall({ name: 'East porch', azimuthDeg: 110, feet: [28, 9], cover: 'porch', coverDepthM: ft(8), coverHeightM: ft(8.5), coverShare: 0.75, pipes: 3, openings: [windows(2), door(6)] }),
   ],
   work: [
     { kind: 'restain', yearsAgo: 9, monthDay: '07-12', walls: [0, 1, 2, 3], product: 'Oil semitransparent, walnut shell', gallons: 16, dollars: 5200, by: 'harlan' },
@@ -123,8 +123,8 @@ const agatePoint: SeedHome = {
   sidingNominalIn: 10,
   yearBuilt: 1998,
   walls: [
-    wall({ name: 'Lake side', azimuthDeg: 150, feet: [36, 10], gableHeightM: ft(9), eaveDepthM: ft(1), weatherSide: true, finish: 'solid-color', stainBase: 'waterborne', colorHex: '#5B4A3A', colorName: 'Bark', openings: [windows(5, 4, 5), door(6)] }),
-    wall({ name: 'Garage end', azimuthDeg: 240, feet: [26, 10], finish: 'solid-color', stainBase: 'waterborne', colorHex: '#5B4A3A', colorName: 'Bark', openings: [{ kind: 'door', widthM: ft(9), heightM: ft(7), count: 1 }] }),
+    wall({ name: 'Lake side', azimuthDeg: 150, feet: [36, 10], gableHeightM: ft(9), eaveDepthM: ft(1), cover: 'deck', coverDepthM: ft(10), coverHeightM: ft(8), coverShare: 0.5, corners: 1, pipes: 2, weatherSide: true, finish: 'solid-color', stainBase: 'waterborne', colorHex: '#5B4A3A', colorName: 'Bark', openings: [windows(5, 4, 5), door(6)] }),
+    wall({ name: 'Garage end', azimuthDeg: 240, feet: [26, 10], corners: 1, pipes: 4, finish: 'solid-color', stainBase: 'waterborne', colorHex: '#5B4A3A', colorName: 'Bark', openings: [{ kind: 'door', widthM: ft(9), heightM: ft(7), count: 1 }] }),
     wall({ name: 'Road side', azimuthDeg: 330, feet: [36, 10], gableHeightM: ft(9), shade: 'evergreens', shadeHeightDeg: 30, openings: [windows(3), door()] }),
     wall({ name: 'Wood-shed side', azimuthDeg: 60, feet: [26, 10], shade: 'trees', shadeHeightDeg: 30, openings: [windows(1)] }),
   ],

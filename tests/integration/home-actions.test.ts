@@ -243,6 +243,35 @@ describe('changing a home', () => {
     expect(larger.state?.errors?.openings).toContain('larger than the wall');
   });
 
+  it('saves a wall with a porch roof, which takes sun and rain off it, and keeps the porch when it is not chosen', async () => {
+    const { saveWall } = await actions.walls();
+    const target = { homeId, wallId: wallId('Front') };
+    const front = () => homeView(owner, homeId).walls.find(({ wall }) => wall.id === target.wallId);
+    const porch = { cover: 'porch', coverDepth: '8', coverHeight: '8', coverShare: '0.75', corners: '1', pipes: '4' };
+    await send(saveWall, wallForm(target));
+    const before = front();
+    expect((await send(saveWall, wallForm({ ...target, ...porch }))).to).toBe(`/homes/${homeId}/walls/${target.wallId}`);
+    const after = front();
+    expect(after?.wall).toMatchObject({ cover: 'porch', coverDepthM: expect.closeTo(2.4384, 6) as number, coverHeightM: expect.closeTo(2.4384, 6) as number, coverShare: 0.75, corners: 1, pipes: 4 });
+    expect(after?.exposure?.doseKwhM2).toBeLessThan((before?.exposure?.doseKwhM2 ?? 0) * 0.8);
+    expect(after?.exposure?.sunHours).toBeLessThan((before?.exposure?.sunHours ?? 0) * 0.8);
+    expect(after?.coat.lifeMonths).toBeGreaterThan(before?.coat.lifeMonths ?? Infinity);
+    expect(after?.coat.explanation.inputs).toContainEqual({ label: 'Porch roof or deck', value: 'over 75 % of the width, 100 % as deep as the wall under it is high' });
+    await send(saveWall, wallForm({ ...target, ...porch, cover: 'none', corners: '2', pipes: '0' }));
+    expect(front()?.wall).toMatchObject({ cover: 'none', coverDepthM: after?.wall.coverDepthM, coverHeightM: after?.wall.coverHeightM, coverShare: 0.75 });
+    expect(front()?.exposure?.doseKwhM2).toBe(before?.exposure?.doseKwhM2);
+  });
+
+  it('refuses a porch roof that is far over the wall, marks its field and keeps what was typed', async () => {
+    const { saveWall } = await actions.walls();
+    const target = { homeId, wallId: wallId('Front') };
+    const porch = { cover: 'deck', coverDepth: '8', coverHeight: '20', coverShare: '0.25', pipes: '7' };
+    const { state } = await send(saveWall, wallForm({ ...target, ...porch }));
+    expect(state?.errors).toEqual({ coverHeight: expect.stringContaining('between 3.3 ft and 12.3 ft') as string });
+    expect(state?.values).toMatchObject(porch);
+    expect(walls().find(({ id }) => id === target.wallId)).toMatchObject({ cover: 'none', pipes: 0 });
+  });
+
   it('takes a wall out of the plan and brings it back as it was', async () => {
     const before = planned();
     const target = { homeId, wallId: wallId('Back') };
