@@ -17,7 +17,7 @@ type FilmKind = 'restain' | 'recaulk';
 
 export const windowSource: Source = { text: 'Window: the coating season that holds the date, else the next if it opens within 60 days, else the one before; at most 60 days past the date', ground: 'our rule' };
 const ruleSource: Source = { text: 'RFC 5545 (2009), §3.3.10, recurrence rules', ground: 'published' };
-const caulkSeason: Source = { text: 'Caulk keeps to the coating season; ASTM C1193 gives 40 to 100 °F for sealants (recalled, not read again)', ground: 'memory' };
+const caulkSeason: Source = { text: 'Caulk keeps to the coating season; ASTM C1193 gives 40 to 100 °F for sealants', ground: 'memory' };
 
 /** A film found sound is asked for again after this many months at the earliest: the next walkaround comes first. Our rule. */
 const soundMonths = 6;
@@ -55,7 +55,7 @@ function computedTurn({ startedOn, lifeMonths, found }: FilmLife, seasons: Seaso
   const byRule = nextOfRule(rule, startedOn, startedOn);
   if (!byRule) return null;
   const dueOn = afterLooking(byRule, found);
-  return { rule, startOn: startedOn, byRule, dueOn, window: windowOnceFound(windowFor(dueOn, seasons, dueOn), found, seasons) };
+  return { rule, startOn: startedOn, byRule, dueOn, window: windowAfter(startedOn, found, windowFor(dueOn, seasons, dueOn), seasons) };
 }
 
 /** What was seen goes before what was reckoned. */
@@ -67,8 +67,9 @@ function afterLooking(byRule: CalendarDay, found: FilmLife['found']): CalendarDa
   return rested > byRule ? rested : byRule;
 }
 
-/** Nothing is asked for in a season that was over when the film was found. */
-function windowOnceFound(window: Window, found: FilmLife['found'], seasons: SeasonMonths[]): Window {
+/** No season is asked for that was over when the film was found, or that had begun when it was put on: then the one after it. */
+function windowAfter(startedOn: CalendarDay, found: FilmLife['found'], window: Window, seasons: SeasonMonths[]): Window {
+  if (window.opensOn <= startedOn) return comingWindow(window.closesOn, seasons, addDays(window.closesOn > startedOn ? window.closesOn : startedOn, 1));
   return found && window.closesOn < found.on ? comingWindow(addDays(found.on, -1), seasons, found.on) : window;
 }
 

