@@ -1,6 +1,7 @@
 import { useId } from 'react';
 import { faded } from '@/components/drawings/fade-time';
 import { courseLines, type OpeningKind, type PlacedOpening, placeOpenings } from '@/lib/plan/elevation';
+import { type WallCover } from '@/lib/sun/wall-face';
 
 type WallElevationProps = {
   name: string;
@@ -13,6 +14,8 @@ type WallElevationProps = {
   /** Exposed face of one course, m. */
   courseM?: number;
   openings?: readonly OpeningKind[];
+  /** A porch roof or deck; drawn over the middle, as only its share of the width is known. */
+  cover?: WallCover | undefined;
   colorHex?: string;
   /** Share of coat life used up, 0 to 1: the wall is drawn that much faded. */
   used?: number;
@@ -22,8 +25,8 @@ type WallElevationProps = {
 
 const per = 40;
 
-/** A wall from the front, to scale: courses, log ends, gable, doors and windows, the edge of the eave. */
-export function WallElevation({ name, widthM, heightM, gableHeightM = 0, eaveDepthM = 0.45, roofRiseM = 0, courseM = 0.19, openings = [], colorHex = '#8a5a32', used = 0, words }: WallElevationProps) {
+/** A wall from the front, to scale: courses, log ends, gable, doors and windows, the edge of the eave, a porch roof. */
+export function WallElevation({ name, widthM, heightM, gableHeightM = 0, eaveDepthM = 0.45, roofRiseM = 0, courseM = 0.19, openings = [], cover, colorHex = '#8a5a32', used = 0, words }: WallElevationProps) {
   const clip = useId().replace(/[^a-zA-Z0-9-]/g, '');
   const [w, h, g] = [widthM * per, heightM * per, gableHeightM * per];
   const over = Math.min(eaveDepthM, 1.2) * per;
@@ -49,6 +52,7 @@ export function WallElevation({ name, widthM, heightM, gableHeightM = 0, eaveDep
       {placeOpenings({ widthM, heightM }, openings).map((opening) => (
         <Opening key={opening.x} opening={opening} />
       ))}
+      {cover ? <CoverEdge w={w} h={h} cover={cover} /> : null}
       <Roof w={w} h={h} g={g} over={over} rise={rise} />
       <line x1={-margin} x2={w + margin} y1="1" y2="1" stroke="var(--ink)" strokeWidth="3" />
     </svg>
@@ -78,6 +82,19 @@ function Opening({ opening }: { opening: PlacedOpening }) {
       <rect x={x} y={y} width={w} height={h} fill={opening.kind === 'door' ? 'var(--roof)' : 'var(--dose-1)'} />
       {opening.kind === 'window' ? <path d={`M${x + w / 2} ${y}v${h}M${x} ${y + h / 2}h${w}`} stroke="var(--snow)" strokeWidth="2.5" /> : null}
     </g>
+  );
+}
+
+/** The edge of a porch roof or deck, and its shade on the wall at a sun of 45°. */
+function CoverEdge({ w, h, cover }: { w: number; h: number; cover: WallCover }) {
+  const width = Math.min(1, cover.share) * w;
+  const underside = Math.min(cover.heightM * per, h);
+  const x = (w - width) / 2;
+  return (
+    <>
+      <rect x={x} y={-underside} width={width} height={Math.min(cover.depthM * per, underside)} fill="rgb(0 0 0 / 25%)" />
+      <rect x={x - 6} y={-underside - 7} width={width + 12} height="8" fill="var(--eave)" />
+    </>
   );
 }
 

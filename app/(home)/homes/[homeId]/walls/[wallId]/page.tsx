@@ -15,6 +15,7 @@ import { unitsOf } from '@/db/queries/units';
 import { dayIn } from '@/lib/calendar';
 import { stationById } from '@/lib/climate';
 import { coatLeft } from '@/lib/coat';
+import { coverOfStored, coverWords } from '@/lib/home/cover';
 import { directionWord } from '@/lib/home/direction';
 import { wallMeasures } from '@/lib/home/wall-measures';
 import { can } from '@/lib/permissions';
@@ -35,7 +36,9 @@ export default async function WallPage({ params }: Props) {
   const units = unitsOf(actor);
   const today = dayIn(home.timeZone, new Date());
   const records = view.records.filter((record) => record.wallIds.includes(wallId));
-  const { words, courseM } = wallMeasures(wall, openings, home.sidingNominalIn, units);
+  const { words: size, courseM } = wallMeasures(wall, openings, home.sidingNominalIn, units);
+  const cover = coverWords(wall, units);
+  const words = cover ? `${size} ${cover}.` : size;
   const used = coat.startedOn ? 1 - coatLeft(coat.startedOn, coat.lifeMonths, today) : 0;
   const mayEdit = can(actor, 'home.edit', { membership });
   return (
@@ -44,7 +47,7 @@ export default async function WallPage({ params }: Props) {
       <Said words={await whatWasSaid()} />
       <Course as="div">
         <div className="grid items-center gap-x-12 gap-y-6 lg:grid-cols-[3fr_2fr]">
-          <WallElevation name={wall.name} widthM={wall.widthM} heightM={wall.heightM} gableHeightM={wall.gableHeightM} eaveDepthM={wall.eaveDepthM} courseM={courseM} openings={openings} colorHex={wall.colorHex} used={used} words={`${wall.name} from the front. ${words}`} />
+          <WallElevation name={wall.name} widthM={wall.widthM} heightM={wall.heightM} gableHeightM={wall.gableHeightM} eaveDepthM={wall.eaveDepthM} courseM={courseM} openings={openings} cover={coverOfStored(wall)} colorHex={wall.colorHex} used={used} words={`${wall.name} from the front. ${words}`} />
           <div className="grid gap-x-10 gap-y-2 sm:grid-cols-2 sm:[&>details[open]]:col-span-full lg:grid-cols-1">
             <WallFigures planned={{ ...planned, exposure: null }} home={home} station={undefined} today={today} units={units} films={['coat', 'seal']} />
           </div>
