@@ -9,7 +9,7 @@ import { urgency } from '@/lib/home/next-work';
 import { withRule } from '@/lib/home/plan-view';
 import { keysOf, type WorkKind, workKinds } from '@/lib/schemas/vocabulary';
 
-type WallWorkProps = { homeId: string; wallId: string; items: readonly WorkItem[]; today: CalendarDay; mayLog: boolean; mayEdit: boolean };
+type WallWorkProps = { homeId: string; wallId: string; items: readonly WorkItem[]; today: CalendarDay; mayLog: boolean; mayEdit: boolean; mayPutOff: boolean };
 
 function OwnRuleLink({ homeId, wallId, kind }: { homeId: string; wallId: string; kind: WorkKind }) {
   return (
@@ -20,7 +20,7 @@ function OwnRuleLink({ homeId, wallId, kind }: { homeId: string; wallId: string;
 }
 
 /** What comes next on one wall, soonest first, each with its reason. */
-export function WallWork({ homeId, wallId, items, today, mayLog, mayEdit }: WallWorkProps) {
+export function WallWork({ homeId, wallId, items, today, mayLog, mayEdit, mayPutOff }: WallWorkProps) {
   const unplanned = mayEdit ? keysOf(workKinds).filter((kind) => items.every((item) => item.kind !== kind)) : [];
   return (
     <ul>
@@ -38,8 +38,13 @@ export function WallWork({ homeId, wallId, items, today, mayLog, mayEdit }: Wall
           </div>
           <div className="no-print -ml-2 flex flex-wrap md:ml-0 md:flex-col md:items-start">
             {mayLog ? (
-              <LinkButton href={`/homes/${homeId}/log?kind=${item.kind}&wall=${wallId}`} look="plain">
-                Log it
+              <LinkButton href={item.kind === 'walkaround' ? `/homes/${homeId}/walkaround` : `/homes/${homeId}/log?kind=${item.kind}&wall=${wallId}`} look="plain">
+                {item.kind === 'walkaround' ? 'Walk around' : 'Log it'}
+              </LinkButton>
+            ) : null}
+            {mayPutOff ? (
+              <LinkButton href={`/homes/${homeId}/put-off?kind=${item.kind}&wall=${wallId}`} look="plain">
+                Put off<span className="sr-only"> the {workKinds[item.kind].toLowerCase()}</span>
               </LinkButton>
             ) : null}
             {mayEdit ? <OwnRuleLink homeId={homeId} wallId={wallId} kind={item.kind} /> : null}

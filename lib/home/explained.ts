@@ -1,6 +1,7 @@
 import { coatLeft, monthsInWords } from '@/lib/coat';
 import { exactDay, monthNames } from '@/lib/calendar-words';
 import { type CalendarDay } from '@/lib/calendar';
+import { assumedSource } from '@/lib/care/learned-words';
 import { type FilmLife } from '@/lib/care/types';
 import { climateAt, type Station } from '@/lib/climate';
 import { bareGroundAlbedo, groundAlbedo } from '@/lib/climate/snow';
@@ -87,11 +88,11 @@ export function leftExplained(film: FilmLife, today: CalendarDay): { percent: nu
       value: `${percent} %`,
       formula: '1 − days since it was put on ÷ days that it is expected to last',
       inputs: [
-        { label: 'Put on', value: exactDay(film.startedOn) },
+        { label: 'Put on', value: `${exactDay(film.startedOn)}${film.assumed ? ' (assumed)' : ''}` },
         { label: film.film === 'coat' ? 'Coat life of this wall' : 'Seal life of this wall', value: monthsInWords(film.lifeMonths) },
         { label: 'Today', value: exactDay(today) },
       ],
-      sources: [{ text: 'A film wears evenly over its life', ground: 'our rule' }],
+      sources: [{ text: 'A film wears evenly over its life', ground: 'our rule' }, ...(film.assumed ? [assumedSource] : [])],
     },
   };
 }

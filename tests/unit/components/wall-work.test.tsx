@@ -7,7 +7,7 @@ import { careHome, careRecord } from '@/tests/fixtures/care-home';
 
 const today = '2026-12-01';
 const items = planHome(careHome({ records: [careRecord('restain', '2024-06-10')] }), today).walls[0]?.items ?? [];
-const shown = (mayEdit: boolean) => renderToStaticMarkup(<WallWork homeId="h1" wallId="w1" items={items} today={today} mayLog mayEdit={mayEdit} />);
+const shown = (mayEdit: boolean) => renderToStaticMarkup(<WallWork homeId="h1" wallId="w1" items={items} today={today} mayLog mayEdit={mayEdit} mayPutOff={mayEdit} />);
 const ruleLinks = (html: string) => [...html.matchAll(/href="\/homes\/h1\/walls\/w1\/rule\?kind=(\w+)"/g)].map(([, kind]) => kind).sort();
 
 describe('the work of a wall', () => {
@@ -20,6 +20,13 @@ describe('the work of a wall', () => {
   it('shows no such link to who may not change the home', () => {
     expect(ruleLinks(shown(false))).toEqual([]);
     expect(shown(false)).not.toContain('nothing is planned');
+  });
+});
+
+describe('the work of a wall that may be put off', () => {
+  it('leads to what waiting would mean, for who may decide it', () => {
+    expect(shown(true)).toContain('href="/homes/h1/put-off?kind=restain&amp;wall=w1"');
+    expect(shown(false)).not.toContain('put-off');
   });
 });
 

@@ -47,7 +47,7 @@ export default async function SharedHomePage({ params, searchParams }: Props) {
   const facts = [`${home.sidingNominalIn} in log siding`, woods[home.wood], home.yearBuilt ? `built in ${home.yearBuilt}` : null].filter(Boolean).join(' · ');
   return (
     <main id="main">
-      <PageHead title={home.name} lead={`${[home.place, home.state].filter(Boolean).join(', ')}. ${facts}`} path={[{ href: '/work', label: 'Work ahead' }]} actions={<><LinkButton href={`/work/${home.id}/log`}>Log work</LinkButton><PrintButton>Print</PrintButton></>} />
+      <PageHead title={home.name} lead={`${[home.place, home.state].filter(Boolean).join(', ')}. ${facts}`} path={[{ href: '/work', label: 'Work ahead' }]} actions={<><LinkButton href={`/work/${home.id}/log`}>Log work</LinkButton><LinkButton href={`/work/${home.id}/walkaround`} look="quiet">Walkaround</LinkButton><PrintButton>Print</PrintButton></>} />
       <Said words={await whatWasSaid()} />
       {gone ? <Undo done={`The ${workKinds[gone.kind].toLowerCase()} was taken back.`} label="Put it back" action={putBack} fields={{ recordId: gone.id }} /> : null}
       {walls.length === 0 ? <Course as="div"><p>The owner has not set up any walls yet. Their measures and work will stand here.</p></Course> : null}

@@ -30,9 +30,9 @@ export const keepWalkaround = defineAction({
     const items = (walls: typeof before) => walls.flatMap((wall) => wall.items);
     return [...planChange(items(before), items(after), after.map(({ wall }) => wall)), ...learnedChange(before, after)];
   },
-  after: async (changes, { homeId }) => {
+  after: async (changes, { homeId }, actor) => {
     await say(['Walkaround kept.', ...(changes.length > 0 ? changes : ['Nothing in the plan moves.'])].join(' '));
     revalidatePath(`/homes/${homeId}`, 'layout');
-    redirect(`/homes/${homeId}`);
+    redirect(actor.role === 'contractor' ? `/work/${homeId}` : `/homes/${homeId}`);
   },
 });

@@ -5,7 +5,7 @@ import { Course } from '@/components/ui/course';
 import { EmptyState } from '@/components/ui/empty-state';
 import { PageHead } from '@/components/ui/page-head';
 import { addDays, dayIn } from '@/lib/calendar';
-import { directionWord } from '@/lib/home/direction';
+import { walkedWalls } from '@/lib/home/walked-walls';
 import { keepWalkaround } from './actions';
 
 export const metadata: Metadata = { title: 'Walkaround' };
@@ -16,7 +16,7 @@ export default async function WalkaroundPage({ params }: Props) {
   const { view } = await pageHome((await params).homeId);
   const { home } = view;
   const today = dayIn(home.timeZone, new Date());
-  const walls = view.walls.map(({ wall }) => ({ id: wall.id, name: wall.name, hint: `faces ${directionWord(wall.azimuthDeg)}`, finish: wall.finish }));
+  const walls = walkedWalls(view.walls);
   return (
     <main id="main">
       <PageHead title="Walkaround" lead="Take a cup of water with you. Answer what you see; leave out what you cannot. The plan moves by your answers and says by how much." path={[{ href: '/homes', label: 'Homes' }, { href: `/homes/${home.id}`, label: home.name }]} />

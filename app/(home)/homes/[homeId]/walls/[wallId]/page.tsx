@@ -3,6 +3,7 @@ import { pageHome, pageWall } from '@/app/_server/page-data';
 import { whatWasSaid } from '@/app/_server/said';
 import { MonthlySun } from '@/components/charts/monthly-sun';
 import { WallElevation } from '@/components/drawings/wall-elevation';
+import { LearnedCourse } from '@/components/home/learned-course';
 import { Neighbours } from '@/components/home/neighbours';
 import { RecordCourse } from '@/components/home/record-course';
 import { Said } from '@/components/home/said';
@@ -54,8 +55,9 @@ export default async function WallPage({ params }: Props) {
         </div>
       </Course>
       <Course heading="Next work">
-        <WallWork homeId={homeId} wallId={wallId} items={items} today={today} mayLog={can(actor, 'work.log', { membership })} mayEdit={mayEdit} />
+        <WallWork homeId={homeId} wallId={wallId} items={items} today={today} mayLog={can(actor, 'work.log', { membership })} mayEdit={mayEdit} mayPutOff={can(actor, 'work.putOff', { membership })} />
       </Course>
+      <LearnedCourse films={[planned.coat, planned.seal]} />
       <Course heading="Sun">
         <div className="mb-4 grid gap-x-10 gap-y-2 sm:grid-cols-2 sm:[&>details[open]]:col-span-full">
           <WallFigures planned={planned} home={home} station={stationById(home.stationId)} today={today} units={units} films={[]} hours />
