@@ -2,6 +2,7 @@ import { addDays, addMonths, type CalendarDay } from '@/lib/calendar';
 import { comingWindow } from './carry-over';
 import { filmWork } from './film-work';
 import { type KnownWall, knownWall } from './films';
+import { putOffDay } from './put-off';
 import { type CareHome, type CareWall, type FilmLife, type SeasonMonths, type WallPlan, type Window, type WorkItem } from './types';
 import { windowFor } from './window';
 
@@ -25,6 +26,10 @@ export type FilmJob = FilmTurn & {
   /** Only work that we computed and that is not late may be drawn to an earlier trip. */
   mayJoin: boolean;
   isOwnRule: boolean;
+  /** It was put off to this day, so it joins no earlier trip. */
+  putOffTo: CalendarDay | null;
+  /** In which a coat can cure on this wall; a trip outside of them is not joined. */
+  seasons: readonly SeasonMonths[];
   /** The window for its own date, before caulk goes with its wall's restain. */
   ownWindow: Window;
   /** Caulk whose window is that of its wall's restain. */
@@ -85,6 +90,8 @@ function filmJob(home: CareHome, known: KnownWall, item: WorkItem, kind: FilmKin
     stripCents: kind === 'restain' ? Math.round(wall.areaM2 * costs.stripCentsPerM2) : 0,
     mayJoin: item.basis === 'computed' && item.missedOn === null,
     isOwnRule,
+    putOffTo: putOffDay(item, home.deferrals),
+    seasons,
     ownWindow: withRestain ? windowFor(item.dueOn, seasons, item.dueOn) : item.window,
     withRestain,
     lastsFrom: (doneOn) => addMonths(doneOn, film.lifeMonths),

@@ -19,10 +19,15 @@ export function nextChance({ window }: Pick<WorkItem, 'window'>, seasons: Season
   return windowFrom(hasSeason ? addDays(window.closesOn, 1) : addMonths(window.opensOn, restMonths), seasons);
 }
 
+/** The latest day to which somebody put this work off, if anybody did. */
+export function putOffDay(item: WorkItem, deferrals: readonly CareDeferral[]): CalendarDay | null {
+  const key = workKey(item);
+  return deferrals.flatMap((one) => (one.workKey === key ? [one.notBefore] : [])).sort().at(-1) ?? null;
+}
+
 /** Film work that somebody put off takes the window from that day on; it is no longer overdue, and its date stays what it was. */
 export function putOff(item: WorkItem, deferrals: readonly CareDeferral[], seasons: SeasonMonths[]): WorkItem {
-  const key = workKey(item);
-  const notBefore = deferrals.flatMap((one) => (one.workKey === key ? [one.notBefore] : [])).sort().at(-1);
+  const notBefore = putOffDay(item, deferrals);
   if (!notBefore || notBefore <= item.window.opensOn) return item;
   const window = windowFrom(notBefore, seasons);
   const { explanation } = item;

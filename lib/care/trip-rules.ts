@@ -1,4 +1,4 @@
-import { addMonths, type CalendarDay, daysBetween } from '@/lib/calendar';
+import { addMonths, type CalendarDay, daysBetween, monthOf } from '@/lib/calendar';
 import { type Source } from '@/lib/explain';
 import { type FilmJob } from './film-jobs';
 import { stripAtShare } from './stripping';
@@ -28,6 +28,10 @@ export const needsStripping = (on: CalendarDay, { kind, usedUpOn, lifeMonths }: 
 /** What renewing a film early throws away: the share of its life that is left, in cents of its renewal. */
 export const wasteCents = (months: number, { lifeMonths, cents }: Pick<FilmJob, 'lifeMonths' | 'cents'>): number => (months / lifeMonths) * cents;
 
+/** Whether work may be done early on a day: a coat can cure then, and nobody put the work off past it. */
+const isOpen = ({ seasons, putOffTo }: FilmJob, on: CalendarDay): boolean =>
+  (putOffTo === null || putOffTo <= on) && (seasons.length === 0 || seasons.some(({ fromMonth, toMonth }) => (monthOf(on) - fromMonth + 12) % 12 <= (toMonth - fromMonth + 12) % 12));
+
 /** A job that would join a trip early, with the caulk that goes where its restain goes, and what that throws away. */
 export type Joining = { job: FilmJob; caulk: FilmJob | null; months: number; wasteCents: number };
 
@@ -42,7 +46,7 @@ export function joinings(jobs: readonly FilmJob[], on: CalendarDay, joinMonths: 
   if (joinMonths <= 0) return [];
   const limit = addMonths(on, joinMonths);
   return jobs.flatMap((job): Joining[] => {
-    if (!job.mayJoin || job.withRestain || job.window.opensOn <= on || job.window.opensOn > limit) return [];
+    if (!job.mayJoin || job.withRestain || job.window.opensOn <= on || job.window.opensOn > limit || !isOpen(job, on)) return [];
     const caulk = (job.kind === 'restain' && jobs.find(({ wallId, withRestain }) => withRestain && wallId === job.wallId)) || null;
     const months = thrownAwayMonths(on, job.usedUpOn);
     const ofCaulk = caulk ? wasteCents(Math.min(months, thrownAwayMonths(on, caulk.usedUpOn)), caulk) : 0;

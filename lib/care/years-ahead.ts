@@ -78,7 +78,7 @@ function renewed(open: readonly FilmJob[], done: ReadonlySet<FilmJob>, on: Calen
 function renewedJob(job: FilmJob, on: CalendarDay): FilmJob[] {
   const next = job.nextAfter(on);
   if (!next) return [];
-  return [{ ...job, ...next, missedOn: null, ownWindow: next.window, usedUpOn: job.lastsFrom(on), mayJoin: !job.isOwnRule, withRestain: false }];
+  return [{ ...job, ...next, missedOn: null, putOffTo: null, ownWindow: next.window, usedUpOn: job.lastsFrom(on), mayJoin: !job.isOwnRule, withRestain: false }];
 }
 
 /** Caulk in the window of its wall's restain where the two are near, as the plan has it; otherwise in its own. */
