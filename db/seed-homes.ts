@@ -1,4 +1,5 @@
-import { type Membership, type Wood } from '../lib/schemas/vocabulary';
+import { type WalkaroundAnswers } from '../lib/home/walkaround';
+import { type FilmState, type Membership, type Wood } from '../lib/schemas/vocabulary';
 import { type WallChange } from './queries/walls';
 
 /** The homes of the demo: invented people, sizes and histories at real postal codes in three climates. */
@@ -15,6 +16,10 @@ export type SeedWork = {
   gallons?: number;
   dollars?: number;
   note?: string;
+  /** How the coat or caulk that was renewed was found. */
+  oldFilm?: FilmState;
+  /** What a walkaround saw, by position of the wall. */
+  seen?: Record<number, WalkaroundAnswers>;
   by: string;
 };
 
@@ -77,11 +82,24 @@ const larchRidge: SeedHome = {
   work: [
     { kind: 'restain', yearsAgo: 9, monthDay: '07-12', walls: [0, 1, 2, 3], product: 'Oil semitransparent, walnut shell', gallons: 16, dollars: 5200, by: 'harlan' },
     { kind: 'recaulk', yearsAgo: 9, monthDay: '07-08', walls: [0, 1, 2, 3], product: 'Acrylic latex, brown', by: 'harlan' },
-    { kind: 'restain', yearsAgo: 5, monthDay: '06-24', walls: [0], product: 'Oil semitransparent, walnut shell', gallons: 6, dollars: 1650, note: 'Grey above the windows before washing.', by: 'marit' },
-    { kind: 'restain', yearsAgo: 3, monthDay: '08-30', walls: [1], product: 'Oil semitransparent, walnut shell', gallons: 4, dollars: 980, by: 'harlan' },
+    { kind: 'restain', yearsAgo: 5, monthDay: '06-24', walls: [0], product: 'Oil semitransparent, walnut shell', gallons: 6, dollars: 1650, note: 'Gray above the windows before washing.', oldFilm: 'past due', by: 'marit' },
+    { kind: 'restain', yearsAgo: 3, monthDay: '08-30', walls: [1], product: 'Oil semitransparent, walnut shell', gallons: 4, dollars: 980, oldFilm: 'due', by: 'harlan' },
     { kind: 'recaulk', yearsAgo: 3, monthDay: '08-27', walls: [1], product: 'Acrylic latex, brown', by: 'harlan' },
     { kind: 'wash', yearsAgo: 1, monthDay: '05-18', walls: [0, 1, 2, 3], by: 'marit' },
-    { kind: 'walkaround', yearsAgo: 1, monthDay: '10-04', walls: [0, 1, 2, 3], note: 'South gable dries dark within a minute of hosing.', by: 'marit' },
+    {
+      kind: 'walkaround',
+      yearsAgo: 1,
+      monthDay: '10-04',
+      walls: [0, 1, 2, 3],
+      note: 'South gable dries dark within a minute of hosing.',
+      seen: {
+        0: { water: 'beads', color: 'holds', caulk: 'holds', also: ['checks'] },
+        1: { water: 'beads', color: 'holds', caulk: 'holds', also: [] },
+        2: { water: 'beads', color: 'holds', caulk: 'parts', also: ['mildew'] },
+        3: { water: 'beads', color: 'holds', caulk: 'holds', also: [] },
+      },
+      by: 'marit',
+    },
   ],
 };
 
@@ -106,7 +124,7 @@ const laurelCabin: SeedHome = {
   ],
   work: [
     { kind: 'restain', yearsAgo: 4, monthDay: '05-06', walls: [0, 1, 2, 3], product: 'Tinted clear, honey pine', gallons: 9, dollars: 3100, by: 'odile' },
-    { kind: 'restain', yearsAgo: 2, monthDay: '05-14', walls: [0, 1], product: 'Tinted clear, honey pine', gallons: 5, dollars: 1480, by: 'odile' },
+    { kind: 'restain', yearsAgo: 2, monthDay: '05-14', walls: [0, 1], product: 'Tinted clear, honey pine', gallons: 5, dollars: 1480, oldFilm: 'past due', by: 'odile' },
     { kind: 'recaulk', yearsAgo: 6, monthDay: '09-20', walls: [0, 1, 2, 3], product: 'Acrylic latex, clear', by: 'odile' },
     { kind: 'wash', yearsAgo: 1, monthDay: '04-22', walls: [0, 1, 2, 3], note: 'Mildew on the bank side.', by: 'june' },
   ],
@@ -131,6 +149,7 @@ const agatePoint: SeedHome = {
   work: [
     { kind: 'restain', yearsAgo: 7, monthDay: '07-02', walls: [0, 1], product: 'Solid-color acrylic, bark', gallons: 8, by: 'tobias' },
     { kind: 'recaulk', yearsAgo: 7, monthDay: '06-28', walls: [0], product: 'Polyurethane', by: 'tobias' },
+    { kind: 'walkaround', yearsAgo: 0, monthDay: '10-11', walls: [2], note: 'The stain was there when we bought the house.', seen: { 2: { water: 'beads', color: 'holds', caulk: 'holds', also: ['splash'] } }, by: 'tobias' },
   ],
 };
 

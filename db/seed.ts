@@ -1,6 +1,7 @@
 import { hash } from '@node-rs/argon2';
 import { count } from 'drizzle-orm';
 import { addDays, type CalendarDay, fromUtcDate, yearOf } from '../lib/calendar';
+import { coatFound, sealFound } from '../lib/home/walkaround';
 import { type Actor } from '../lib/permissions';
 import { closeDatabase, database, transaction } from './client';
 import { loadDotEnv } from './dot-env';
@@ -54,21 +55,22 @@ function seedHome(plan: SeedHome, people: People, now: Date) {
 
 function seedWork(work: SeedWork, index: number, homeId: string, wallIds: string[], by: Actor, today: CalendarDay) {
   const planned: CalendarDay = `${yearOf(today) - work.yearsAgo}-${work.monthDay}`;
-  logWork(by, {
+  const wallAt = (position: number) => wallIds[position] ?? [];
+  const { kind, product, note, oldFilm } = work;
+  const findings = Object.entries(work.seen ?? {}).flatMap(([position, answers]) => [wallAt(Number(position))].flat().map((wallId) => ({ wallId, answers, coat: coatFound(answers), seal: sealFound(answers) })));
+  const done = {
     homeId,
-    kind: work.kind,
+    kind,
     doneOn: planned < today ? planned : addDays(today, -1),
-    wallIds: work.walls.flatMap((position) => wallIds[position] ?? []),
-    product: work.product,
-    note: work.note,
+    wallIds: work.walls.flatMap(wallAt),
+    product,
+    note,
+    oldFilm,
     costCents: work.dollars === undefined ? undefined : work.dollars * 100,
     amountL: work.gallons === undefined ? undefined : work.gallons * 3.785411784,
-    finish: undefined,
-    stainBase: undefined,
-    colorHex: undefined,
-    sealant: undefined,
     submissionKey: `seed:${homeId}:${index}`,
-  });
+  };
+  logWork(by, done, findings);
 }
 
 async function main() {
