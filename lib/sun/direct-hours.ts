@@ -1,6 +1,6 @@
 import { leafOnMonths } from './leaf-months';
 import { type Place, sunPosition } from './position';
-import { litShare, stripsOf } from './strips';
+import { litShareOf, stripsOf } from './strips';
 import { directShare, type WallFace } from './wall-face';
 
 export type SunHours = { annual: number; monthly: number[] };
@@ -57,7 +57,7 @@ export function sunPath(place: Place, year: number): SunPath {
  */
 export function directSunHoursOn(path: SunPath, wall: WallFace, leafOn: readonly boolean[] = leafOnMonths(path.latitude)): SunHours {
   const monthly = new Float64Array(12);
-  const strips = stripsOf(wall);
+  const litShare = litShareOf(stripsOf(wall));
   const cosWall = Math.cos(wall.azimuthDeg * radians);
   const sinWall = Math.sin(wall.azimuthDeg * radians);
   const obstructed = (wall.horizon?.length ?? 0) > 0;
@@ -65,7 +65,7 @@ export function directSunHoursOn(path: SunPath, wall: WallFace, leafOn: readonly
     const inFront = (path.cosAzimuth[k] as number) * cosWall + (path.sinAzimuth[k] as number) * sinWall;
     if (inFront <= 0) continue;
     const month = path.month[k] as number;
-    const lit = litShare(strips, (path.tanElevation[k] as number) / inFront);
+    const lit = litShare((path.tanElevation[k] as number) / inFront);
     const passed = obstructed ? directShare(wall.horizon, leafOn[month] ?? true, path.azimuthDeg[k] as number, path.elevationDeg[k] as number) : 1;
     monthly[month] = (monthly[month] as number) + lit * passed * path.hoursPerSample;
   }

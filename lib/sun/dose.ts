@@ -1,7 +1,7 @@
 import { leafOnMonths } from './leaf-months';
 import { type Place } from './position';
 import { skyOverHorizon } from './sky-view';
-import { litShare, skyShareOf, stripsOf } from './strips';
+import { litShareOf, skyShareOf, stripsOf } from './strips';
 import { directShare, type WallFace } from './wall-face';
 
 export type Dose = { annual: number; monthly: number[] };
@@ -62,6 +62,7 @@ function onMeanDay(day: Day, wall: WallFace, albedo: number, leafOn: boolean): n
   const diffuseDay = horizontal * diffuseShare(horizontal / day.h0, day.ws);
   const anisotropy = clamp((horizontal - diffuseDay) / day.h0, 0, 1);
   const strips = stripsOf(wall);
+  const litShare = litShareOf(strips);
   const sky = 0.5 * skyShareOf(strips) * skyOverHorizon(wall, leafOn);
   let onWall = 0.5 * albedo * horizontal;
   for (const { hourAngle, total, diffuse } of dayShape(day.ws)) {
@@ -72,7 +73,7 @@ function onMeanDay(day: Day, wall: WallFace, albedo: number, leafOn: boolean): n
     const diffuseNow = diffuseDay * diffuse;
     const beam = Math.max(0, horizontal * total - diffuseNow);
     const rb = Math.max(0, incidence) / Math.max(up, 0.05);
-    const lit = incidence > 0 ? litShare(strips, Math.max(0, up) / incidence) * directShare(wall.horizon, leafOn, Math.atan2(east, north) / radians, Math.asin(clamp(up, -1, 1)) / radians) : 0;
+    const lit = incidence > 0 ? litShare(Math.max(0, up) / incidence) * directShare(wall.horizon, leafOn, Math.atan2(east, north) / radians, Math.asin(clamp(up, -1, 1)) / radians) : 0;
     onWall += lit * (beam * rb + diffuseNow * anisotropy * Math.min(rb, 5)) + diffuseNow * (1 - anisotropy) * sky;
   }
   return onWall;

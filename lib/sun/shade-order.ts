@@ -1,7 +1,7 @@
 import { TZDate } from '@date-fns/tz';
 import { addDays, type CalendarDay, toUtcDate } from '@/lib/calendar';
 import { type Place, type SunPosition, sunPosition } from './position';
-import { litShare, type Strip, stripsOf } from './strips';
+import { litShareOf, stripsOf } from './strips';
 import { directShare, type WallFace } from './wall-face';
 
 /** A stretch of one day at a place: instants (ms), and what its clock shows, in minutes after midnight; 1440 is the day's end. */
@@ -34,10 +34,10 @@ function boundsOf(day: CalendarDay, timeZone: string): { start: number; end: num
 }
 
 /** Any part of the wall lit: above the horizon, in front of the wall, not wholly in the shadow of its eave and cover, not behind what stands in front. */
-function strikes(sun: SunPosition, wall: WallFace, strips: readonly Strip[], leafOn: boolean): boolean {
+function strikes(sun: SunPosition, wall: WallFace, litShare: (tanProfile: number) => number, leafOn: boolean): boolean {
   const inFront = Math.cos((sun.azimuthDeg - wall.azimuthDeg) * radians);
   if (sun.elevationDeg <= 0 || inFront <= 0) return false;
-  const lit = litShare(strips, Math.tan(sun.elevationDeg * radians) / inFront);
+  const lit = litShare(Math.tan(sun.elevationDeg * radians) / inFront);
   return lit > 0 && directShare(wall.horizon, leafOn, sun.azimuthDeg, sun.elevationDeg) >= dappled;
 }
 
@@ -79,8 +79,8 @@ export function shadeOrder<W extends WallFace>(place: Place, walls: readonly W[]
   const first = path.findIndex(({ elevationDeg }) => elevationDeg > 0);
   const last = path.findLastIndex(({ elevationDeg }) => elevationDeg > 0);
   const shaded = walls.map((wall): WallShade<W> => {
-    const strips = stripsOf(wall);
-    const lit = path.map((sun) => strikes(sun, wall, strips, leafOn));
+    const litShare = litShareOf(stripsOf(wall));
+    const lit = path.map((sun) => strikes(sun, wall, litShare, leafOn));
     const shade = runs(count, (minute) => minute >= first && minute <= last && !lit[minute]).map(span);
     const best = shade.reduce<DaySpan | null>((longest, one) => (longest && length(longest) >= length(one) ? longest : one), null);
     return { wall, sun: runs(count, (minute) => lit[minute] === true).map(span), shade, best };

@@ -41,19 +41,15 @@ export function stripsOf(wall: WallFace): Strip[] {
 /** The least of what each overhang leaves (our rule: the deeper shade holds, shades do not multiply), weighted by area. */
 function weighted(strips: readonly Strip[], left: (overhang: Overhang) => number): number {
   let sum = 0;
-  for (const { share, under } of strips) {
-    let least = left(under[0]);
-    for (let k = 1; k < under.length; k += 1) least = Math.min(least, left(under[k] as Overhang));
-    sum += share * least;
-  }
+  for (const { share, under } of strips) sum += share * under.reduce((least, overhang) => Math.min(least, left(overhang)), Infinity);
   return sum;
 }
 
-/** Share of the wall's area that direct sun reaches, 0–1; profile angle tan p = tan(elevation)/cos(azimuth difference). */
-export function litShare(strips: readonly Strip[], tanProfile: number): number {
+/** Share of the wall's area that direct sun reaches, 0–1, as a function of tan p = tan(elevation)/cos(azimuth difference), p the profile angle. */
+export function litShareOf(strips: readonly Strip[]): (tanProfile: number) => number {
   const [only] = strips;
-  if (strips.length === 1 && only?.under.length === 1) return sunlitShare(only.under[0], tanProfile);
-  return weighted(strips, (overhang) => sunlitShare(overhang, tanProfile));
+  if (strips.length === 1 && only?.under.length === 1) return (tanProfile) => sunlitShare(only.under[0], tanProfile);
+  return (tanProfile) => weighted(strips, (overhang) => sunlitShare(overhang, tanProfile));
 }
 
 /** Average view of the sky from the wall, relative to one without overhangs, 0–1. */

@@ -2,9 +2,10 @@ import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { stations } from '@/lib/climate';
 import { directSunHoursOn, shadeOrder, sunDose, sunPath, stripsOf, type WallFace } from '@/lib/sun';
-import { litShare, skyShareOf } from '@/lib/sun/strips';
+import { litShareOf, skyShareOf } from '@/lib/sun/strips';
 
 const station = fc.constantFrom(...stations.filter(({ latitude }) => latitude > 24 && latitude < 49.5));
+const litShare = (strips: ReturnType<typeof stripsOf>, tanProfile: number) => litShareOf(strips)(tanProfile);
 const metres = (min: number, max: number) => fc.double({ min, max, noNaN: true });
 const share = fc.double({ min: 0, max: 1, noNaN: true });
 const bare = fc.record({ azimuthDeg: fc.integer({ min: 0, max: 359 }), heightM: metres(1.5, 8), eaveDepthM: fc.oneof(fc.constant(0), metres(0.05, 2)), eaveDropM: metres(0, 1) });
