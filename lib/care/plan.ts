@@ -2,6 +2,7 @@ import { type CalendarDay } from '@/lib/calendar';
 import { carriedOver } from './carry-over';
 import { filmWork } from './film-work';
 import { knownWall } from './films';
+import { groupedPlan } from './grouped-plan';
 import { type CareHome, type CareWall, type HomePlan, type WallPlan, type WorkItem } from './types';
 import { putOff } from './put-off';
 import { visitsOf } from './visits';
@@ -26,10 +27,11 @@ export function planWall(home: CareHome, wall: CareWall, today: CalendarDay): Wa
 }
 
 /**
- * What is next on every wall of a home, and the visits that it makes. The same home gives the same items on every day until
- * the next `lapsesOn`; the order in which work was logged does not matter.
+ * What is next on every wall of a home, gathered into the trips that cost least, and the visits that it makes. The same home gives
+ * the same items on every day until the next `lapsesOn`; the order in which work was logged does not matter.
  */
 export function planHome(home: CareHome, today: CalendarDay): HomePlan {
-  const walls = [...home.walls].sort(inPosition).map((wall) => planWall(home, wall, today));
-  return { homeId: home.id, walls, visits: visitsOf(walls.flatMap(({ items }) => items)), grouping: { months: 0, choices: [] } };
+  const single = [...home.walls].sort(inPosition).map((wall) => planWall(home, wall, today));
+  const { walls, grouping } = groupedPlan(home, single, today);
+  return { homeId: home.id, walls, visits: visitsOf(walls.flatMap(({ items }) => items)), grouping };
 }

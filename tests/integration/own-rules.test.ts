@@ -55,7 +55,8 @@ describe('an owner’s own rule', () => {
     expect(next()).toMatchObject({ rule: 'FREQ=YEARLY;INTERVAL=3;BYMONTH=6;BYMONTHDAY=15', startOn: '2029-01-01', dueOn: '2029-06-15', closesOn: '2029-08-14', basis: 'own rule' });
     expect(next()?.because).toContain('own rule');
     expect(request.said.at(-1)).toMatch(/^Your rule is saved\. .*Front: next restain moves from \w+ \d{4} to \w+ 2029\./);
-    const others = (items: ReturnType<typeof planned>) => items.filter(({ id }) => id !== wallId());
+    // Other walls may share other trips from now on; what they are due and by which rule stays.
+    const others = (items: ReturnType<typeof planned>) => items.filter(({ id }) => id !== wallId()).map(({ id, kind, rule, startOn, dueOn }) => ({ id, kind, rule, startOn, dueOn }));
     expect(others(planned())).toEqual(others(before));
     expect(ownRulesOf(homeId)).toEqual([{ wallId: wallId(), kind: 'restain', rule: 'FREQ=YEARLY;INTERVAL=3;BYMONTH=6;BYMONTHDAY=15', startOn: '2029-01-01' }]);
   });

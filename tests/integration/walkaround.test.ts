@@ -128,7 +128,7 @@ describe('putting off', () => {
     const before = restain();
     expect((await send((await actions.putOff()).putOff, form())).to).toBe(`/homes/${homeId}/plan?kind=restain&wall=${front().wall.id}`);
     const later = restain();
-    expect(later).toMatchObject({ basis: 'put off', dueOn: before?.dueOn, missedOn: null });
+    expect(later).toMatchObject({ dueOn: before?.dueOn, missedOn: null });
     expect((later?.window.opensOn ?? '') > (before?.window.closesOn ?? '9999')).toBe(true);
     await send((await actions.putOff()).takeUp, form());
     expect(restain()).toEqual(before);

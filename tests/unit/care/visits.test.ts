@@ -20,7 +20,7 @@ describe('visits', () => {
   });
 
   it('keep work apart that shares no day', () => {
-    const visits = planHome(home, '2026-03-20').visits;
+    const visits = planHome({ ...home, costs: { ...home.costs, tripCents: 0 } }, '2026-03-20').visits;
     expect(visits.map(({ opensOn, items }) => [opensOn, items.length])).toEqual([['2026-05-01', 4], ['2026-10-01', 2], ['2032-05-01', 1], ['2034-05-01', 1]]);
   });
 

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { planHome } from '@/lib/care';
+import { exampleCosts } from '@/lib/care/costs';
 import { type CareHome } from '@/lib/care/types';
 import { careHome, careRecord } from '@/tests/fixtures/care-home';
 
@@ -7,7 +8,8 @@ import { careHome, careRecord } from '@/tests/fixtures/care-home';
 const today = '2026-03-20';
 const spells = (home: CareHome) =>
   Object.fromEntries((planHome(home, today).walls[0]?.items ?? []).map((item) => [item.kind, [item.window.opensOn, item.window.closesOn, item.basis]]));
-const known = (restained: string, recaulked: string) => careHome({ records: [careRecord('restain', restained), careRecord('recaulk', recaulked)] });
+// A trip that costs nothing: work joins no other wall's or film's trip to save one.
+const known = (restained: string, recaulked: string) => careHome({ costs: { ...exampleCosts.self, tripCents: 0 }, records: [careRecord('restain', restained), careRecord('recaulk', recaulked)] });
 
 describe('caulk before stain', () => {
   it('pulls a recaulk due up to 18 months later forward into the restain', () => {
