@@ -1,8 +1,7 @@
 import { type CalendarDay } from '@/lib/calendar';
+import { planHome } from '@/lib/care';
 import { type Budget, budget } from '@/lib/care/budget';
-import { groupedPlan } from '@/lib/care/grouped-plan';
 import { type Grouping } from '@/lib/care/grouping';
-import { planWall } from '@/lib/care/plan';
 import { type CareHome } from '@/lib/care/types';
 import { type Actor } from '@/lib/permissions';
 import { transaction } from '../client';
@@ -24,7 +23,7 @@ export function homeYearsAhead(actor: Actor, homeId: string, now: Date): YearsAh
   homeFor(actor, homeId, 'home.view');
   return transaction(() => {
     const { home, today } = careHomeAt(homeId, now);
-    const { walls, grouping } = groupedPlan(home, home.walls.map((wall) => planWall(home, wall, today)), today);
+    const { walls, grouping } = planHome(home, today);
     return { home, today, grouping, budget: budget(home, walls, grouping, today), pricesSetAt: costsSetAt(homeId) };
   });
 }

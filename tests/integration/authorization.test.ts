@@ -1,6 +1,7 @@
 import { readdirSync, readFileSync } from 'node:fs';
 import path from 'node:path';
 import { beforeEach, describe, expect, test, vi } from 'vitest';
+import { setCosts } from '@/db/queries/costs';
 import { homesWithWork } from '@/db/queries/home-list';
 import { homeView } from '@/db/queries/home-view';
 import { archiveHome, createHome, homeOf, listHomes, restoreHome, updateHome } from '@/db/queries/homes';
@@ -13,6 +14,7 @@ import { membersOf, shareHome, withdrawShare } from '@/db/queries/sharing';
 import { siteFor } from '@/db/queries/site';
 import { addWall, removeWall, restoreWall, turnWalls, updateWall, wallOf, wallsOfHome } from '@/db/queries/walls';
 import { logWork, removeRecord, restoreRecord } from '@/db/queries/work';
+import { exampleCosts } from '@/lib/care/costs';
 import { type Actor, can, homeVerbs, Refused, roleVerbs } from '@/lib/permissions';
 import { keysOf, memberships, roles } from '@/lib/schemas/vocabulary';
 import { setEnvironment } from '@/tests/fixtures/environment';
@@ -104,6 +106,7 @@ const homeQueries: [name: string, verb: keyof typeof homeRights, call: (actor: A
   ['updateWall', 'home.edit', (actor, { wallId }) => updateWall(actor, wallId, wallChange)],
   ['removeWall', 'home.edit', (actor, { wallId }) => removeWall(actor, wallId, now)],
   ['restoreWall', 'home.edit', (actor, { homeId, wallId }) => restoreWall(actor, homeId, wallId)],
+  ['setCosts', 'home.edit', (actor, { homeId }) => setCosts(actor, homeId, exampleCosts.hired, now)],
   ['turnWalls', 'home.edit', (actor, { homeId }) => turnWalls(actor, homeId, 10)],
   ['setOwnRule', 'home.edit', (actor, { homeId, wallId }) => setOwnRule(actor, homeId, wallId, 'wash', { rule: 'FREQ=YEARLY', startOn: '2027-05-01' })],
   ['removeOwnRule', 'home.edit', (actor, { homeId, wallId }) => removeOwnRule(actor, homeId, wallId, 'wash')],

@@ -107,6 +107,8 @@ export const ownRules = [
   'That a raw date moves into the coating season, never later than 60 days after the coat is used up; that work which missed its season moves to the coming one and stays overdue.',
   'That caulk due within 18 months of a restain joins it, and that a restain begins with a wash.',
   'A rule of your own falls at most once in 28 days, starts within 50 years of today, and a rule for restaining or recaulking must fall on some day whenever logged work restarts it.',
+  'That a wall due within so many months of a trip joins it when the share of coat or caulk life thrown away costs less than another trip; that the months, 0 to 24, are those that cost least a year over 20 years, life left at the end counted; that a trip takes place on the day its first coat or caulk is used up, or the nearest day of its window.',
+  'That a coat older than 1.15 times its life is stripped first; that the years ahead are reckoned at today’s prices. The prices that a home starts with are made up by us, for you to replace.',
   'When a reminder goes out: 120 days before to book, 28 days before to buy, on the opening day, and 14, 45 and 105 days after a chance has passed.',
   'A day without rain before and after the work; no stain above 90 °F (32 °C); caulk kept from frost for a night; oil stain kept above its 40 °F (4 °C) through the night.',
   'The order in which work follows the shade: by the middle of each wall’s longest time out of the sun; trees count as shade when less than half of the light passes.',

@@ -3,8 +3,8 @@ import { pageHome } from '@/app/_server/page-data';
 import { whatWasSaid } from '@/app/_server/said';
 import { Said } from '@/components/home/said';
 import { Undo } from '@/components/home/undo';
+import { PlanActions } from '@/components/plan/plan-actions';
 import { PlanCourses } from '@/components/plan/plan-courses';
-import { LinkButton } from '@/components/ui/button';
 import { Course } from '@/components/ui/course';
 import { EmptyState } from '@/components/ui/empty-state';
 import { PageHead } from '@/components/ui/page-head';
@@ -29,7 +29,7 @@ export default async function PlanPage({ params, searchParams }: Props) {
   const gone = mayPutOff ? justPutOff(await searchParams, putOffAt(home.id)) : null;
   return (
     <main id="main">
-      <PageHead title="Plan" lead="Every wall’s next work. What falls into one season is one visit." path={[{ href: '/homes', label: 'Homes' }, { href: `/homes/${home.id}`, label: home.name }]} actions={mayLog ? <LinkButton href={`/homes/${home.id}/log`}>Log work</LinkButton> : null} />
+      <PageHead title="Plan" lead="Every wall’s next work. What falls into one season is one visit." path={[{ href: '/homes', label: 'Homes' }, { href: `/homes/${home.id}`, label: home.name }]} actions={<PlanActions homeId={home.id} mayLog={mayLog} />} />
       <Said words={await whatWasSaid()} />
       {gone ? <Undo done={`${workKinds[gone.kind]}: put off.`} label="Take it up again" action={takeUp} fields={{ homeId: home.id, kind: gone.kind, 'wallIds[]': gone.wallIds }} /> : null}
       {walls.length === 0 ? (
