@@ -36,15 +36,23 @@ export const faceOf = (wall: ExposedWall): WallFace => ({
   horizon: shadeHorizon(wall),
 });
 
+/** Sun dose of a wall in a mean year and in its months, kWh/m². */
+const sunDoseOf = (wall: ExposedWall, { place, ghiKwhM2Day, ...options }: SunSite) => sunDose(place, faceOf(wall), ghiKwhM2Day, options);
+
+/** To hundredths, as it is stored. */
+const roundedYear = (annual: number) => Number(annual.toFixed(2));
+
+/** Sun dose of a wall in a mean year, kWh/m², without the year's path: as `exposureOf` has it. */
+export const doseOf = (wall: ExposedWall, site: SunSite): number => roundedYear(sunDoseOf(wall, site).annual);
+
 /** Direct sun hours and sun dose (kWh/m²) of a wall in a mean year, rounded to hundredths. */
 export function exposureOf(wall: ExposedWall, site: SunSite, path: SunPath): Exposure {
-  const face = faceOf(wall);
-  const hours = directSunHoursOn(path, face, site.leafOnMonths);
-  const dose = sunDose(site.place, face, site.ghiKwhM2Day, { leafOnMonths: site.leafOnMonths, albedo: site.albedo });
+  const hours = directSunHoursOn(path, faceOf(wall), site.leafOnMonths);
+  const dose = sunDoseOf(wall, site);
   return {
-    sunHours: Number(hours.annual.toFixed(2)),
+    sunHours: roundedYear(hours.annual),
     sunHoursMonthly: rounded(hours.monthly),
-    doseKwhM2: Number(dose.annual.toFixed(2)),
+    doseKwhM2: roundedYear(dose.annual),
     doseMonthly: rounded(dose.monthly),
   };
 }

@@ -1,18 +1,20 @@
 import { type Metadata } from 'next';
-import { pageHome, pageWall } from '@/app/_server/page-data';
+import { pageData, pageHome, pageWall } from '@/app/_server/page-data';
 import { whatWasSaid } from '@/app/_server/said';
 import { MonthlySun } from '@/components/charts/monthly-sun';
 import { WallElevation } from '@/components/drawings/wall-elevation';
 import { LearnedCourse } from '@/components/home/learned-course';
 import { Neighbours } from '@/components/home/neighbours';
-import { RecordCourse } from '@/components/home/record-course';
 import { Said } from '@/components/home/said';
 import { WallFigures } from '@/components/home/wall-figures';
+import { WallRecord } from '@/components/home/wall-record';
 import { WallWork } from '@/components/home/wall-work';
+import { WhatIf } from '@/components/home/what-if';
 import { LinkButton } from '@/components/ui/button';
 import { Course } from '@/components/ui/course';
 import { PageHead } from '@/components/ui/page-head';
 import { unitsOf } from '@/db/queries/units';
+import { wallWhatIf } from '@/db/queries/what-if';
 import { dayIn } from '@/lib/calendar';
 import { stationById } from '@/lib/climate';
 import { coatLeft } from '@/lib/coat';
@@ -33,10 +35,11 @@ export default async function WallPage({ params }: Props) {
   const { actor, view } = await pageHome(homeId);
   const planned = await pageWall(homeId, wallId);
   const { home, membership, walls } = view;
+  const records = view.records.filter((record) => record.wallIds.includes(wallId));
   const { wall, openings, exposure, coat, items } = planned;
   const units = unitsOf(actor);
-  const today = dayIn(home.timeZone, new Date());
-  const records = view.records.filter((record) => record.wallIds.includes(wallId));
+  const now = new Date();
+  const today = dayIn(home.timeZone, now);
   const { words: size, courseM } = wallMeasures(wall, openings, home.sidingNominalIn, units);
   const cover = coverWords(wall, units);
   const words = cover ? `${size} ${cover}.` : size;
@@ -64,14 +67,8 @@ export default async function WallPage({ params }: Props) {
         </div>
         {exposure ? <MonthlySun wallName={wall.name} doseMonthly={exposure.doseMonthly} /> : null}
       </Course>
-      <Course heading="Done on this wall" aside={<LinkButton href={`/homes/${homeId}/record`} look="plain">The whole record</LinkButton>}>
-        <p className="text-quiet">{records.length === 0 ? 'Nothing yet.' : `${records.length} ${records.length === 1 ? 'piece' : 'pieces'} of work, newest first.`}</p>
-      </Course>
-      <ul>
-        {records.map((record) => (
-          <RecordCourse key={record.id} record={record} walls={walls.map((one) => one.wall)} units={units} />
-        ))}
-      </ul>
+      <WhatIf view={pageData(() => wallWhatIf(actor, homeId, wallId, now))} />
+      <WallRecord homeId={homeId} records={records} walls={walls.map((one) => one.wall)} units={units} />
       <Neighbours homeId={homeId} walls={walls.map((one) => one.wall)} wallId={wallId} />
     </main>
   );
