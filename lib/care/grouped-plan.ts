@@ -23,16 +23,17 @@ function moved(item: WorkItem, window: Window): WorkItem {
   return { ...item, window, lapsesOn: addDays(window.closesOn, 1), explanation: { ...item.explanation, value, formula: `${item.explanation.formula}; then the window of the trip that it joins` } };
 }
 
-function joinedItem(item: WorkItem, { job, window, wallIds, months, cents }: Joined, home: CareHome): WorkItem {
+function joinedItem(item: WorkItem, { job, window, wallIds, months, cents, savesTrip }: Joined, home: CareHome): WorkItem {
   const film = filmWords[job.kind];
   const others = home.walls.filter(({ id }) => id !== job.wallId && wallIds.includes(id));
   const company = others.length > 0 ? wallWords(others, Number.POSITIVE_INFINITY) : 'other work on this wall';
   const trip = dollarWords(home.costs.tripCents);
+  const gain = savesTrip ? `and saves a trip of about ${trip}` : `less than another trip of about ${trip}`;
   const { explanation, ...rest } = moved(item, window);
   return {
     ...rest,
     basis: 'joined to a visit',
-    because: `Done in one trip with ${company}: it throws away ${lifeWords(months)} of this ${film}, about ${dollarWords(cents)}, and saves a trip of about ${trip}; on its own it would last until ${aboutDay(job.usedUpOn)}.`,
+    because: `Done in one trip with ${company}: it throws away ${lifeWords(months)} of this ${film}, about ${dollarWords(cents)}, ${gain}; on its own it would last until ${aboutDay(job.usedUpOn)}.`,
     explanation: {
       ...explanation,
       inputs: [

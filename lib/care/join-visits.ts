@@ -1,6 +1,6 @@
 import { type CalendarDay } from '@/lib/calendar';
 import { type FilmJob } from './film-jobs';
-import { joinings, visitDay, wasteCents } from './trip-rules';
+import { firstTrip, joinings, type TripDays, wasteCents } from './trip-rules';
 import { type Window } from './types';
 import { runsAround } from './window';
 
@@ -15,22 +15,14 @@ export type Joined = {
   cents: number;
   /** Caulk that goes where this restain goes. */
   caulk: FilmJob | null;
+  /** Nothing else was to be done on the days of its own window, so that its own trip is not needed. */
+  savesTrip: boolean;
 };
 
-type Trip = { on: CalendarDay; opensOn: CalendarDay; closesOn: CalendarDay; jobs: FilmJob[] };
-
-/** The trip that the work closing first makes, with all whose windows share days with it, as the plan's visits do. */
-function firstTrip(open: readonly FilmJob[]): Trip | null {
-  const [first] = [...open].sort((a, b) => (a.window.closesOn < b.window.closesOn ? -1 : a.window.closesOn > b.window.closesOn ? 1 : 0));
-  if (!first) return null;
-  const { closesOn } = first.window;
-  const jobs = open.filter(({ window }) => window.opensOn <= closesOn);
-  const opensOn = jobs.map(({ window }) => window.opensOn).sort().at(-1) ?? first.window.opensOn;
-  return { on: visitDay(first, opensOn), opensOn, closesOn, jobs };
-}
+const overlap = (a: Window, b: Window) => a.opensOn <= b.closesOn && b.opensOn <= a.closesOn;
 
 /** The days of a trip on which a joining wall's own coat can cure too. */
-function sharedDays({ on, opensOn, closesOn }: Trip, seasons: FilmJob['seasons']): Window {
+function sharedDays({ on, opensOn, closesOn }: TripDays, seasons: FilmJob['seasons']): Window {
   const run = runsAround(on, [...seasons]).find((one) => one.opensOn <= on && on <= one.closesOn);
   return { opensOn: run && run.opensOn > opensOn ? run.opensOn : opensOn, closesOn: run && run.closesOn < closesOn ? run.closesOn : closesOn, moved: 'to a visit' };
 }
@@ -42,7 +34,7 @@ function sharedDays({ on, opensOn, closesOn }: Trip, seasons: FilmJob['seasons']
 export function joinToVisits(jobs: readonly FilmJob[], { joinMonths, tripCents, today }: { joinMonths: number; tripCents: number; today: CalendarDay }): Joined[] {
   const joined: Joined[] = [];
   let open = [...jobs];
-  for (let trip = firstTrip(open); trip; trip = firstTrip(open)) {
+  for (let trip = firstTrip(open, null); trip; trip = firstTrip(open, null)) {
     const here = trip;
     const { on, jobs: along } = here;
     const rest = open.filter((job) => !along.includes(job));
@@ -51,7 +43,8 @@ export function joinToVisits(jobs: readonly FilmJob[], { joinMonths, tripCents, 
     for (const { job, caulk, months } of found) {
       const others = along.filter(({ wallId }) => wallId !== job.wallId);
       const wallIds = [...new Set((others.length > 0 ? others : along).map(({ wallId }) => wallId))];
-      joined.push({ job, window: days(job), wallIds, months, cents: Math.round(wasteCents(months, job)), caulk });
+      const savesTrip = !jobs.some((one) => one !== job && one !== caulk && overlap(one.window, job.window));
+      joined.push({ job, savesTrip, window: days(job), wallIds, months, cents: Math.round(wasteCents(months, job)), caulk });
     }
     const gone = new Set(found.flatMap(({ job, caulk }) => [job, caulk]));
     open = rest.filter((job) => !gone.has(job));

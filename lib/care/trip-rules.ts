@@ -2,21 +2,28 @@ import { addMonths, type CalendarDay, daysBetween, monthOf } from '@/lib/calenda
 import { type Source } from '@/lib/explain';
 import { type FilmJob } from './film-jobs';
 import { stripAtShare } from './stripping';
-import { type Window } from './types';
 import { dayOfVisit } from './with-restain';
 
 const daysInMonth = 30.44;
 
 export const joinSource: Source = { text: 'A wall due within so many months of a trip joins it when the share of film life thrown away costs less than another trip', ground: 'our rule' };
-export const visitDaySource: Source = { text: 'A trip is reckoned to take place on the day on which its first film is used up, or on the nearest day of its window', ground: 'our rule' };
+export const visitDaySource: Source = { text: 'A trip is reckoned to take place on the day on which its first film is used up, or on the nearest day that suits all of its work', ground: 'our rule' };
 
-/** The day on which a trip for this work is reckoned to take place; not before a given day. */
-export function visitDay(job: Pick<FilmJob, 'dueOn' | 'window' | 'missedOn'>, notBefore: CalendarDay | null): CalendarDay {
-  const day = dayOfVisit(job);
-  return notBefore !== null && notBefore > day ? notBefore : day;
+/** A trip as the plan's visits are: the work whose window closes first, and all whose windows share days with it; `on` is the day on which it is reckoned. */
+export type TripDays = { on: CalendarDay; opensOn: CalendarDay; closesOn: CalendarDay; jobs: FilmJob[] };
+
+const latest = (days: readonly CalendarDay[]) => days.reduce((a, b) => (a > b ? a : b));
+
+/** The first trip that open work makes, reckoned on the day that its first film is used up, or on the nearest day that suits all of it; not before a given day. */
+export function firstTrip(open: readonly FilmJob[], notBefore: CalendarDay | null): TripDays | null {
+  const [head, ...tail] = open;
+  if (!head) return null;
+  const first = tail.reduce((a, b) => (b.window.closesOn < a.window.closesOn ? b : a), head);
+  const { closesOn } = first.window;
+  const jobs = open.filter(({ window }) => window.opensOn <= closesOn);
+  const opensOn = latest(jobs.map(({ window }) => window.opensOn));
+  return { on: latest([dayOfVisit(first), opensOn, ...(notBefore === null ? [] : [notBefore])]), opensOn, closesOn, jobs };
 }
-
-export const holds = (window: Window, day: CalendarDay): boolean => window.opensOn <= day && day <= window.closesOn;
 
 /** Months of a film's life that are left when it is renewed on a day; 0 once it is used up. */
 export const thrownAwayMonths = (on: CalendarDay, usedUpOn: CalendarDay): number => Math.max(0, daysBetween(on, usedUpOn) / daysInMonth);

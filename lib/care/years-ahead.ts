@@ -1,6 +1,6 @@
 import { type CalendarDay } from '@/lib/calendar';
 import { type FilmJob, type FilmKind } from './film-jobs';
-import { holds, joinings, needsStripping, thrownAwayMonths, visitDay } from './trip-rules';
+import { firstTrip, joinings, needsStripping, thrownAwayMonths } from './trip-rules';
 import { restainWindowFor } from './with-restain';
 
 /** One film renewed on a trip. */
@@ -33,21 +33,19 @@ type Ahead = {
 /** Far more trips than forty years can hold; reached only if a film's next window did not move on, which is a bug. */
 const mostTrips = 2000;
 
-const byClosing = (a: FilmJob, b: FilmJob) => (a.window.closesOn < b.window.closesOn ? -1 : a.window.closesOn > b.window.closesOn ? 1 : 0);
-
 /**
  * The film work of a home through the years, trip by trip. The work whose window closes first makes a trip; work whose window
- * holds that day goes along; work that opens later joins by `joinings`. Every film done starts anew on that day.
+ * shares days with it goes along; work that opens later joins by `joinings`. Every film done starts anew on that day.
  */
 export function yearsAhead({ jobs, joinMonths, tripCents, notBefore, through }: Ahead): YearsAhead {
   const trips: Trip[] = [];
   let open = [...jobs];
   for (;;) {
-    const [first] = [...open].sort(byClosing);
-    const on = first && visitDay(first, notBefore);
-    if (!first || !on || on > through) return { trips, left: open };
+    const trip = firstTrip(open, notBefore);
+    if (!trip || trip.on > through) return { trips, left: open };
     if (trips.length >= mostTrips) throw new Error('the years ahead do not end');
-    const done = new Set([first, ...open.filter(({ window }) => holds(window, on))]);
+    const { on } = trip;
+    const done = new Set(trip.jobs);
     for (const { job, caulk } of joinings(open.filter((job) => !done.has(job)), on, joinMonths, tripCents)) {
       done.add(job);
       if (caulk) done.add(caulk);

@@ -58,6 +58,13 @@ describe('a wall that is due a season later', () => {
   });
 });
 
+test('two walls that share a later trip: neither claims to save it alone', () => {
+  const left = careWall({ id: 'l', name: 'Left side', position: 2 });
+  const home = { ...at([...apart, careRecord('restain', '2022-11-20', on('l'))]), walls: [front, back, left] };
+  expect(itemOf(home, 'b', 'restain')?.because).toContain('about $23, less than another trip of about $90; on its own');
+  expect(itemOf(home, 'l', 'restain')?.basis).toBe('joined to a visit');
+});
+
 test('caulk that goes with the restain goes with it to the earlier trip, and so does the wash of that year', () => {
   // Caulk of 90 months from 10 May 2021: used up on 10 November 2028, six months after the coat.
   const home = at([...apart, careRecord('recaulk', '2021-05-10', on('b')), careRecord('wash', '2026-05-10', { wallIds: ['f', 'b'] })]);

@@ -55,6 +55,12 @@ describe('what goes along', () => {
     expect(trips.map(({ on, items }) => [on, items.length])).toEqual([['2028-07-01', 2]]);
   });
 
+  test('work whose windows share days goes together on the first day that suits all of it', () => {
+    const inWindow = (opensOn: string, closesOn: string) => ({ window: { opensOn, closesOn, moved: 'in season' as const } });
+    const jobs = [filmJob('A', '2028-05-10', inWindow('2028-02-10', '2028-07-09')), filmJob('B', '2028-09-01', inWindow('2028-06-01', '2028-10-31'))];
+    expect(yearsAhead({ ...ahead, jobs, through: '2029-01-01' }).trips.map(({ on, items }) => [on, items.length])).toEqual([['2028-06-01', 2]]);
+  });
+
   test('work that may not be drawn forward waits for its own window', () => {
     const jobs = [filmJob('A', '2028-07-01'), filmJob('B', '2029-06-01', { mayJoin: false })];
     expect(yearsAhead({ ...ahead, jobs, joinMonths: 24, through: '2030-01-01' }).trips.map(({ on }) => on)).toEqual(['2028-07-01', '2029-06-01']);
