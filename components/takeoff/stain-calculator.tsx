@@ -1,20 +1,19 @@
 'use client';
 
-import { type FocusEvent, type FormEvent, useEffect, useRef, useState } from 'react';
+import { useEffect } from 'react';
 import { CoatingFields } from '@/components/takeoff/coating-fields';
 import { ContainerFields } from '@/components/takeoff/container-fields';
 import { EditButton } from '@/components/takeoff/edit-button';
 import { EstimateCourse, EstimateLine } from '@/components/takeoff/estimate-course';
 import { useEstimate } from '@/components/takeoff/use-estimate';
+import { useTypedForm } from '@/components/takeoff/use-typed-form';
 import { WallRows } from '@/components/takeoff/wall-rows';
 import { Button } from '@/components/ui/button';
 import { CheckCourses } from '@/components/ui/choice-courses';
 import { FormContext } from '@/components/ui/form-context';
 import { type FormValues } from '@/lib/schemas/action-state';
 import { readCalculator } from '@/lib/schemas/calculator';
-import { editCalculator, rowsOf } from '@/lib/schemas/calculator-values';
 import { notCounted } from '@/lib/schemas/calculator-words';
-import { readForm } from '@/lib/schemas/form-values';
 import { type UnitSystem } from '@/lib/schemas/vocabulary';
 import { type StainAnswer } from '@/lib/takeoff/estimate';
 
@@ -31,54 +30,19 @@ export type StainCalculatorProps = {
   onAnswer?: ((answer: StainAnswer | undefined) => void) | undefined;
 };
 
-/** Where the keyboard goes on after a row was added or removed. */
-function focusAfter(edit: string, values: FormValues): string {
-  const [act, target = ''] = edit.split(' ');
-  const group = act === 'drop' ? target.split('.').slice(0, -1).join('.') : target;
-  const last = rowsOf(values, group).at(-1)?.[0];
-  if (act === 'to') return 'button[value^="to "]';
-  return act === 'add' ? `[name^="${group}.${last}."]` : `button[value="add ${group}"]`;
-}
-
 /** How much stain to buy. Answers while one types; without scripts the form is sent and answered by the page. */
 export function StainCalculator({ walls, start, first, onAnswer }: StainCalculatorProps) {
-  const form = useRef<HTMLFormElement>(null);
-  const focus = useRef<string | null>(null);
-  const [values, setValues] = useState<FormValues>(start);
-  const reading = readCalculator(values);
-  const [left, setLeft] = useState<ReadonlySet<string>>(() => new Set(Object.keys(reading.missing)));
+  const { form, values, reading, errors, on } = useTypedForm(start, readCalculator);
   const { answer, failure, waiting, retry } = useEstimate<StainAnswer>('stain', reading.body, first);
   const units: UnitSystem = values.units === 'metric' ? 'metric' : 'us';
 
   useEffect(() => onAnswer?.(answer), [answer, onAnswer]);
-  useEffect(() => {
-    if (focus.current) form.current?.querySelector<HTMLElement>(focus.current)?.focus();
-    focus.current = null;
-  }, [values]);
-
-  const typed = () => (form.current ? readForm(new FormData(form.current)) : values);
-  const onSubmit = (event: FormEvent) => {
-    event.preventDefault();
-    const button = (event.nativeEvent as SubmitEvent).submitter;
-    const edit = button instanceof HTMLButtonElement && button.name === 'edit' ? button.value : '';
-    const next = editCalculator(typed(), edit);
-    focus.current = edit ? focusAfter(edit, next) : null;
-    setValues(next);
-  };
-  const onBlur = ({ target }: FocusEvent) => {
-    const name = target instanceof HTMLInputElement ? target.name : '';
-    if (name && !left.has(name)) setLeft(new Set([...left, name]));
-  };
-
-  // A begun row is not at fault before its field was reached and left.
-  const reached = Object.entries(reading.missing).filter(([name]) => left.has(name));
-  const errors = { ...Object.fromEntries(reached), ...reading.faults };
   const areas = walls?.map((wall) => ({ value: `${wall.areaM2}#${wall.id}`, label: wall.name, hint: wall.areaText }));
   const invitation = areas ? 'Choose a wall to see how much stain it takes.' : 'Type the width and height of a wall to see how much stain it takes.';
   const result = { answer, units, failure, waiting, retry, faulty: Object.keys(reading.faults).length > 0, fault: reading.faults[''], left: notCounted(values, reading.missing), nothing: reading.body ? null : invitation };
   return (
     <FormContext value={{ ok: false, message: null, errors }}>
-      <form ref={form} method="get" onInput={() => setValues(typed())} onBlur={onBlur} onSubmit={onSubmit} noValidate className="grid gap-x-10 gap-y-8 lg:grid-cols-[minmax(0,1fr)_minmax(0,24rem)] lg:grid-rows-[auto_1fr] max-lg:[&_:is(input,select,button,summary)]:scroll-mb-24">
+      <form ref={form} method="get" {...on} noValidate className="grid gap-x-10 gap-y-8 lg:grid-cols-[minmax(0,1fr)_minmax(0,24rem)] lg:grid-rows-[auto_1fr] max-lg:[&_:is(input,select,button,summary)]:scroll-mb-24">
         {/* Enter in a field sends the form with its first button. */}
         <button type="submit" hidden />
         <input type="hidden" name="units" value={units} />
@@ -99,7 +63,7 @@ export function StainCalculator({ walls, start, first, onAnswer }: StainCalculat
         <EstimateCourse {...result} />
         <div key={`coating ${units}`} className="grid content-start gap-6 border-t-2 border-lichen pt-6">
           <CoatingFields units={units} values={values} />
-          <ContainerFields units={units} values={values} />
+          <ContainerFields unit={units === 'us' ? 'gal' : 'L'} values={values} />
           <noscript>
             <Button type="submit">Work it out</Button>
           </noscript>

@@ -9,7 +9,8 @@ export const jointRuleOf = (sidingNominalIn: number) => ({
   boardM: usualJoint.boardM,
 });
 
-type StoredWall = Omit<JointWall, 'penetrations'> & { pipes: number };
+/** What is stored of a wall, with its openings; `corners` are log-end corners, `pipes` all that goes through it. */
+export type StoredWall = Omit<JointWall, 'penetrations' | 'corners'> & { corners: number; pipes: number };
 
 /** A stored wall as the joints see it: a foot of joint round each pipe (our rule). */
 export const asJointWall = ({ pipes, ...wall }: StoredWall): JointWall => ({ ...wall, penetrations: { count: pipes, perimeterM: usualJoint.pipePerimeterM } });

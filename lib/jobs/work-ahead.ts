@@ -10,7 +10,7 @@ import { type StainedWall, stainForWalls, type WallsEstimate } from '@/lib/takeo
 import { metresToInches } from '@/lib/units';
 
 export type JobHome = { id: string; name: string; place: string; state: string; timeZone: string; sidingNominalIn: number; crownHeightM: number };
-type JobWall = { id: string; name: string; position: number; azimuthDeg: number; widthM: number; heightM: number; gableHeightM: number; texture: Texture };
+type JobWall = { id: string; name: string; position: number; azimuthDeg: number; widthM: number; heightM: number; gableHeightM: number; corners: number; pipes: number; texture: Texture };
 
 /** One piece of work on one wall, as the data layer finds it. */
 export type Job = { home: JobHome; wall: JobWall; openings: { widthM: number; heightM: number; count: number }[]; item: WorkItem };

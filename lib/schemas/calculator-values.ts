@@ -1,6 +1,7 @@
 import { type FormValue, type FormValues } from '@/lib/schemas/action-state';
 import { parseLength } from '@/lib/schemas/measures';
 import { type UnitSystem } from '@/lib/schemas/vocabulary';
+import { type ContainerSize } from '@/lib/takeoff';
 import { exampleContainers } from '@/lib/takeoff/stain';
 import { lengthField, litresPerGallon, metresPerInch, squareMetresPerSquareFoot } from '@/lib/units';
 
@@ -34,8 +35,8 @@ function changed(values: FormValues, path: string[], change: (group: FormValues)
 
 const without = (values: FormValues, key: string): FormValues => Object.fromEntries(Object.entries(values).filter(([one]) => one !== key));
 
-const addable = /^(walls|walls\.\d+\.openings|containers)$/;
-const droppable = /^(walls\.\d+|walls\.\d+\.openings\.\d+|containers\.\d+)$/;
+const addable = /^(walls|walls\.\d+\.openings|containers|caulkContainers|cleanerContainers)$/;
+const droppable = /^(walls\.\d+|walls\.\d+\.openings\.\d+|(?:containers|caulkContainers|cleanerContainers)\.\d+)$/;
 
 /** Does what a button of the form says: 'add walls', 'drop walls.1', 'to metric'. Anything else changes nothing. */
 export function editCalculator(values: FormValues, edit: string): FormValues {
@@ -56,20 +57,26 @@ const picked = (row: FormValues, names: readonly string[]): FormValues => Object
 const asRows = (rows: readonly FormValues[]): FormValues => Object.fromEntries(rows.map((row, key) => [String(key), row]));
 const tidied = (rows: readonly [string, FormValues][], tidy: (row: FormValues) => FormValues): FormValues => Object.fromEntries(rows.slice(0, mostRows).map(([key, row]) => [key, tidy(row)]));
 
-const exampleRows = (units: UnitSystem): FormValues =>
-  asRows(exampleContainers.map(({ gal, priceCents }) => ({ size: units === 'us' ? String(gal) : (gal * litresPerGallon).toFixed(2), price: (priceCents / 100).toFixed(2) })));
+/** Container rows as sent, or the examples where none were. */
+export const containerRows = (sent: FormValues, group: string, examples: readonly { size: string; price: string }[]): FormValues => {
+  const rows = tidied(rowsOf(sent, group), (one) => picked(one, ['size', 'price']));
+  return Object.keys(rows).length > 0 ? rows : asRows(examples);
+};
+
+/** Containers by the gallon as they are typed in a system of units. */
+export const typedSizes = (sizes: readonly ContainerSize[], units: UnitSystem) =>
+  sizes.map(({ gal, priceCents }) => ({ size: units === 'us' ? String(gal) : (gal * litresPerGallon).toFixed(2), price: (priceCents / 100).toFixed(2) }));
 
 /** Whatever was sent as the form's values: what is missing gets its usual value, what does not belong is left out. */
 export function calculatorStart(sent: FormValues, units: UnitSystem): FormValues {
   const sentWalls = rowsOf(sent, 'walls');
   const walls = tidied(sentWalls.length > 0 ? sentWalls : [['0', {}]], (wall) => ({ ...picked(wall, ['width', 'height', 'gable']), openings: tidied(rowsOf(wall, 'openings'), (one) => picked(one, ['width', 'height', 'count'])) }));
-  const containers = tidied(rowsOf(sent, 'containers'), (one) => picked(one, ['size', 'price']));
   const texts = Object.entries({ ...fields, crown: usualCrown[units] }).map(([name, usual]) => [name, typeof sent[name] === 'string' ? sent[name] : usual]);
   return {
     units,
     ...Object.fromEntries(texts),
     walls,
-    containers: Object.keys(containers).length > 0 ? containers : exampleRows(units),
+    containers: containerRows(sent, 'containers', typedSizes(exampleContainers, units)),
     ...(Array.isArray(sent.chosenM2) ? { chosenM2: sent.chosenM2.filter((one) => typeof one === 'string') } : {}),
   };
 }

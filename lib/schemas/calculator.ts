@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { type FormValues } from '@/lib/schemas/action-state';
 import { rowsOf, typedIn } from '@/lib/schemas/calculator-values';
+import { type Bounds, type Note, readContainers, readNumber, type SizeReader } from '@/lib/schemas/container-rows';
 import { type EstimateBody, estimateSchema } from '@/lib/schemas/estimate';
 import { readLength } from '@/lib/schemas/measures';
 import { textures, type UnitSystem } from '@/lib/schemas/vocabulary';
@@ -9,20 +10,6 @@ import { litresPerGallon, metresPerFoot, metresPerInch, squareMetresPerSquareFoo
 
 /** The form as read: the estimate's body when nothing is wrong and something is there; faults by field; fields that a begun row still lacks. */
 export type CalculatorReading = { body: EstimateBody | null; faults: Record<string, string>; missing: Record<string, string> };
-
-type Note = Pick<CalculatorReading, 'faults' | 'missing'> & { units: UnitSystem };
-type Bounds = { min: number; max: number; what: string; unit?: string };
-
-/** A number as typed; undefined when empty or at fault. `factor` takes it to the unit of the bounds. */
-function readNumber(text: string, path: string, { min, max, what, unit = '' }: Bounds, note: Note, factor = 1): number | undefined {
-  if (text.trim() === '') return undefined;
-  const plain = text.trim().replace(/^\$/, '').replace(/,(?=\d{3}\b)/g, '').replace(',', '.');
-  const value = Number(plain) * factor;
-  if (/^\d*\.?\d+\.?$/.test(plain) && value >= min * (1 - 1e-9) && value <= max * (1 + 1e-9)) return value;
-  const bound = (one: number) => Number((one / factor).toPrecision(3)).toLocaleString('en-US');
-  note.faults[path] = `${what} should be a number from ${bound(min)} to ${bound(max)}${unit ? ` ${unit}` : ''}.`;
-  return undefined;
-}
 
 /** Feet of a length field; undefined when it is empty. */
 function readFeet(row: FormValues, field: string, path: string, bounds: Bounds, note: Note): number | undefined {
@@ -58,22 +45,8 @@ function readWall(row: FormValues, path: string, note: Note) {
   return [{ ...sides, gableHeightFt, openings }];
 }
 
-function readContainers(values: FormValues, note: Note) {
-  const us = note.units === 'us';
-  const rows = rowsOf(values, 'containers');
-  const sizes = rows.flatMap(([key, row]) => {
-    const at = `containers.${key}`;
-    const gal = readNumber(typedIn(row, 'size'), `${at}.size`, { min: 1 / 128, max: 60, what: 'The size', unit: us ? 'gal' : 'L' }, note, us ? 1 : 1 / litresPerGallon);
-    const price = readNumber(typedIn(row, 'price'), `${at}.price`, { min: 0, max: 100_000, what: 'The price' }, note);
-    if (gal !== undefined && price !== undefined) return [{ gal, priceCents: Math.round(price * 100) }];
-    if (gal !== undefined && !note.faults[`${at}.price`]) note.missing[`${at}.price`] = 'The price is still missing.';
-    if (price !== undefined && !note.faults[`${at}.size`]) note.missing[`${at}.size`] = 'The size is still missing.';
-    return [];
-  });
-  const [first] = rows;
-  if (sizes.length === 0 && first && Object.keys(note.faults).length === 0) note.faults[`containers.${first[0]}.size`] = 'At least one container with its size and price is needed.';
-  return sizes;
-}
+/** Cans by the gallon or the litre. */
+const canSize = (units: UnitSystem): SizeReader => (text) => (units === 'us' ? { number: text, unit: 'gal', gallons: 1 } : { number: text, unit: 'L', gallons: 1 / litresPerGallon });
 
 function readCoverage(values: FormValues, note: Note) {
   const us = note.units === 'us';
@@ -113,7 +86,7 @@ function readBody(values: FormValues, note: Note): EstimateBody | null {
   if (!has(textures, texture)) note.faults.texture = 'Choose a surface.';
   if (![1, 2, 3].includes(coats)) note.faults.coats = 'Choose how many coats.';
   const area = readArea(values, note);
-  const containers = readContainers(values, note);
+  const containers = readContainers(values, 'containers', { min: 1 / 128, max: 60, read: canSize(note.units) }, note);
   const coverage = readCoverage(values, note);
   return area && has(textures, texture) ? { units: note.units, ...area, profile: { nominalIn, crownHeightIn }, texture, coats, ...coverage, wastePercent, containers } : null;
 }

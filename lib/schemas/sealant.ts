@@ -11,6 +11,9 @@ const container = z.object({
   priceCents: whole(0, 10_000_000, 'The price should be a whole number of cents, 0 or more.'),
 });
 
+/** A wall may have its own log-end corners and pipes. */
+const jointed = z.intersection(wall, z.object({ corners: whole(0, 2, 'Corners of a wall should be 0, 1 or 2.').optional(), pipes: whole(0, 1000, 'The count should be a whole number from 0 to 1000.').optional() }));
+
 const penetrations = z.object({ count: whole(0, 1000, 'The count should be a whole number from 0 to 1000.'), perimeterIn: between(0, 240, 'Perimeter').default(12) }, { error: 'Penetrations should be a count and a perimeter.' });
 
 /** Body of POST /api/estimates/sealant. Walls in ft, or the length of their joints in ft; the joint's width in inches. */
@@ -18,7 +21,7 @@ export const sealantSchema = z
   .object(
     {
       units: z.enum(keysOf(unitSystems), { error: 'Units should be us or metric.' }).default('us'),
-      walls: list(wall, 200, 'Walls', 1).optional(),
+      walls: list(jointed, 200, 'Walls', 1).optional(),
       lengthFt: between(0, 100_000, 'Length').optional(),
       jointWidthIn: between(0.25, 1, 'Joint width').default(0.25),
       nominalIn: z.literal([6, 8, 10], { error: 'The nominal width should be 6, 8 or 10.' }).default(8),
@@ -41,15 +44,16 @@ export const sealantSchema = z
 
 type Counted = { corners: number; penetrations: { count: number; perimeterIn: number } };
 
-/** Pipes are those of all the walls together, so they are counted with the first. */
-function jointsOf(walls: readonly z.output<typeof wall>[], { corners, penetrations: { count, perimeterIn } }: Counted, rule: JointRule): Joint[] {
-  return jointsOfWalls(walls.map((one, i) => ({ ...one, corners, penetrations: { count: i === 0 ? count : 0, perimeterM: inchesToMetres(perimeterIn) } })), rule);
+/** A wall's own corners win. Pipes of the body are those of all the walls together, on top of the walls' own; they are counted with the first. */
+function jointsOf(walls: readonly z.output<typeof jointed>[], { corners, penetrations: { count, perimeterIn } }: Counted, rule: JointRule): Joint[] {
+  const perimeterM = inchesToMetres(perimeterIn);
+  return jointsOfWalls(walls.map(({ pipes = 0, ...one }, i) => ({ ...one, corners: one.corners ?? corners, penetrations: { count: pipes + (i === 0 ? count : 0), perimeterM } })), rule);
 }
 
 /** The body as it is sent. */
 export type SealantBody = {
   units?: 'us' | 'metric';
-  walls?: { widthFt: number; heightFt: number; gableHeightFt?: number; openings?: { widthFt: number; heightFt: number; count?: number }[] }[];
+  walls?: { widthFt: number; heightFt: number; gableHeightFt?: number; openings?: { widthFt: number; heightFt: number; count?: number }[]; corners?: number; pipes?: number }[];
   lengthFt?: number;
   jointWidthIn?: number;
   nominalIn?: 6 | 8 | 10;

@@ -5,7 +5,7 @@ import { ShoppingList } from '@/components/takeoff/shopping-list';
 import { caulkStart } from '@/lib/home/caulk-start';
 
 const foot = 0.3048;
-const front = { wall: { id: 'a', name: 'Front', widthM: 30 * foot, heightM: 9 * foot, gableHeightM: 0 }, openings: [{ widthM: 3 * foot, heightM: 4 * foot, count: 3 }] };
+const front = { wall: { id: 'a', name: 'Front', widthM: 30 * foot, heightM: 9 * foot, gableHeightM: 0, corners: 2, pipes: 0 }, openings: [{ widthM: 3 * foot, heightM: 4 * foot, count: 3 }] };
 const caulk = (units: 'us' | 'metric', sent = {}) => caulkStart({ sidingNominalIn: 8 }, [front], ['a'], units, sent);
 
 describe('caulk to buy', () => {

@@ -11,7 +11,7 @@ const job = (of: JobHome, position: number, kind: WorkKind, opensOn: string, val
   const id = `${of.id} ${position}`;
   return {
     home: of,
-    wall: { id, name: `Wall ${position}`, position, azimuthDeg: 180, widthM: 9.144, heightM: 2.7432, gableHeightM: 0, texture },
+    wall: { id, name: `Wall ${position}`, position, azimuthDeg: 180, widthM: 9.144, heightM: 2.7432, gableHeightM: 0, corners: 2, pipes: 0, texture },
     openings: [{ widthM: 0.9144, heightM: 1.2192, count: 3 }],
     item: workItem(id, kind, opensOn, item),
   };

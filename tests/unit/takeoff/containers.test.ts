@@ -50,6 +50,27 @@ describe('cheapestContainers', () => {
     );
   });
 
+  test('caulk by the fluid ounce and the millilitre, at any prices', () => {
+    const tubes = [10.1 / 128, 20 / 128, 0.6 / 3.785411784, 29 / 128];
+    const prices = fc.tuple(...tubes.map(() => fc.integer({ min: 1, max: 4000 })));
+    // 600 mL share no unit with the ounces: a container is counted at most 1/64 of a tenth of an ounce too small, so a need within that of full ones is left out.
+    const clear = (gallons: number, offered: Size[]) => {
+      const less = offered.map((size) => ({ ...size, gal: size.gal - 1 / 81_920 }));
+      return bruteForce(gallons, less).cost === bruteForce(gallons, offered).cost;
+    };
+    fc.assert(
+      fc.property(prices, fc.integer({ min: 1, max: 1200 }), (cents, tenths) => {
+        const offered = tubes.map((gal, i) => ({ gal, priceCents: cents[i] ?? 1 }));
+        const gallons = (tenths + 0.5) / 1280;
+        fc.pre(clear(gallons, offered));
+        const ours = asMix(cheapestContainers(gallons, offered, 1 / 1280), offered);
+        expect(ours.held).toBeGreaterThanOrEqual(gallons - 1e-9);
+        expect(ours.cost).toBe(bruteForce(gallons, offered).cost);
+      }),
+      { numRuns: 100 },
+    );
+  });
+
   test('metric cans, and cans in thousandths of a gallon, at any need, full ones included', () => {
     const metric = fc.constantFrom(0.375, 0.75, 1, 2.5, 5, 10).map((litres) => litres / 3.785411784);
     const typed = fc.constantFrom(0.198, 0.264, 0.66, 1.32, 2.5);
