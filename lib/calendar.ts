@@ -1,4 +1,4 @@
-import { addDays as addDaysFns, addMonths as addMonthsFns, differenceInCalendarDays, isValid, parse } from 'date-fns';
+import { isValid, parse } from 'date-fns';
 
 /** A calendar day without time or zone, 'YYYY-MM-DD'. */
 export type CalendarDay = string;
@@ -12,33 +12,32 @@ export function isCalendarDay(text: string): text is CalendarDay {
   return year >= 1900 && year <= 2200 && isValid(parse(text, 'yyyy-MM-dd', new Date(0)));
 }
 
+const dayMs = 86_400_000;
+
 /** Midnight UTC of a calendar day, for arithmetic and for rrule. Throws RangeError on a day that does not exist. */
 export function toUtcDate(day: CalendarDay): Date {
-  const date = new Date(`${day}T00:00:00Z`);
-  if (Number.isNaN(date.getTime()) || date.toISOString().slice(0, 10) !== day) throw new RangeError(`not a calendar day: ${day}`);
-  return date;
+  const [year, month, date] = [Number(day.slice(0, 4)), Number(day.slice(5, 7)), Number(day.slice(8))];
+  const utc = new Date(Date.UTC(year, month - 1, date));
+  const isThatDay = utc.getUTCFullYear() === year && utc.getUTCMonth() === month - 1 && utc.getUTCDate() === date;
+  if (!isThatDay || !pattern.test(day)) throw new RangeError(`not a calendar day: ${day}`);
+  return utc;
 }
 
 /** The calendar day that a UTC instant falls on in UTC. */
-export function fromUtcDate(date: Date): CalendarDay {
-  return date.toISOString().slice(0, 10);
-}
+export const fromUtcDate = (date: Date): CalendarDay => dayOf(date.getUTCFullYear(), date.getUTCMonth() + 1, date.getUTCDate());
 
-// date-fns works in the machine's zone: keep its fields equal to the calendar's.
-const local = (day: CalendarDay) => {
-  const utc = toUtcDate(day);
-  return new Date(utc.getUTCFullYear(), utc.getUTCMonth(), utc.getUTCDate(), 12);
-};
-const fromLocal = (date: Date): CalendarDay =>
-  `${date.getFullYear()}-${String(date.getMonth() + 1).padStart(2, '0')}-${String(date.getDate()).padStart(2, '0')}`;
-
-export const addDays = (day: CalendarDay, days: number): CalendarDay => fromLocal(addDaysFns(local(day), days));
+export const addDays = (day: CalendarDay, days: number): CalendarDay => fromUtcDate(new Date(toUtcDate(day).getTime() + days * dayMs));
 
 /** Adds whole months; a day past the end of the target month becomes that month's last day. */
-export const addMonths = (day: CalendarDay, months: number): CalendarDay => fromLocal(addMonthsFns(local(day), months));
+export function addMonths(day: CalendarDay, months: number): CalendarDay {
+  const from = toUtcDate(day);
+  const [year, month] = [from.getUTCFullYear(), from.getUTCMonth() + months];
+  const lastOfMonth = new Date(Date.UTC(year, month + 1, 0));
+  return dayOf(lastOfMonth.getUTCFullYear(), lastOfMonth.getUTCMonth() + 1, Math.min(from.getUTCDate(), lastOfMonth.getUTCDate()));
+}
 
 /** Whole days from `from` to `to`; negative when `to` is earlier. */
-export const daysBetween = (from: CalendarDay, to: CalendarDay): number => differenceInCalendarDays(local(to), local(from));
+export const daysBetween = (from: CalendarDay, to: CalendarDay): number => (toUtcDate(to).getTime() - toUtcDate(from).getTime()) / dayMs;
 
 /** Month 1–12. */
 export const monthOf = (day: CalendarDay): number => Number(day.slice(5, 7));
