@@ -45,18 +45,24 @@ function readWall(row: FormValues, path: string, note: Note) {
   return [{ ...sides, gableHeightFt, openings }];
 }
 
-/** Cans by the gallon or the litre. */
-const canSize = (units: UnitSystem): SizeReader => (text) => (units === 'us' ? { number: text, unit: 'gal', gallons: 1 } : { number: text, unit: 'L', gallons: 1 / litresPerGallon });
+/** Smallest and largest can, US gallons. */
+export const canRange = { min: 1 / 128, max: 60 };
 
-function readCoverage(values: FormValues, note: Note) {
+/** Cans by the gallon or the litre. */
+export const canSize = (units: UnitSystem): SizeReader => (text) => (units === 'us' ? { number: text, unit: 'gal', gallons: 1 } : { number: text, unit: 'L', gallons: 1 / litresPerGallon });
+
+type CoverageFields = { low: string; high: string };
+
+/** A range of coverage, ft² per gallon, as the label says it; undefined where it says none. */
+export function readCoverage(values: FormValues, note: Note, fields: CoverageFields = { low: 'coverageLow', high: 'coverageHigh' }): { low: number; high: number } | undefined {
   const us = note.units === 'us';
   const one = (field: string) => readNumber(typedIn(values, field), field, { min: 20, max: 2000, what: 'Coverage', unit: us ? 'ft²/gal' : 'm²/L' }, note, us ? 1 : litresPerGallon / squareMetresPerSquareFoot);
-  const [from, to] = [one('coverageLow'), one('coverageHigh')];
+  const [from, to] = [one(fields.low), one(fields.high)];
   const low = from ?? to;
   const high = to ?? from;
-  if (low === undefined || high === undefined) return {};
-  if (low > high) note.faults.coverageHigh = 'This should not be less than the figure before it.';
-  return { coverageFt2PerGal: { low, high } };
+  if (low === undefined || high === undefined) return undefined;
+  if (low > high) note.faults[fields.high] = 'This should not be less than the figure before it.';
+  return { low, high };
 }
 
 const chosen = z.array(z.string().transform((one) => Number(one.split('#')[0])).pipe(z.number().min(0).max(10_000)));
@@ -86,9 +92,9 @@ function readBody(values: FormValues, note: Note): EstimateBody | null {
   if (!has(textures, texture)) note.faults.texture = 'Choose a surface.';
   if (![1, 2, 3].includes(coats)) note.faults.coats = 'Choose how many coats.';
   const area = readArea(values, note);
-  const containers = readContainers(values, 'containers', { min: 1 / 128, max: 60, read: canSize(note.units) }, note);
+  const containers = readContainers(values, 'containers', { ...canRange, read: canSize(note.units) }, note);
   const coverage = readCoverage(values, note);
-  return area && has(textures, texture) ? { units: note.units, ...area, profile: { nominalIn, crownHeightIn }, texture, coats, ...coverage, wastePercent, containers } : null;
+  return area && has(textures, texture) ? { units: note.units, ...area, profile: { nominalIn, crownHeightIn }, texture, coats, ...(coverage ? { coverageFt2PerGal: coverage } : {}), wastePercent, containers } : null;
 }
 
 /** Reads the form as typed, in the reader's units. */

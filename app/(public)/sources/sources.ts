@@ -113,6 +113,7 @@ export const ownRules = [
   'A day without rain before and after the work; no stain above 90 °F (32 °C); caulk kept from frost for a night; oil stain kept above its 40 °F (4 °C) through the night.',
   'The order in which work follows the shade: by the middle of each wall’s longest time out of the sun; trees count as shade when less than half of the light passes.',
   'Joints: boards of up to 16 ft, two log-end corners a wall unless you say otherwise, a foot of joint around each pipe, backer rod behind every joint; between two handbooks the deeper bead is bought for.',
+  'Cleaner for the wash: 100 to 200 ft² to a gallon of mixed cleaner (from memory, common practice, no source), four parts of water to one of concentrate unless the label says otherwise, bought for the thirsty end.',
   'Buying for the thirsty end of the published range, with a tenth for waste unless you say otherwise.',
   'What a change to a wall would do: an eave 1 or 2 ft (30 or 60 cm) deeper, one change at a time; the wall’s own factor stays, a restain costs the same whatever the finish, and the work of the change itself is not counted.',
   'The five steps of the sun-dose ramp on the house plan: 250 to 1,350 kWh/m² in equal parts.',

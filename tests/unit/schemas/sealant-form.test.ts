@@ -1,5 +1,6 @@
 import { describe, expect, test } from 'vitest';
 import { caulkStart } from '@/lib/home/caulk-start';
+import { rowsOf } from '@/lib/schemas/calculator-values';
 import { answerCaulk, notedPipes, readCaulk } from '@/lib/schemas/sealant-form';
 import { metresToFeet } from '@/lib/units';
 
@@ -49,7 +50,7 @@ describe('the form of the caulk on a home', () => {
   const rows = (...sizes: [size: string, price: string][]) => Object.fromEntries(sizes.map(([size, price], key) => [String(key), { size, price }]));
 
   test('starts with four sizes as their labels say them', () => {
-    const sizes = Object.values(startIn('metric', ['a']).start.caulkContainers ?? {}).map(({ size }: { size: string }) => size);
+    const sizes = rowsOf(startIn('metric', ['a']).start, 'caulkContainers').map(([, row]) => row.size);
     expect(sizes).toEqual(['10.1 fl oz', '20 fl oz', '600 mL', '29 fl oz']);
   });
 

@@ -10,6 +10,7 @@ import { unitsOf } from '@/db/queries/units';
 import { dayIn } from '@/lib/calendar';
 import { buyingStart } from '@/lib/home/buying';
 import { caulkStart } from '@/lib/home/caulk-start';
+import { cleanerStart } from '@/lib/home/cleaner-start';
 import { workGroups, workWords } from '@/lib/home/next-work';
 import { answerForm } from '@/lib/takeoff/form-answer';
 import { areaText } from '@/lib/units';
@@ -28,10 +29,11 @@ export default async function BuyPage({ params, searchParams }: Props) {
   const next = groups.find(({ kind }) => kind === 'restain');
   const toCaulk = groups.find(({ kind }) => kind === 'recaulk')?.walls.map(({ id }) => id) ?? [];
   const sent = await searchParams;
-  const { areas, start } = buyingStart(home, walls, next?.walls.map(({ id }) => id) ?? [], units, sent);
+  const toStain = next?.walls.map(({ id }) => id) ?? [];
+  const { areas, start } = buyingStart(home, walls, toStain, units, sent);
   return (
     <main id="main">
-      <PageHead title="What to buy" lead="Stain, caulk and backer rod for the walls you choose, in the cheapest containers that hold them." path={[{ href: '/homes', label: 'Homes' }, { href: `/homes/${home.id}`, label: home.name }]} />
+      <PageHead title="What to buy" lead="Stain, caulk, backer rod and cleaner for the walls you choose, in the cheapest containers that hold them." path={[{ href: '/homes', label: 'Homes' }, { href: `/homes/${home.id}`, label: home.name }]} />
       {next ? (
         <Course heading="Next restain">
           <p className="text-lg">
@@ -49,7 +51,7 @@ export default async function BuyPage({ params, searchParams }: Props) {
           </EmptyState>
         </Course>
       ) : (
-        <Buying stain={{ walls: areas.map((area) => ({ ...area, areaText: areaText(area.areaM2, units) })), start, first: answerForm(start) }} caulk={caulkStart(home, walls, toCaulk, units, sent)} />
+        <Buying stain={{ walls: areas.map((area) => ({ ...area, areaText: areaText(area.areaM2, units) })), start, first: answerForm(start) }} caulk={caulkStart(home, walls, toCaulk, units, sent)} cleaner={cleanerStart(home, areas, toStain, units, sent)} />
       )}
       <Course heading="Before you open a can">
         <WorkCautions facts={{ kinds: ['restain'], yearBuilt: home.yearBuilt, stainBases: rows.map((wall) => wall.stainBase) }} />
