@@ -24,7 +24,7 @@ for (const { name, all, ...look } of looks) {
       await page.getByRole('link', { name: 'Larch Ridge' }).first().click();
       await page.waitForURL(/\/homes\/[\w-]{36}$/);
       const home = new URL(page.url()).pathname;
-      for (const path of ['/homes/new', `${home}/plan`, `${home}/buy`, ...(all ? ['/homes', '/account', `${home}/record`, `${home}/day`, `${home}/share`, `${home}/edit`, `${home}/walls/new`, '/homes/none'] : [])]) {
+      for (const path of ['/homes/new', `${home}/plan`, `${home}/buy`, ...(all ? ['/homes', '/account', `${home}/record`, `${home}/day`, `${home}/budget`, `${home}/share`, `${home}/edit`, `${home}/walls/new`, '/homes/none'] : [])]) {
         await page.goto(path);
         await expectSound(page);
       }
