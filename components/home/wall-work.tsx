@@ -25,7 +25,7 @@ export function WallWork({ homeId, wallId, items, today, mayLog, mayEdit, mayPut
   return (
     <ul>
       {items.toSorted((a, b) => urgency[workState(a, today)] - urgency[workState(b, today)]).map((item) => (
-        <li key={item.kind} className="grid gap-x-6 gap-y-1 border-t border-line py-3 first:border-t-0 md:grid-cols-[8rem_minmax(0,1fr)_auto]">
+        <li key={item.kind} className="grid gap-x-6 gap-y-1 border-t border-line py-3 first:border-t-0 md:grid-cols-[8rem_minmax(0,1fr)_8rem]">
           <p>
             <StateMark state={workState(item, today)} />
           </p>

@@ -5,6 +5,7 @@ import { Figure } from '@/components/ui/figure';
 import { SubmitButton } from '@/components/ui/submit-button';
 import { type DeferralChoice, waitWords } from '@/lib/care/deferral-choices';
 import { capital, wallWords } from '@/lib/home/wall-words';
+import { dollarWords } from '@/lib/money';
 import { type ActionState } from '@/lib/schemas/action-state';
 import { type WorkKind, workKinds } from '@/lib/schemas/vocabulary';
 
@@ -19,8 +20,6 @@ type PutOffChoicesProps = {
   putOff: Act;
   takeUp: Act;
 };
-
-const dollars = (cents: number) => (cents / 100).toLocaleString('en-US', { style: 'currency', currency: 'USD', maximumFractionDigits: 0 });
 
 /** What waiting costs, wall by wall, and the button that puts the work off. */
 export function PutOffChoices({ homeId, kind, walls, choices, stands, putOff, takeUp }: PutOffChoicesProps) {
@@ -52,7 +51,7 @@ export function PutOffChoices({ homeId, kind, walls, choices, stands, putOff, ta
         </ul>
         {stripCents > 0 ? (
           <p className="mt-2 max-w-prose text-lg">
-            <strong>A coat that old has to be stripped first: about {dollars(stripCents)} more</strong>, at this home’s prices. Washing and a maintenance coat are no longer enough.
+            <strong>A coat that old has to be stripped first: about {dollarWords(stripCents)} more</strong>, at this home’s prices. Washing and a maintenance coat are no longer enough.
           </p>
         ) : null}
       </Course>

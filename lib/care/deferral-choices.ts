@@ -15,6 +15,8 @@ export type DeferralPrice = {
   leftThen: number;
   /** Months for which the wall stands without a sound film by then; 0 when it still has one. */
   monthsBare: number;
+  /** Whether the coat has to be stripped first even if it does not wait. */
+  stripsAnyway: boolean;
   /** Cents of stripping that waiting brings, because the coat will be too old for a maintenance coat; 0 when it will not, or already is. */
   stripCents: number;
   explanation: Explanation;
@@ -24,7 +26,7 @@ export type DeferralPrice = {
 export type DeferralChoice = { wallId: string; item: WorkItem; notBefore: CalendarDay; after: WorkItem | null; price: DeferralPrice | null };
 
 const daysInMonth = 30.44;
-const percent = (share: number) => `${Math.round(share * 100)} %`;
+const percent = (share: number) => `${Math.round(share * 100)} %`.replace('-', '−');
 
 /**
  * The price of waiting until a later window, in film life: what is left on the day it opens, and how long the wall stands bare by then.
@@ -37,7 +39,7 @@ export function deferralPrice({ item, opensOn, film, stripCents }: { item: WorkI
   const tooOld = (day: CalendarDay) => item.kind === 'restain' && -leftOn(day) > stripAtShare - 1;
   const leftThen = leftOn(opensOn);
   const monthsBare = Math.max(0, Math.round(daysBetween(item.dueOn, opensOn) / daysInMonth));
-  const isBrought = tooOld(opensOn) && !tooOld(item.window.opensOn);
+  const stripsAnyway = tooOld(item.window.opensOn);
   const inputs: ExplainedInput[] = [
     { label: 'Used up', value: exactDay(item.dueOn) },
     { label: 'The later window opens', value: exactDay(opensOn) },
@@ -47,7 +49,8 @@ export function deferralPrice({ item, opensOn, film, stripCents }: { item: WorkI
   return {
     leftThen,
     monthsBare,
-    stripCents: isBrought ? Math.round(stripCents) : 0,
+    stripsAnyway,
+    stripCents: tooOld(opensOn) && !stripsAnyway ? Math.round(stripCents) : 0,
     explanation: {
       figure: film.film === 'coat' ? 'Coat left if it waits' : 'Seal left if it waits',
       value: percent(leftThen),
@@ -77,10 +80,12 @@ export function deferralChoices(home: CareHome, items: readonly WorkItem[], toda
   });
 }
 
-/** '"June 1 – August 9, 2027", −12 % left, 4 months bare' for a list. */
+/** What waiting does to one wall, in plain words. 'Moves from June 1 – August 9, 2027 to June 1 – August 31, 2028. By then …' */
 export const waitWords = ({ item, after, price }: DeferralChoice): string => {
   const when = after ? `from ${exactRange(item.window.opensOn, item.window.closesOn)} to ${exactRange(after.window.opensOn, after.window.closesOn)}` : 'it is not asked for again';
   if (!price) return `Moves ${when}.`;
-  const bare = price.monthsBare > 0 ? ` By then the wall has stood ${monthsInWords(price.monthsBare)} past the end of its ${item.kind === 'restain' ? 'coat' : 'caulk'}.` : ' It lasts until then.';
-  return `Moves ${when}.${bare}`;
+  const film = item.kind === 'restain' ? 'coat' : 'caulk';
+  const bare = price.monthsBare > 0 ? ` By then the wall has stood ${monthsInWords(price.monthsBare)} past the end of its ${film}.` : ` The ${film} lasts until then.`;
+  const strip = price.stripsAnyway ? ' It is too old for a maintenance coat already: it has to be stripped first in any case.' : '';
+  return `Moves ${when}.${bare}${strip}`;
 };

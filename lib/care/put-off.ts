@@ -3,7 +3,7 @@ import { aboutRange } from '@/lib/calendar-words';
 import { type Source } from '@/lib/explain';
 import { comingWindow } from './carry-over';
 import { type CareDeferral, type SeasonMonths, type Window, type WorkItem } from './types';
-import { isAllYear } from './window';
+import { isAllYear, runsAround } from './window';
 import { workKey } from './work-key';
 
 /** Where the calendar gives no season, putting off means so many months. Our rule. */
@@ -13,10 +13,11 @@ export const putOffSource: Source = { text: 'Work that was put off is not asked 
 /** The window that holds a day, or the next one after it. */
 const windowFrom = (day: CalendarDay, seasons: SeasonMonths[]): Window => ({ ...comingWindow(addDays(day, -1), seasons, day), moved: 'put off' });
 
-/** The window to which work can be put off: the season after its own, or where there are none, half a year later. */
+/** The season to which work can be put off: the one after its own, or where there are none, half a year later. */
 export function nextChance({ window }: Pick<WorkItem, 'window'>, seasons: SeasonMonths[]): Window {
-  const hasSeason = seasons.length > 0 && !seasons.some(isAllYear);
-  return windowFrom(hasSeason ? addDays(window.closesOn, 1) : addMonths(window.opensOn, restMonths), seasons);
+  if (seasons.length === 0 || seasons.some(isAllYear)) return windowFrom(addMonths(window.opensOn, restMonths), seasons);
+  const own = runsAround(window.closesOn, seasons).find(({ opensOn, closesOn }) => opensOn <= window.closesOn && window.closesOn <= closesOn);
+  return windowFrom(addDays(own?.closesOn ?? window.closesOn, 1), seasons);
 }
 
 /** The latest day to which somebody put this work off, if anybody did. */

@@ -28,6 +28,12 @@ export function restainWindowFor(recaulkOn: CalendarDay, restain: Pick<WorkItem,
   return { ...restain.window, closesOn: restain.window.closesOn < limit ? restain.window.closesOn : limit };
 }
 
+/** The part of a window after the day on which the film was put on. */
+function afterStart(window: Window | null, startOn: CalendarDay | null): Window | null {
+  if (!window || !startOn || window.opensOn > startOn) return window;
+  return window.closesOn > startOn ? { ...window, opensOn: addDays(startOn, 1) } : null;
+}
+
 /** The part of a window that lies in a year: a wash settles the wash of its own year, so it is not moved out of it. */
 function withinYear(window: Window, year: number): Window | null {
   const [first, last] = [dayOf(year, 1, 1), dayOf(year, 12, 31)];
@@ -56,7 +62,7 @@ function moved(item: WorkItem, window: Window, because: string, restain: WorkIte
 export function withRestain(item: WorkItem | null, restain: WorkItem | null): WorkItem | null {
   if (!item || !restain || !['computed', 'found'].includes(item.basis)) return item;
   if (item.kind === 'recaulk') {
-    const window = restainWindowFor(item.dueOn, restain);
+    const window = afterStart(restainWindowFor(item.dueOn, restain), item.startOn);
     const because = `Caulk goes on before stain, so it is done with this wall’s restain and left to cure as its label says; on its own the caulk would last until ${aboutDay(item.dueOn)}.`;
     return window ? moved(item, window, because, restain, [caulkFirst, nearSource]) : item;
   }

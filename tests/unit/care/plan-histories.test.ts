@@ -98,7 +98,8 @@ function lived(home: CareHome, years: number, pick: () => number): CareRecord[] 
   for (let i = 0; today < end; i += 1) {
     if (i > 40 * years) throw new Error('the plan asks for the same work again and again');
     const items = itemsOf({ ...home, records: [...home.records, ...done] }, today);
-    const next = items.toSorted((a, b) => (a.window.opensOn < b.window.opensOn ? -1 : 1))[0];
+    // What closes first is done first, so that nothing is missed.
+    const next = items.toSorted((a, b) => (a.window.closesOn < b.window.closesOn ? -1 : 1))[0];
     if (!next) throw new Error('the plan has run out of work');
     const from = next.window.opensOn > today ? next.window.opensOn : today;
     today = addDays(from, Math.floor(pick() * (daysBetween(from, next.window.closesOn) + 1)));

@@ -20,6 +20,7 @@ import { stationById } from '@/lib/climate';
 import { coatLeft } from '@/lib/coat';
 import { coverOfStored, coverWords } from '@/lib/home/cover';
 import { directionWord } from '@/lib/home/direction';
+import { recordsOfWall } from '@/lib/home/records-of-wall';
 import { wallMeasures } from '@/lib/home/wall-measures';
 import { can } from '@/lib/permissions';
 
@@ -35,7 +36,7 @@ export default async function WallPage({ params }: Props) {
   const { actor, view } = await pageHome(homeId);
   const planned = await pageWall(homeId, wallId);
   const { home, membership, walls } = view;
-  const records = view.records.filter((record) => record.wallIds.includes(wallId));
+  const records = recordsOfWall(view.records, wallId);
   const { wall, openings, exposure, coat, items } = planned;
   const units = unitsOf(actor);
   const now = new Date();
