@@ -10,17 +10,17 @@ export function WhatIf({ view: { facts, variants } }: { view: WhatIfView }) {
         How long a coat would last, and what restaining would cost a year. The work of the change itself is not counted. {facts.pricesSet ? 'At the prices set for this home.' : 'At our example prices: nobody has set prices for this home yet.'}
       </p>
       <p className="mb-2 text-lg">{nowWords(facts.now)}</p>
-      <ul>
+      <ul className="grid gap-x-12 lg:grid-cols-2">
         {variants.map((variant) => {
           const name = changeWords(variant.change, facts.units);
           return (
-            <li key={name} className="border-t border-line py-2 first:border-t-0">
+            <li key={name} className="border-t border-line py-2">
               <Figure
                 size="large"
                 label={name}
                 value={
                   <>
-                    <span className="block">{lifeWords(variant)}</span>
+                    <span className="block text-xl">{lifeWords(variant)}</span>
                     <span className="block text-lg">{costWords(variant)}</span>
                   </>
                 }

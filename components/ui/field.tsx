@@ -26,7 +26,7 @@ export function Field({ label, hint, optional, name, defaultValue, unit, ...inpu
       {unit ? (
         <div className="flex">
           {control}
-          <span className="flex min-w-14 items-center justify-center rounded-r-md border-2 border-l-0 border-lichen bg-inset px-3">{unit}</span>
+          <span className="flex min-w-14 items-center justify-center rounded-r-md border-2 border-l-0 border-lichen bg-inset px-3 whitespace-nowrap">{unit}</span>
         </div>
       ) : (
         control

@@ -19,10 +19,12 @@ export function Figure({ explanation, value, label, because, size = 'line' }: Fi
     <details className="group min-w-0">
       <summary className={`flex min-h-11 list-none items-center gap-2 ${size === 'large' ? 'flex-wrap' : ''} [&::-webkit-details-marker]:hidden`}>
         <span className={name === null ? 'sr-only' : size === 'large' ? 'w-full text-quiet' : 'text-quiet'}>{name ?? explanation.figure}</span>
-        <span className={`figures ${size === 'large' ? 'text-2xl' : 'text-lg'} underline decoration-lichen decoration-dotted decoration-2 underline-offset-4`}>{value ?? explanation.value}</span>
-        <svg viewBox="0 0 20 20" width="18" height="18" aria-hidden="true" className="no-print shrink-0 text-quiet transition-transform group-open:rotate-180">
-          <path d="m4 7 6 6 6-6" fill="none" stroke="currentColor" strokeWidth="2.5" strokeLinecap="round" strokeLinejoin="round" />
-        </svg>
+        <span className="flex min-w-0 items-center gap-2">
+          <span className={`figures min-w-0 ${size === 'large' ? 'text-2xl' : 'text-lg'} underline decoration-lichen decoration-dotted decoration-2 underline-offset-4`}>{value ?? explanation.value}</span>
+          <svg viewBox="0 0 20 20" width="18" height="18" aria-hidden="true" className="no-print shrink-0 text-quiet transition-transform group-open:rotate-180">
+            <path d="m4 7 6 6 6-6" fill="none" stroke="currentColor" strokeWidth="2.5" strokeLinecap="round" strokeLinejoin="round" />
+          </svg>
+        </span>
         <span className="sr-only">: how this comes about</span>
       </summary>
       <div className="mt-1 mb-3 max-w-prose border-l-4 border-lichen bg-inset px-4 py-3 text-sm">
