@@ -18,6 +18,13 @@ export function comingWindow(missedOn: CalendarDay, seasons: SeasonMonths[], tod
   return { opensOn, closesOn: addDays(opensOn, periodDays - 1), moved: 'to the coming season' };
 }
 
+/** A window, or the one after it where it had begun on the day on which the film was put on. */
+export function unlessBegun(window: Window, startedOn: CalendarDay, seasons: SeasonMonths[]): Window {
+  if (window.opensOn > startedOn) return window;
+  const over = window.closesOn > startedOn ? window.closesOn : startedOn;
+  return comingWindow(over, seasons, addDays(over, 1));
+}
+
 /**
  * Film work is asked for until it is done: once its window has closed it is overdue and takes the coming season's window.
  * It lapses, to be planned anew, on the day after its window closes.

@@ -1,5 +1,5 @@
-import { addDays, addMonths, type CalendarDay } from '@/lib/calendar';
-import { comingWindow } from './carry-over';
+import { addMonths, type CalendarDay } from '@/lib/calendar';
+import { unlessBegun } from './carry-over';
 import { filmWork } from './film-work';
 import { type KnownWall, knownWall } from './films';
 import { putOffDay } from './put-off';
@@ -47,10 +47,7 @@ export type FilmJob = FilmTurn & {
  */
 export function computedTurn(doneOn: CalendarDay, lifeMonths: number, seasons: SeasonMonths[]): FilmTurn {
   const dueOn = addMonths(doneOn, lifeMonths);
-  const window = windowFor(dueOn, seasons, dueOn);
-  if (window.opensOn > doneOn) return { dueOn, window };
-  const over = window.closesOn > doneOn ? window.closesOn : doneOn;
-  return { dueOn, window: comingWindow(over, seasons, addDays(over, 1)) };
+  return { dueOn, window: unlessBegun(windowFor(dueOn, seasons, dueOn), doneOn, seasons) };
 }
 
 function ownTurn(home: CareHome, known: KnownWall, kind: FilmKind, doneOn: CalendarDay): FilmTurn | null {

@@ -3,7 +3,7 @@ import { aboutDay, exactDay, exactRange, monthNames } from '@/lib/calendar-words
 import { monthsInWords } from '@/lib/coat';
 import { type Explanation, type Source } from '@/lib/explain';
 import { filmStates, workKinds } from '@/lib/schemas/vocabulary';
-import { comingWindow } from './carry-over';
+import { comingWindow, unlessBegun } from './carry-over';
 import { type KnownWall } from './films';
 import { learnedWords } from './learned-words';
 import { monthlyRule, withSafeDay } from './rule-build';
@@ -55,7 +55,7 @@ function computedTurn({ startedOn, lifeMonths, found }: FilmLife, seasons: Seaso
   const byRule = nextOfRule(rule, startedOn, startedOn);
   if (!byRule) return null;
   const dueOn = afterLooking(byRule, found);
-  return { rule, startOn: startedOn, byRule, dueOn, window: windowAfter(startedOn, found, windowFor(dueOn, seasons, dueOn), seasons) };
+  return { rule, startOn: startedOn, byRule, dueOn, window: unlessOver(unlessBegun(windowFor(dueOn, seasons, dueOn), startedOn, seasons), found, seasons) };
 }
 
 /** What was seen goes before what was reckoned. */
@@ -67,11 +67,9 @@ function afterLooking(byRule: CalendarDay, found: FilmLife['found']): CalendarDa
   return rested > byRule ? rested : byRule;
 }
 
-/** No season is asked for that was over when the film was found, or that had begun when it was put on: then the one after it. */
-function windowAfter(startedOn: CalendarDay, found: FilmLife['found'], window: Window, seasons: SeasonMonths[]): Window {
-  if (window.opensOn <= startedOn) return comingWindow(window.closesOn, seasons, addDays(window.closesOn > startedOn ? window.closesOn : startedOn, 1));
-  return found && window.closesOn < found.on ? comingWindow(addDays(found.on, -1), seasons, found.on) : window;
-}
+/** No season is asked for that was over when the film was found: then the one after it. */
+const unlessOver = (window: Window, found: FilmLife['found'], seasons: SeasonMonths[]): Window =>
+  found && window.closesOn < found.on ? comingWindow(addDays(found.on, -1), seasons, found.on) : window;
 
 /** The owner's rule, from the latest work if that is later; its first date whose window opens after that work. */
 function ownTurn(own: OwnRule, doneOn: CalendarDay | null, seasons: SeasonMonths[]): Turn | null {

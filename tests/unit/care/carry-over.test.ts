@@ -2,6 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { addDays } from '@/lib/calendar';
 import { planHome } from '@/lib/care';
+import { unlessBegun } from '@/lib/care/carry-over';
 import { nextStageDay, stageOn } from '@/lib/care/stages';
 import { workState } from '@/lib/care/state';
 import { careHome, careRecord } from '../../fixtures/care-home';
@@ -57,5 +58,18 @@ describe('work whose window passed', () => {
     const caulk = wall?.items.find(({ kind }) => kind === 'recaulk');
     const stain = wall?.items.find(({ kind }) => kind === 'restain');
     expect(caulk?.window.opensOn).toBe(stain?.window.opensOn);
+  });
+});
+
+describe('a window that had begun when the film was put on', () => {
+  const season = [{ fromMonth: 5, toMonth: 9 }];
+  const window = { opensOn: '2026-05-01', closesOn: '2026-08-09', moved: 'in season' as const };
+
+  test('gives way to the days after that one', () => {
+    expect(unlessBegun(window, '2026-04-30', season)).toBe(window);
+    // Put on in the window: what is left of the season. Put on after the window, in the season: the days after that.
+    expect(unlessBegun(window, '2026-06-01', season)).toMatchObject({ opensOn: '2026-08-10', closesOn: '2026-09-30' });
+    expect(unlessBegun(window, '2026-09-01', season)).toMatchObject({ opensOn: '2026-09-02', closesOn: '2026-09-30' });
+    expect(unlessBegun(window, '2026-10-01', season)).toMatchObject({ opensOn: '2027-05-01', closesOn: '2027-09-30' });
   });
 });

@@ -3,14 +3,10 @@
 import { revalidatePath } from 'next/cache';
 import { redirect } from 'next/navigation';
 import { defineAction } from '@/app/_server/action';
-import { say } from '@/app/_server/said';
+import { movePlan, sayMoves } from '@/app/_server/plan-moves';
 import { setCosts } from '@/db/queries/costs';
-import { itemsOf } from '@/db/queries/home-view';
 import { homeOf } from '@/db/queries/homes';
-import { changeHome } from '@/db/queries/replan';
-import { wallsOfHome } from '@/db/queries/walls';
 import { sharingChange } from '@/lib/home/budget-words';
-import { planChange } from '@/lib/home/plan-change';
 import { costsSchema } from '@/lib/schemas/costs';
 
 /** Keeps what work costs at a home; the plan may gather walls into other trips, and the page says so. */
@@ -20,13 +16,12 @@ export const saveCosts = defineAction({
   run: (actor, { homeId, costs }) => {
     const now = new Date();
     const shared = () => homeOf(actor, homeId, 'home.edit').home.grouping?.months ?? null;
-    const [before, items] = [shared(), itemsOf([homeId])];
-    changeHome(homeId, now, () => setCosts(actor, homeId, costs, now));
-    const moves = planChange(items, itemsOf([homeId]), wallsOfHome(homeId).map(({ wall }) => wall));
+    const before = shared();
+    const { moves } = movePlan(homeId, now, () => setCosts(actor, homeId, costs, now));
     return [sharingChange(before, shared()), ...moves].filter((words) => words !== null);
   },
   after: async (changes, { homeId }) => {
-    await say(['The prices are saved.', ...(changes.length > 0 ? changes : ['Nothing in the plan moves.'])].join(' '));
+    await sayMoves('The prices are saved.', changes);
     revalidatePath(`/homes/${homeId}`, 'layout');
     redirect(`/homes/${homeId}/budget`);
   },

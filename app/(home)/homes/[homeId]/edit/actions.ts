@@ -3,10 +3,9 @@
 import { redirect } from 'next/navigation';
 import { z } from 'zod';
 import { defineAction, FieldFault } from '@/app/_server/action';
-import { say } from '@/app/_server/said';
+import { movePlan, sayMoves } from '@/app/_server/plan-moves';
 import { siteFault } from '@/app/_server/site-fault';
 import { homeOf, updateHome } from '@/db/queries/homes';
-import { changeHome } from '@/db/queries/replan';
 import { siteFor } from '@/db/queries/site';
 import { turnWalls } from '@/db/queries/walls';
 import { homeSchema } from '@/lib/schemas/home';
@@ -21,10 +20,10 @@ export const saveHome = defineAction({
     if (!site.found) return new FieldFault(siteFault(site));
     const { name, postalCode, wood, sidingNominalIn } = input;
     const facts = { name, postalCode, wood, sidingNominalIn, elevationM: input.elevationM ?? null, yearBuilt: input.yearBuilt ?? null, climateZoneOverride: input.climateZoneOverride ?? null };
-    return changeHome(input.homeId, new Date(), () => updateHome(actor, input.homeId, { ...site.site, ...facts }));
+    return movePlan(input.homeId, new Date(), () => updateHome(actor, input.homeId, { ...site.site, ...facts }));
   },
-  after: async (home) => {
-    await say(`${home.name} is saved and planned anew.`);
+  after: async ({ result: home, moves }) => {
+    await sayMoves(`${home.name} is saved.`, moves);
     redirect(`/homes/${home.id}`);
   },
 });
@@ -35,13 +34,13 @@ export const turnHome = defineAction({
   schema: turnSchema,
   run: (actor, { homeId, compassDeg }) => {
     const { home } = homeOf(actor, homeId, 'home.edit');
-    changeHome(homeId, new Date(), () => {
+    return movePlan(homeId, new Date(), () => {
       turnWalls(actor, homeId, compassDeg - home.compassDeg);
       updateHome(actor, homeId, { compassDeg });
-    });
+    }).moves;
   },
-  after: async (_, { homeId }) => {
-    await say('The house is turned; the sun on every wall was worked out anew.');
+  after: async (moves, { homeId }) => {
+    await sayMoves('The house is turned; the sun on every wall was worked out anew.', moves);
     redirect(`/homes/${homeId}`);
   },
 });

@@ -3,15 +3,13 @@
 import { revalidatePath } from 'next/cache';
 import { redirect } from 'next/navigation';
 import { defineAction, FieldFault } from '@/app/_server/action';
-import { say } from '@/app/_server/said';
+import { movePlan, sayMoves } from '@/app/_server/plan-moves';
 import { homeView } from '@/db/queries/home-view';
 import { homeOf } from '@/db/queries/homes';
-import { changeHome } from '@/db/queries/replan';
 import { logWork } from '@/db/queries/work';
 import { dayIn } from '@/lib/calendar';
 import { learnedChange } from '@/lib/home/learned-change';
 import { dayNotYet } from '@/lib/home/not-yet';
-import { planChange } from '@/lib/home/plan-change';
 import { walkaroundSchema } from '@/lib/schemas/walkaround';
 
 /** Keeps a walkaround; the plan moves by what was seen, and the home's page says by how much and why. */
@@ -25,13 +23,11 @@ export const keepWalkaround = defineAction({
     if (doneOn > today) return new FieldFault({ doneOn: dayNotYet(doneOn, today) });
     const before = homeView(actor, homeId).walls;
     const work = { homeId, submissionKey, kind: 'walkaround' as const, doneOn, note, wallIds: findings.map(({ wallId }) => wallId) };
-    changeHome(homeId, now, () => logWork(actor, work, findings));
-    const after = homeView(actor, homeId).walls;
-    const items = (walls: typeof before) => walls.flatMap((wall) => wall.items);
-    return [...planChange(items(before), items(after), after.map(({ wall }) => wall)), ...learnedChange(before, after)];
+    const { moves } = movePlan(homeId, now, () => logWork(actor, work, findings));
+    return [...moves, ...learnedChange(before, homeView(actor, homeId).walls)];
   },
   after: async (changes, { homeId }, actor) => {
-    await say(['Walkaround kept.', ...(changes.length > 0 ? changes : ['Nothing in the plan moves.'])].join(' '));
+    await sayMoves('Walkaround kept.', changes);
     revalidatePath(`/homes/${homeId}`, 'layout');
     redirect(actor.role === 'contractor' ? `/work/${homeId}` : `/homes/${homeId}`);
   },

@@ -3,6 +3,7 @@
 import { redirect } from 'next/navigation';
 import { z } from 'zod';
 import { defineAction, FieldFault } from '@/app/_server/action';
+import { movePlan, sayMoves } from '@/app/_server/plan-moves';
 import { say } from '@/app/_server/said';
 import { homeOf } from '@/db/queries/homes';
 import { changeHome } from '@/db/queries/replan';
@@ -36,10 +37,10 @@ export const saveWall = defineAction({
     const { home } = wallOf(actor, homeId, wallId, 'home.edit');
     const early = notYet(change, dayIn(home.timeZone, now));
     if (early) return new FieldFault(early);
-    return changeHome(homeId, now, () => updateWall(actor, wallId, { ...change, colorName: change.colorName ?? null }));
+    return movePlan(homeId, now, () => updateWall(actor, wallId, { ...change, colorName: change.colorName ?? null }));
   },
-  after: async (wall) => {
-    await say(`${wall.name} is saved and planned anew.`);
+  after: async ({ result: wall, moves }) => {
+    await sayMoves(`${wall.name} is saved.`, moves);
     redirect(`/homes/${wall.homeId}/walls/${wall.id}`);
   },
 });

@@ -3,14 +3,10 @@
 import { revalidatePath } from 'next/cache';
 import { redirect } from 'next/navigation';
 import { defineAction, FieldFault } from '@/app/_server/action';
-import { say } from '@/app/_server/said';
-import { itemsOf } from '@/db/queries/home-view';
+import { movePlan, sayMoves } from '@/app/_server/plan-moves';
 import { removeOwnRule, setOwnRule } from '@/db/queries/own-rules';
-import { changeHome } from '@/db/queries/replan';
 import { careOfWall } from '@/db/queries/wall-care';
-import { wallsOfHome } from '@/db/queries/walls';
 import { previewOwnRule } from '@/lib/care/own-preview';
-import { planChange } from '@/lib/home/plan-change';
 import { faultField, ownRuleSchema, ruleTarget } from '@/lib/schemas/own-rule';
 
 /** Keeps an owner's own rule; the wall's page says what moved. */
@@ -22,12 +18,10 @@ export const saveRule = defineAction({
     const { home, today } = careOfWall(actor, homeId, wallId, now);
     const preview = previewOwnRule(home, { wallId, kind, rule, startOn }, today);
     if (!preview.ok) return new FieldFault({ [faultField(how, preview.about)]: preview.error });
-    const before = itemsOf([homeId]);
-    changeHome(homeId, now, () => setOwnRule(actor, homeId, wallId, kind, { rule, startOn }));
-    return planChange(before, itemsOf([homeId]), wallsOfHome(homeId).map(({ wall }) => wall));
+    return movePlan(homeId, now, () => setOwnRule(actor, homeId, wallId, kind, { rule, startOn })).moves;
   },
-  after: async (changes, { homeId, wallId }) => {
-    await say(['Your rule is saved.', ...(changes.length > 0 ? changes : ['Nothing in the plan moves.'])].join(' '));
+  after: async (moves, { homeId, wallId }) => {
+    await sayMoves('Your rule is saved.', moves);
     revalidatePath(`/homes/${homeId}`, 'layout');
     redirect(`/homes/${homeId}/walls/${wallId}`);
   },
@@ -37,13 +31,9 @@ export const saveRule = defineAction({
 export const dropRule = defineAction({
   verb: 'home.edit',
   schema: ruleTarget,
-  run: (actor, { homeId, wallId, kind }) => {
-    const before = itemsOf([homeId]);
-    changeHome(homeId, new Date(), () => removeOwnRule(actor, homeId, wallId, kind));
-    return planChange(before, itemsOf([homeId]), wallsOfHome(homeId).map(({ wall }) => wall));
-  },
-  after: async (changes, { homeId, wallId }) => {
-    await say(['The plan goes by the computed rule again.', ...(changes.length > 0 ? changes : ['Nothing in the plan moves.'])].join(' '));
+  run: (actor, { homeId, wallId, kind }) => movePlan(homeId, new Date(), () => removeOwnRule(actor, homeId, wallId, kind)).moves,
+  after: async (moves, { homeId, wallId }) => {
+    await sayMoves('The plan goes by the computed rule again.', moves);
     revalidatePath(`/homes/${homeId}`, 'layout');
     redirect(`/homes/${homeId}/walls/${wallId}`);
   },
