@@ -67,6 +67,8 @@ export const homeMember = sqliteTable(
     membership: text('membership', { enum: keysOf(memberships) }).notNull(),
     addedBy: text('added_by').references(() => user.id, { onDelete: 'set null' }),
     createdAt: createdAt(),
+    /** Since when this person wants no reminders for this home; null while they do. */
+    remindersStoppedAt: instant('reminders_stopped_at'),
   },
   (t) => [
     primaryKey({ columns: [t.homeId, t.userId] }),

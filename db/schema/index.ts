@@ -1,4 +1,5 @@
 export * from './people';
+export * from './audit';
 export * from './homes';
 export * from './work';
 export * from './mail';

@@ -1,5 +1,5 @@
 import { sql } from 'drizzle-orm';
-import { index, integer, sqliteTable, text } from 'drizzle-orm/sqlite-core';
+import { index, integer, sqliteTable, text, uniqueIndex } from 'drizzle-orm/sqlite-core';
 import { keysOf, workKinds } from '../../lib/schemas/vocabulary';
 import { createdAt, id, instant } from './columns';
 import { home, wall } from './homes';
@@ -64,4 +64,39 @@ export const jobRun = sqliteTable(
     error: text('error'),
   },
   (t) => [index('job_run_started').on(t.startedAt)],
+);
+
+/** A piece of work that a person wants no more reminders of; taken back, it keeps when. */
+export const reminderStop = sqliteTable(
+  'reminder_stop',
+  {
+    id: id(),
+    userId: text('user_id').notNull().references(() => user.id, { onDelete: 'cascade' }),
+    homeId: text('home_id').notNull().references(() => home.id, { onDelete: 'cascade' }),
+    wallId: text('wall_id').notNull().references(() => wall.id, { onDelete: 'cascade' }),
+    kind: text('kind', { enum: keysOf(workKinds) }).notNull(),
+    /** Which piece of work: `workKey` of lib/care/work-key.ts. */
+    workKey: text('work_key').notNull(),
+    createdAt: createdAt(),
+    withdrawnAt: instant('withdrawn_at'),
+  },
+  (t) => [uniqueIndex('reminder_stop_once').on(t.userId, t.workKey).where(sql`withdrawn_at is null`), index('reminder_stop_home').on(t.homeId)],
+);
+
+/** What a mail server said after it had taken a mail: it came back, for good or for now. */
+export const bounce = sqliteTable(
+  'bounce',
+  {
+    id: id(),
+    mailId: text('mail_id').references(() => mail.id, { onDelete: 'cascade' }),
+    address: text('address').notNull(),
+    isPermanent: integer('is_permanent', { mode: 'boolean' }).notNull(),
+    /** Enhanced status code of RFC 3463, like 5.1.1, if one was given. */
+    status: text('status'),
+    detail: text('detail'),
+    /** The same report arriving twice is one. */
+    reportKey: text('report_key').notNull().unique(),
+    createdAt: createdAt(),
+  },
+  (t) => [index('bounce_mail').on(t.mailId), index('bounce_address').on(t.address)],
 );

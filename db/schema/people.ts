@@ -15,6 +15,8 @@ export const user = sqliteTable('user', {
   company: text('company'),
   units: text('units', { enum: keysOf(unitSystems) }).notNull().default('us'),
   remindersOn: integer('reminders_on', { mode: 'boolean' }).notNull().default(true),
+  /** Since when mail to this address comes back for good; nothing more is sent to it until somebody lifts that. */
+  bouncedAt: instant('bounced_at'),
   /** Sessions issued before this instant no longer count (password changed). */
   sessionsValidFrom: instant('sessions_valid_from'),
   createdAt: createdAt(),
