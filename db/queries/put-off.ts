@@ -3,7 +3,7 @@ import { type DeferralChoice, deferralChoices } from '@/lib/care/deferral-choice
 import { workKey } from '@/lib/care/work-key';
 import { type Actor } from '@/lib/permissions';
 import { type WorkKind } from '@/lib/schemas/vocabulary';
-import { database, transaction } from '../client';
+import { database } from '../client';
 import { homeFor } from '../scope';
 import { deferral } from '../schema';
 import { careHomeAt } from './care-home';
@@ -12,11 +12,9 @@ import { itemsOf } from './home-view';
 /** One kind of work on some walls of a home, with what putting it off would mean. Throws `Refused`. */
 export function putOffChoices(actor: Actor, homeId: string, kind: WorkKind, wallIds: readonly string[], now: Date): DeferralChoice[] {
   homeFor(actor, homeId, 'work.putOff');
-  return transaction(() => {
-    const { home, today } = careHomeAt(homeId, now);
-    const items = itemsOf([homeId]).filter((item) => item.kind === kind && wallIds.includes(item.wallId));
-    return deferralChoices(home, items, today);
-  });
+  const { home, today } = careHomeAt(homeId, now);
+  const items = itemsOf([homeId]).filter((item) => item.kind === kind && wallIds.includes(item.wallId));
+  return deferralChoices(home, items, today);
 }
 
 /** Puts work off to its next chance; the same wish arriving twice is one. Returns on how many walls there was such work. */
