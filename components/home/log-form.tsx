@@ -32,7 +32,7 @@ const kinds: Choice[] = [
   { value: 'restain', label: 'Restain', hint: 'A coat on the wood' },
   { value: 'recaulk', label: 'Recaulk', hint: 'New caulk in the joints' },
   { value: 'wash', label: 'Wash', hint: 'Dirt and mildew off' },
-  { value: 'walkaround', label: 'Walkaround', hint: 'Looked at every wall, without notes on each' },
+  { value: 'walkaround', label: 'Walkaround', hint: 'Looked at, without questions wall by wall' },
 ];
 
 /** Logs work beside the wall: what, which walls, when; the rest may stay empty. */
