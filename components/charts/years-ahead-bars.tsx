@@ -14,7 +14,7 @@ export default function YearsAheadBars({ years }: YearsAheadBarsProps) {
     <ResponsiveContainer width="100%" height="100%">
       <BarChart accessibilityLayer={false} data={data} margin={{ top: 24, right: 4, bottom: 0, left: 0 }} barCategoryGap="14%">
         <CartesianGrid vertical={false} stroke="var(--line)" />
-        <XAxis dataKey="year" tickFormatter={(year: number) => `’${String(year).slice(2)}`} interval={0} tickLine={false} stroke="var(--ink)" tick={{ fill: 'var(--ink)', fontSize: 14 }} />
+        <XAxis dataKey="year" tickFormatter={(year: number) => `’${String(year).slice(2)}`} interval="preserveStart" minTickGap={10} tickLine={false} stroke="var(--ink)" tick={{ fill: 'var(--ink)', fontSize: 14 }} />
         <YAxis tickFormatter={words} tickLine={false} axisLine={false} tick={{ fill: 'var(--quiet)', fontSize: 13 }} width={56} />
         <Bar dataKey="dollars" fill="var(--dose-3)" stroke="var(--ink)" strokeWidth={1.5} isAnimationActive={false}>
           <LabelList dataKey="dollars" position="top" fill="var(--ink)" fontSize={12} formatter={(value) => words(Number(value))} className="max-md:hidden" />
