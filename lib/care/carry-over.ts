@@ -1,13 +1,13 @@
 import { addDays, type CalendarDay, daysBetween } from '@/lib/calendar';
 import { aboutRange } from '@/lib/calendar-words';
-import { type Source } from '@/lib/explain';
+import { ourRule } from '@/lib/our-rules';
 import { type SeasonMonths, type Window, type WorkItem } from './types';
 import { isAllYear, runsAround } from './window';
 
 /** Where the calendar gives no season, a missed window is followed by others of this length. Our rule. */
 const periodDays = 90;
 
-const source: Source = { text: 'Work whose window passed without it moves to the season that comes, and stays overdue', ground: 'our rule' };
+const source = ourRule('carried over');
 
 /** The coming window after one that closed on `missedOn`; the same on every day until it closes itself. */
 export function comingWindow(missedOn: CalendarDay, seasons: SeasonMonths[], today: CalendarDay): Window {

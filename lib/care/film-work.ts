@@ -2,6 +2,7 @@ import { addDays, addMonths, type CalendarDay } from '@/lib/calendar';
 import { aboutDay, exactDay, exactRange, monthNames } from '@/lib/calendar-words';
 import { monthsInWords } from '@/lib/coat';
 import { type Explanation, type Source } from '@/lib/explain';
+import { ourRule } from '@/lib/our-rules';
 import { filmStates, workKinds } from '@/lib/schemas/vocabulary';
 import { comingWindow, unlessBegun } from './carry-over';
 import { type KnownWall } from './films';
@@ -15,13 +16,13 @@ import { windowFor } from './window';
 
 type FilmKind = 'restain' | 'recaulk';
 
-export const windowSource: Source = { text: 'Window: the coating season that holds the date, else the next if it opens within 60 days, else the one before; at most 60 days past the date', ground: 'our rule' };
+export const windowSource = ourRule('window');
 const ruleSource: Source = { text: 'RFC 5545 (2009), §3.3.10, recurrence rules', ground: 'published' };
 const caulkSeason: Source = { text: 'Caulk keeps to the coating season; ASTM C1193 gives 40 to 100 °F for sealants', ground: 'memory' };
 
 /** A film found sound is asked for again after this many months at the earliest: the next walkaround comes first. Our rule. */
 const soundMonths = 6;
-const foundSource: Source = { text: 'A film found due is due from that day, one found past due is overdue; one found sound is not due within half a year', ground: 'our rule' };
+const foundSource = ourRule('found');
 
 /** The next restain or recaulk of a wall; null when there is no date to start from, or the owner's rule has ended. */
 export function filmWork(home: CareHome, known: KnownWall, kind: FilmKind): WorkItem | null {

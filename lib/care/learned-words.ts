@@ -1,7 +1,8 @@
 import { exactDay } from '@/lib/calendar-words';
 import { yearOf } from '@/lib/calendar';
 import { learningSource } from '@/lib/coat/learning';
-import { type ExplainedInput, type Explanation, type Source } from '@/lib/explain';
+import { type ExplainedInput, type Explanation } from '@/lib/explain';
+import { ourRule } from '@/lib/our-rules';
 import { filmStates } from '@/lib/schemas/vocabulary';
 import { type FilmLife } from './types';
 
@@ -28,10 +29,7 @@ export const learnedInputs = ({ film, learned }: Pick<FilmLife, 'film' | 'learne
     value: `factor ${before.toFixed(2)} → ${after.toFixed(2)}`,
   }));
 
-export const assumedSource: Source = {
-  text: 'Age of a film that nobody knows, from how it was found: due, its whole life; past due, more; sound, half of it',
-  ground: 'our rule',
-};
+export const assumedSource = ourRule('assumed age');
 
 /** The explanation of a life with what the wall's own history added to it. */
 export function lifeExplained({ explanation, ...film }: FilmLife): Explanation {

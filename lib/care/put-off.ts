@@ -1,6 +1,6 @@
 import { addDays, addMonths, type CalendarDay } from '@/lib/calendar';
 import { aboutRange } from '@/lib/calendar-words';
-import { type Source } from '@/lib/explain';
+import { ourRule } from '@/lib/our-rules';
 import { comingWindow } from './carry-over';
 import { type CareDeferral, type SeasonMonths, type Window, type WorkItem } from './types';
 import { isAllYear, runsAround } from './window';
@@ -8,7 +8,7 @@ import { workKey } from './work-key';
 
 /** Where the calendar gives no season, putting off means so many months. Our rule. */
 const restMonths = 6;
-export const putOffSource: Source = { text: 'Work that was put off is not asked for before the season that it was put off to', ground: 'our rule' };
+export const putOffSource = ourRule('put off');
 
 /** The window that holds a day, or the next one after it. */
 const windowFrom = (day: CalendarDay, seasons: SeasonMonths[]): Window => ({ ...comingWindow(addDays(day, -1), seasons, day), moved: 'put off' });

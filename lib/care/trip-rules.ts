@@ -1,13 +1,13 @@
 import { addMonths, type CalendarDay, daysBetween, monthOf } from '@/lib/calendar';
-import { type Source } from '@/lib/explain';
+import { ourRule } from '@/lib/our-rules';
 import { type FilmJob } from './film-jobs';
 import { stripAtShare } from './stripping';
 import { dayOfVisit } from './with-restain';
 
 const daysInMonth = 30.44;
 
-export const joinSource: Source = { text: 'A wall due within so many months of a trip joins it when the share of film life thrown away costs less than another trip', ground: 'our rule' };
-export const visitDaySource: Source = { text: 'A trip is reckoned to take place on the day on which its first film is used up, or on the nearest day that suits all of its work', ground: 'our rule' };
+export const joinSource = ourRule('join');
+export const visitDaySource = ourRule('trip day');
 
 /** A trip as the plan's visits are: the work whose window closes first, and all whose windows share days with it; `on` is the day on which it is reckoned. */
 export type TripDays = { on: CalendarDay; opensOn: CalendarDay; closesOn: CalendarDay; jobs: FilmJob[] };

@@ -1,6 +1,7 @@
 import { addDays, addMonths, type CalendarDay, dayOf, yearOf } from '@/lib/calendar';
 import { aboutDay, exactDay, exactRange } from '@/lib/calendar-words';
 import { type Source } from '@/lib/explain';
+import { ourRule } from '@/lib/our-rules';
 import { type Window, type WorkItem } from './types';
 
 /** A recaulk due this near to the wall's restain is done with it. Our rule. */
@@ -10,8 +11,8 @@ const graceDays = 60;
 const shortestDays = 14;
 
 const caulkFirst: Source = { text: 'Caulk takes up color with the next coat and so goes on before it: common practice, no source', ground: 'common practice' };
-const nearSource: Source = { text: 'A recaulk due within 18 months of the wall’s restain joins it, if the caulk is not left more than 60 days past its life', ground: 'our rule' };
-const washSource: Source = { text: 'A restain begins with a wash, so the wash of that year is part of it', ground: 'our rule' };
+const nearSource = ourRule('caulk with the coat');
+const washSource = ourRule('wash with the coat');
 
 /** The day on which work is taken to be done: its date where the window holds it, else the nearest end of the window; once missed, the opening. Our rule. */
 export function dayOfVisit({ dueOn, window, missedOn }: Pick<WorkItem, 'dueOn' | 'window' | 'missedOn'>): CalendarDay {

@@ -1,6 +1,7 @@
 import { addDays, type CalendarDay } from '@/lib/calendar';
 import { exactDay, exactRange, monthNames } from '@/lib/calendar-words';
 import { type Source } from '@/lib/explain';
+import { ourRule } from '@/lib/our-rules';
 import { workKinds } from '@/lib/schemas/vocabulary';
 import { firstLook, isUnknown, unknownWords } from './first-look';
 import { type KnownWall } from './films';
@@ -28,7 +29,7 @@ export function washMonth(latitude: number, seasons: SeasonMonths[]): number {
 const sources: Record<YearlyKind, Source[]> = {
   wash: [
     { text: 'A wash every year, before the work of the season: common practice, no source', ground: 'common practice' },
-    { text: 'A restain includes a wash; either one in a year settles that year’s wash', ground: 'our rule' },
+    ourRule('wash with the coat'),
   ],
   walkaround: [{ text: 'A walkaround in spring and in fall: common practice, no source', ground: 'common practice' }],
 };
@@ -84,7 +85,7 @@ export function yearlyWork(home: CareHome, known: KnownWall, kind: YearlyKind, t
       value: exactRange(turn.window.opensOn, turn.window.closesOn),
       formula: byRule ? 'the month of the care rule’s next date that logged work has not settled' : 'the 30 days after the home was set up',
       inputs: byRule ? [{ label: 'Care rule (RFC 5545)', value: rule }, { label: 'Month', value: monthNames[Number(turn.dueOn.slice(5, 7)) - 1] ?? '' }] : [{ label: 'Set up on', value: exactDay(home.since) }],
-      sources: unknown ? [...sources.walkaround, { text: 'A wall whose dates nobody knows is looked at first, within 30 days', ground: 'our rule' }] : sources[kind],
+      sources: unknown ? [...sources.walkaround, ourRule('first look')] : sources[kind],
     },
   };
 }

@@ -1,5 +1,5 @@
 import { type CalendarDay } from '@/lib/calendar';
-import { type Source } from '@/lib/explain';
+import { ourRule } from '@/lib/our-rules';
 import { type FilmState } from '@/lib/schemas/vocabulary';
 
 /** A film of the past that was looked at: how old it was, how it was found, how long the model had it last. Ages in years. */
@@ -19,7 +19,7 @@ const least = 0.5;
 const most = 2;
 
 /** Where a factor comes from, for whoever opens a life that was learned from. */
-export const learningSource: Source = { text: 'The wall’s own factor: a normal-normal update of its logarithm, from 1 with a deviation of 0.25, by each earlier film that was looked at', ground: 'our rule' };
+export const learningSource = ourRule('learning');
 
 /** An age below this (a month) says nothing: its logarithm would run away. Our rule. */
 const youngestYears = 1 / 12;

@@ -1,4 +1,5 @@
 import { type ExplainedInput, type Source } from '@/lib/explain';
+import { ourRule } from '@/lib/our-rules';
 import { coverOf, type WallCover } from '@/lib/sun/wall-face';
 
 /** What wears a film on one wall. */
@@ -65,12 +66,12 @@ export const severityOf = (weathering: Weathering, weights: Weights): number =>
   clamp(weights.sun * sunShare(weathering.doseKwhM2) + weights.rain * rainShare(weathering));
 
 const severitySources: Source[] = [
-  { text: 'Where on the published range a wall falls: sun share (dose − 250) / 1100 kWh/m², rain share Scheffer / 100 × exposure', ground: 'our rule' },
+  ourRule('severity'),
   { text: 'Scheffer, A climate index for estimating potential for decay in wood structures above ground, Forest Products Journal 21(10), 1971', ground: 'published' },
 ];
 
 /** Named only where a wall has a cover. */
-const coverSource: Source = { text: 'Under a porch roof or a deck rain is kept off as under an eave of its depth; what is under it counts by its area', ground: 'our rule' };
+const coverSource = ourRule('rain under an eave');
 
 export const sourcesOfSeverity = (weathering: Weathering): Source[] => (underCover(weathering) ? [...severitySources, coverSource] : severitySources);
 

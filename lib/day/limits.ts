@@ -1,11 +1,11 @@
 import { type Source } from '@/lib/explain';
+import { ourRule } from '@/lib/our-rules';
 import { type StainBase } from '@/lib/schemas/vocabulary';
 import { fahrenheitToCelsius } from '@/lib/units';
 
 /** Limits for a day of work. °C, hours, percent. The label of the product wins over every one. */
 
 const handbook = (text: string): Source => ({ text: `Wood Handbook, FPL-GTR-190 (2010), ${text}`, ground: 'published' });
-const ours = (text: string): Source => ({ text, ground: 'our rule' });
 
 export const coldest: Record<StainBase, { celsius: number; source: Source }> = {
   waterborne: { celsius: fahrenheitToCelsius(50), source: handbook('p. 16-23: latex and waterborne finishes at 50 °F or warmer') },
@@ -15,11 +15,11 @@ export const coldest: Record<StainBase, { celsius: number; source: Source }> = {
 /** A morning this little under the limit may still warm up to it, °C. Our rule. */
 export const mayWarmUpC = 5;
 
-export const hottestForStain = { celsius: fahrenheitToCelsius(90), source: ours('Stain dries too fast to keep a wet edge above 90 °F') };
+export const hottestForStain = { celsius: fahrenheitToCelsius(90), source: ourRule('stain in heat') };
 
 export const nightForStain: Record<StainBase, { celsius: number; source: Source; short: 'no' | 'wait' }> = {
   waterborne: { celsius: coldest.waterborne.celsius, short: 'no', source: handbook('p. 16-23: and expected to stay above 50 °F for 24 hours') },
-  oil: { celsius: coldest.oil.celsius, short: 'wait', source: ours('The oil limit of 40 °F, kept through the night as for waterborne finishes') },
+  oil: { celsius: coldest.oil.celsius, short: 'wait', source: ourRule('oil at night') },
 };
 
 /** Without a forecast the dew point stands for the night's low. */
@@ -30,7 +30,7 @@ export const forSealant = {
   hottestC: fahrenheitToCelsius(100),
   source: { text: 'ASTM C1193: sealant at 40 to 100 °F, the joint dry and free of frost', ground: 'memory' } satisfies Source,
   nightC: 0,
-  night: ours('Fresh sealant is kept from frost for its first night'),
+  night: ourRule('caulk at night'),
 };
 
 /** The wall taken to be as warm as the air. */
@@ -42,11 +42,11 @@ export const aboveDewPoint = {
 export const woodMoisture = {
   percent: 20,
   source: { text: 'Wood Handbook, FPL-GTR-190 (2010), ch. 16: finish wood below 20 % moisture', ground: 'memory' } satisfies Source,
-  forJoint: ours('The limit for finishing wood, below 20 %, taken for the wood beside a joint'),
+  forJoint: ourRule('dry joint'),
 };
 
-export const dryBefore = { hours: 24, source: ours('A day without rain before the work, so that the wood is dry') };
-export const dryAfter = { hours: 24, atLeastHours: 4, source: ours('A day without rain after the work; within 4 hours fresh work is spoiled') };
+export const dryBefore = { hours: 24, source: ourRule('dry before') };
+export const dryAfter = { hours: 24, atLeastHours: 4, source: ourRule('dry after') };
 
 export const sunOnWall: Record<StainBase, Source> = {
   oil: handbook('p. 16-23: no oil or alkyd on a surface hot in the sun, nor on a cool one that the sun will heat within a few hours: it blisters'),

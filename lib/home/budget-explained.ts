@@ -7,14 +7,15 @@ import { stripSource } from '@/lib/care/stripping';
 import { joinSource, visitDaySource } from '@/lib/care/trip-rules';
 import { type ExplainedInput, type Explanation, type Source } from '@/lib/explain';
 import { dollarWords } from '@/lib/money';
+import { ourRule } from '@/lib/our-rules';
 import { keysOf, type UnitSystem } from '@/lib/schemas/vocabulary';
 import { costsForm, perWords, priceFields } from '@/lib/schemas/costs';
 
 type Parts = Pick<BudgetYear, 'tripCents' | 'restainCents' | 'stripCents' | 'recaulkCents' | 'washCents'>;
 
-const priceSource: Source = { text: 'Prices as the owner gave them, or our examples until then; without any rise of prices', ground: 'our rule' };
-const yearSource: Source = { text: 'A wall that is restained in a year is washed with it; every other wall is washed by its care rule', ground: 'our rule' };
-const worthSource: Source = { text: 'Choices are compared over 20 years, less the share of film life that is left at the end, at the price of its renewal', ground: 'our rule' };
+const priceSource = ourRule('prices');
+const yearSource = ourRule('wash in the budget');
+const worthSource = ourRule('worth left');
 const workSources: Source[] = [priceSource, yearSource, visitDaySource, joinSource, stripSource];
 
 const labels: Record<keyof Parts, string> = { tripCents: 'Trips', restainCents: 'Restain', stripCents: 'Stripping first', recaulkCents: 'Recaulk', washCents: 'Wash' };

@@ -5,9 +5,10 @@ import { assumedSource } from '@/lib/care/learned-words';
 import { type FilmLife } from '@/lib/care/types';
 import { climateAt, type Station } from '@/lib/climate';
 import { bareGroundAlbedo, groundAlbedo } from '@/lib/climate/snow';
-import { type ExplainedInput, type Explanation, type Source } from '@/lib/explain';
+import { type ExplainedInput, type Explanation } from '@/lib/explain';
 import { coverWords, type StoredCover } from '@/lib/home/cover';
 import { directionWord } from '@/lib/home/direction';
+import { ourRule } from '@/lib/our-rules';
 import { shades, type Shade, type UnitSystem } from '@/lib/schemas/vocabulary';
 import { lengthText } from '@/lib/units';
 
@@ -35,8 +36,8 @@ function reflected(albedo: readonly number[]): string {
   return months.length === 0 ? percent(bareGroundAlbedo) : `${percent(bareGroundAlbedo)}; with snow up to ${percent(Math.max(...albedo))}: ${months.join(', ')}`;
 }
 
-const coverRule: Source = { text: 'A porch roof or a deck: opaque, level and endlessly long; where the eave shades too, the deeper shade counts', ground: 'our rule' };
-const snowRule: Source = { text: 'Snow on the ground: none in months with a mean of 32 °F (0 °C) or more, all of it at 21 °F (−6 °C) or less; that snow reflects 60 % is from memory', ground: 'our rule' };
+const coverRule = ourRule('cover');
+const snowRule = ourRule('snow');
 
 const placeInput = ({ latitude, longitude }: Where) => ({ label: 'Place', value: `${latitude.toFixed(2)}° N, ${longitude.toFixed(2)}° E` });
 
@@ -47,7 +48,7 @@ export const sunHoursExplained = (hours: number, wall: SunlitWall, where: Where,
   inputs: [placeInput(where), ...wallInputs(wall, units)],
   sources: [
     { text: 'Sun position: suncalc 2, after Meeus, Astronomical Algorithms, ch. 25; its refraction taken out', ground: 'published' },
-    { text: 'Clouds do not count here: they count in the sun dose', ground: 'our rule' },
+    ourRule('sun hours'),
     ...(wall.cover === 'none' ? [] : [coverRule]),
   ],
 });
@@ -70,7 +71,7 @@ export function sunDoseExplained(dose: number, wall: SunlitWall, where: Where & 
       { text: 'Diffuse share: Erbs, Klein & Duffie (1982), Solar Energy 28:293', ground: 'published' },
       { text: 'Hours of a day: Collares-Pereira & Rabl (1979); Liu & Jordan (1960)', ground: 'published' },
       { text: 'Sky over a tilted surface: Hay & Davies (1980)', ground: 'published' },
-      { text: 'Shade from trees and buildings', ground: 'our rule' },
+      ourRule('shade'),
       ...(wall.cover === 'none' ? [] : [coverRule]),
       ...(albedo.some((share) => share > bareGroundAlbedo) ? [snowRule] : []),
     ],
@@ -92,7 +93,7 @@ export function leftExplained(film: FilmLife, today: CalendarDay): { percent: nu
         { label: film.film === 'coat' ? 'Coat life of this wall' : 'Seal life of this wall', value: monthsInWords(film.lifeMonths) },
         { label: 'Today', value: exactDay(today) },
       ],
-      sources: [{ text: 'A film wears evenly over its life', ground: 'our rule' }, ...(film.assumed ? [assumedSource] : [])],
+      sources: [ourRule('even wear'), ...(film.assumed ? [assumedSource] : [])],
     },
   };
 }

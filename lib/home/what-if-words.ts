@@ -1,6 +1,7 @@
 import { monthsInWords } from '@/lib/coat';
 import { type ExplainedInput, type Explanation } from '@/lib/explain';
 import { type Change, type CoatCost, type Variant } from '@/lib/home/what-if';
+import { ourRule } from '@/lib/our-rules';
 import { priceText } from '@/lib/schemas/costs';
 import { finishes, textures, type UnitSystem } from '@/lib/schemas/vocabulary';
 import { areaText, lengthText } from '@/lib/units';
@@ -57,9 +58,8 @@ export function variantExplained(variant: Variant, { now, areaM2, restainCentsPe
     inputs: [...explanation.inputs, ...priced],
     sources: [
       ...explanation.sources,
-      ...(variant.change.kind === 'eave' ? [{ text: 'Sun dose reckoned again with the deeper eave, as it is for the wall', ground: 'our rule' as const }] : []),
-      { text: 'A restain costs the same whatever the finish; what the change itself costs is not counted', ground: 'our rule' },
-      ...(pricesSet ? [] : [{ text: 'Example prices, invented by us: nobody has set what work costs at this home', ground: 'our rule' as const }]),
+      ourRule('one change'),
+      ...(pricesSet ? [] : [ourRule('example prices')]),
     ],
   };
 }

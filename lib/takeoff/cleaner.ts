@@ -1,4 +1,5 @@
 import { type Explanation, type Source } from '@/lib/explain';
+import { ourRule } from '@/lib/our-rules';
 import { type UnitSystem } from '@/lib/schemas/vocabulary';
 import { areaText, gallonsToLitres, litresPerGallon, squareMetresPerSquareFoot, volumeText } from '@/lib/units';
 import { cheapestContainers, type ContainerCount, type ContainerSize, priceOfContainers } from './containers';
@@ -42,7 +43,7 @@ export const exampleCleaners: ContainerSize[] = [
 ];
 
 const coverageSource: Source = { text: 'How far mixed cleaner goes, from memory', ground: 'common practice' };
-const ratioSource: Source = { text: 'Four parts of water to one of concentrate, unless you gave the label’s; buying for the thirsty end', ground: 'our rule' };
+const ratioSource = ourRule('cleaner');
 
 /** '100–200 ft² per gallon'; '2.5–4.9 m² per liter'. */
 function coverageText({ low, high }: { low: number; high: number }, units: UnitSystem): string {

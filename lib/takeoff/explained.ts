@@ -1,4 +1,5 @@
 import { type ExplainedInput, type Explanation, type Source } from '@/lib/explain';
+import { ourRule } from '@/lib/our-rules';
 import { textures, type UnitSystem } from '@/lib/schemas/vocabulary';
 import { areaText, gallonsToLitres, lengthText, litresPerGallon, metresPerInch, squareMetresPerSquareFoot, volumeText } from '@/lib/units';
 import { wallAreaM2, type WallSizes } from './area';
@@ -51,7 +52,7 @@ export function stainExplained(coatings: readonly Coating[], range: StainRange, 
     value: volumeText(gallonsToLitres(range.buyGal), units),
     formula: `(${used.formula}), its upper end × (1 + waste)`,
     inputs: [...used.inputs, { label: used.figure, value: used.value }, { label: 'Waste', value: `${plain((coatings[0]?.wasteShare ?? 0) * 100)} %` }, { label: 'To buy', value: volume(range.buyGal, units) }],
-    sources: [...used.sources, { text: 'Buying for the thirsty end of the range, and the share of waste', ground: 'our rule' }],
+    sources: [...used.sources, ourRule('thirsty end')],
   };
 }
 
@@ -67,7 +68,7 @@ export function containersExplained(buyGal: number, containers: readonly Contain
       ...[...sizes].sort((a, b) => b.gal - a.gal).map(({ gal, priceCents: each }) => ({ label: containerText(gal, units), value: `${dollars(each)} each` })),
       { label: 'Left over', value: volume(Math.max(0, held - buyGal), units) },
     ],
-    sources: [{ text: 'Every mix is weighed, to the fluid ounce', ground: 'our rule' }, { text: 'Prices as typed; those that the form starts with are our examples', ground: 'our rule' }],
+    sources: [ourRule('every mix'), ourRule('shop prices')],
   };
 }
 

@@ -1,4 +1,5 @@
 import { type Ground } from '@/lib/explain';
+import { ourRule } from '@/lib/our-rules';
 import { type WallSizes } from './area';
 import { courseCount } from './profile';
 
@@ -24,7 +25,7 @@ export type Joint = { kind: JointKind; lengthM: number };
 export const jointKinds: Record<JointKind, { label: string; formula: string; ground: Ground; source: string }> = {
   openings: { label: 'Round windows and doors', formula: '2 × (width + height), each opening, added up', ground: 'common practice', source: 'Trim and window perimeters are caulked: common practice, no source' },
   corners: { label: 'Log-end corners', formula: 'two lines a corner × wall height, each corner shared by two walls', ground: 'common practice', source: 'Log ends and corners are caulked: common practice, no source; half a corner for each of its walls: our rule' },
-  butts: { label: 'Butt joints', formula: 'courses × joints per course × exposed face; joints per course = boards end to end − 1', ground: 'our rule', source: 'Butt joints are caulked: common practice, no source; how many there are: our rule' },
+  butts: { label: 'Butt joints', formula: 'courses × joints per course × exposed face; joints per course = boards end to end − 1', ground: ourRule('joints').ground, source: 'Butt joints are caulked: common practice, no source; how many there are: our rule' },
   penetrations: { label: 'Pipes and fittings', formula: 'count × perimeter', ground: 'common practice', source: 'Penetrations are caulked: common practice, no source' },
 };
 

@@ -1,4 +1,5 @@
 import { type Explanation } from '@/lib/explain';
+import { ourRule } from '@/lib/our-rules';
 import { type UnitSystem } from '@/lib/schemas/vocabulary';
 import { lengthText, litresPerGallon, metresToInches } from '@/lib/units';
 import { backerRod, depthSources, otherDepthM, rodSources } from './joint-size';
@@ -32,7 +33,7 @@ function buyExplained({ wasteShare, units = 'us' }: SealantNeed, { lengthM, widt
       { label: 'In the joints', value: range },
       { label: 'Waste', value: percent(wasteShare) },
     ],
-    sources: [{ text: 'Volume: exact geometry of a rectangular bead', ground: 'published' }, ...depthSources, { text: 'Buying for the deeper bead, and the share of waste', ground: 'our rule' }],
+    sources: [{ text: 'Volume: exact geometry of a rectangular bead', ground: 'published' }, ...depthSources, ourRule('deeper bead')],
   };
 }
 
@@ -47,7 +48,7 @@ function containersExplained({ sizes, units = 'us' }: SealantNeed, { buyL, conta
       ...[...sizes].sort((a, b) => b.gal - a.gal).map(({ gal, priceCents: each }) => ({ label: sealantContainerText(gal, units), value: `${dollars(each)} each` })),
       { label: 'Left over', value: sealantVolumeText(Math.max(0, heldL - buyL), units) },
     ],
-    sources: [{ text: 'Every mix is weighed, to a tenth of a fluid ounce', ground: 'our rule' }, { text: 'Prices are our examples unless you gave your own', ground: 'our rule' }],
+    sources: [ourRule('every mix'), ourRule('shop prices')],
   };
 }
 
@@ -71,7 +72,7 @@ function depthExplained({ units = 'us' }: SealantNeed, { widthM, depthM }: Seala
     value: jointSizeText(depthM, units),
     formula: 'up to 1/2 in wide: as deep as wide; wider: half the width; from 1/4 to 1/2 in',
     inputs: [{ label: 'Width', value: jointSizeText(widthM, units) }, { label: 'By the other handbook', value: jointSizeText(otherDepthM(widthM), units) }],
-    sources: [...depthSources, { text: 'The label of the product wins', ground: 'our rule' }],
+    sources: [...depthSources, ourRule('label')],
   };
 }
 
@@ -86,6 +87,6 @@ function rodExplained({ wasteShare, units = 'us' }: SealantNeed, { widthM, lengt
       { label: 'Waste', value: percent(wasteShare) },
       { label: '25 to 33 % wider than the joint', value: `${jointSizeText(fromM, units)} to ${jointSizeText(toM, units)}` },
     ],
-    sources: [...rodSources, { text: 'Rod for every joint: the most it can take; a joint too shallow for rod takes bond-breaker tape', ground: 'our rule' }],
+    sources: [...rodSources, ourRule('rod')],
   };
 }

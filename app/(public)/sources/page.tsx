@@ -1,7 +1,9 @@
 import { type Metadata } from 'next';
-import { ownRules, sources } from './sources';
+import { sources } from './sources';
 import { Course } from '@/components/ui/course';
 import { PageHead } from '@/components/ui/page-head';
+import { ourRules } from '@/lib/our-rules';
+import { type OurRule } from '@/lib/our-rules/rule';
 
 export const metadata: Metadata = { title: 'Sources of the figures', description: 'Who published the figures that Eavewright computes with, and which rules are its own.' };
 
@@ -23,13 +25,20 @@ export default function SourcesPage() {
         </Course>
       ))}
       <Course heading="Our own rules" aside="Chosen by us, not published by anybody. The product says “our rule” where it uses one.">
-        <ul className="grid max-w-3xl gap-3">
-          {ownRules.map((rule) => (
-            <li key={rule} className="border-l-4 border-lichen pl-4">
-              {rule}
-            </li>
+        <div className="grid max-w-3xl gap-8">
+          {Object.entries(ourRules).map(([about, rules]) => (
+            <section key={about} aria-label={about}>
+              <h3 className="mb-3">{about}</h3>
+              <ul className="grid gap-4">
+                {Object.entries<OurRule>(rules).map(([name, rule]) => (
+                  <li key={name} className="border-l-4 border-lichen pl-4">
+                    {rule.text}. <span className="text-quiet">Why: {rule.because}</span>
+                  </li>
+                ))}
+              </ul>
+            </section>
           ))}
-        </ul>
+        </div>
       </Course>
     </>
   );

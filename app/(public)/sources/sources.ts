@@ -95,27 +95,3 @@ export const sources: SourceGroup[] = [
     ],
   },
 ];
-
-export const ownRules = [
-  'Where a wall falls within the published range of coat life: by its sun dose between 250 and 1,350 kWh/m² a year and its rain, weighted by the kind of finish.',
-  'A wood that is not known counts as the shorter-lived of the published ones.',
-  'What trees and evergreens let through, and that they hide the sky 60 degrees to each side; that leaves are out in months with a mean of at least 50 °F (10 °C).',
-  'A porch roof or a deck over a wall: opaque, level and endlessly long, throwing no shade beside itself; where the eave shades too, the deeper shade counts; light from the ground is as without it. Rain is kept off what is under it as under an eave of its depth, by area.',
-  'Snow on the ground: none in months with a mean of 32 °F (0 °C) or more, all of it at 21 °F (−6 °C) or less, in a straight line between. Bare ground reflects 20 % and snow 60 % of the light, from memory.',
-  'Which station stands for a home: the nearest, a hundred meters of height counting as ten kilometers.',
-  'When a month counts as good, marginal or no: on published limits of temperature, and the chance of three dry days in a row.',
-  'That a raw date moves into the coating season, never later than 60 days after the coat is used up; that work which missed its season moves to the coming one and stays overdue.',
-  'That caulk due within 18 months of a restain joins it, and that a restain begins with a wash.',
-  'A rule of your own falls at most once in 28 days, starts within 50 years of today, and a rule for restaining or recaulking must fall on some day whenever logged work restarts it.',
-  'That a wall due within so many months of a trip joins it when the share of coat or caulk life thrown away costs less than another trip; that the months, 0 to 24, are those that cost least a year over 20 years, life left at the end counted; that a trip takes place on the day its first coat or caulk is used up, or the nearest day that suits all of its work.',
-  'That a coat older than 1.15 times its life is stripped first; that the years ahead are reckoned at today’s prices. The prices that a home starts with are made up by us, for you to replace.',
-  'When a reminder goes out: 120 days before to book, 28 days before to buy, on the opening day, and 14, 45 and 105 days after a chance has passed.',
-  'A day without rain before and after the work; no stain above 90 °F (32 °C); caulk kept from frost for a night; oil stain kept above its 40 °F (4 °C) through the night.',
-  'The order in which work follows the shade: by the middle of each wall’s longest time out of the sun; trees count as shade when less than half of the light passes.',
-  'Joints: boards of up to 16 ft, two log-end corners a wall unless you say otherwise, a foot of joint around each pipe, backer rod behind every joint; between two handbooks the deeper bead is bought for.',
-  'Cleaner for the wash: 100 to 200 ft² to a gallon of mixed cleaner (from memory, common practice, no source), four parts of water to one of concentrate unless the label says otherwise, bought for the thirsty end.',
-  'Buying for the thirsty end of the published range, with a tenth for waste unless you say otherwise.',
-  'What a change to a wall would do: an eave 1 or 2 ft (30 or 60 cm) deeper, one change at a time; the wall’s own factor stays, a restain costs the same whatever the finish, and the work of the change itself is not counted.',
-  'The five steps of the sun-dose ramp on the house plan: 250 to 1,350 kWh/m² in equal parts.',
-  'How walls are laid end to end on the house plan when measured widths leave a gap, and where doors and windows are drawn on a wall.',
-];
