@@ -47,24 +47,7 @@ describe('coat life, worked by hand from the formula', () => {
   });
 });
 
-describe('published ranges, years', () => {
-  // Wood Handbook, FPL-GTR-190 (2010), ch. 16, Tables 16-4 (recalled) and 16-5.
-  it.each([
-    ['water-repellent', 'smooth', 'cedar-redwood', 1, 3],
-    ['tinted-clear', 'smooth', 'cedar-redwood', 1, 2],
-    ['tinted-clear', 'saw-textured', 'pine-fir-spruce', 2, 3],
-    ['semitransparent', 'smooth', 'cedar-redwood', 2, 4],
-    ['semitransparent', 'saw-textured', 'cedar-redwood', 4, 8],
-    ['semitransparent', 'smooth', 'pine-fir-spruce', 2, 3],
-    ['semitransparent', 'saw-textured', 'pine-fir-spruce', 4, 7],
-    ['solid-color', 'smooth', 'cedar-redwood', 6, 10],
-    ['solid-color', 'saw-textured', 'cedar-redwood', 10, 15],
-    ['solid-color', 'smooth', 'pine-fir-spruce', 6, 8],
-    ['solid-color', 'saw-textured', 'pine-fir-spruce', 8, 10],
-  ] as const)('%s, %s, %s: %d to %d', (finish, texture, wood, lowYears, highYears) => {
-    expect(coatLife(input({ finish, texture, wood }))).toMatchObject({ lowYears, highYears });
-  });
-
+describe('a wood that is not known', () => {
   it('takes the shorter-lived wood where the wood is not known, and says so', () => {
     const life = coatLife(input({ wood: 'other' }));
     expect(life.highYears).toBe(7);

@@ -2,12 +2,10 @@ import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { checkDay } from '@/lib/day/check-day';
 import { type Day } from '@/lib/day/checks';
+import { dayWith, fahrenheit } from '@/tests/fixtures/fine-day';
 
-const fine: Day = { work: 'restain', base: 'waterborne', temperatureC: 20, lowC: 12, humidityPercent: 50, hoursSinceRain: 48, hoursToRain: 48, woodMoisturePercent: 12, wallSun: 'shade' };
-const of = (change: Partial<Day>) => checkDay({ ...fine, ...change }, 'us');
 const rank = { go: 0, wait: 1, no: 2 };
-const worse = (change: Partial<Day>) => rank[of(change).verdict];
-const fahrenheit = (degrees: number) => ((degrees - 32) * 5) / 9;
+const worse = (change: Partial<Day>) => rank[dayWith(change).verdict];
 
 const number = (min: number, max: number) => fc.double({ min, max, noNaN: true });
 const anyDay: fc.Arbitrary<Day> = fc.record({
@@ -23,54 +21,20 @@ const anyDay: fc.Arbitrary<Day> = fc.record({
 });
 const more = number(0, 20);
 
-describe('limits of the Wood Handbook, FPL-GTR-190, p. 16-23', () => {
-  test.each([
-    ['waterborne', 50, 'go'], ['waterborne', 49.9, 'wait'], ['waterborne', 40.9, 'no'],
-    ['oil', 40, 'go'], ['oil', 39.9, 'wait'], ['oil', 30, 'no'],
-  ] as const)('%s at %d °F: %s', (base, degrees, verdict) => {
-    expect(of({ base, temperatureC: fahrenheit(degrees), humidityPercent: 40 }).verdict).toBe(verdict);
-  });
-
-  test('a waterborne finish needs 50 °F all night', () => {
-    expect(of({ lowC: fahrenheit(50) }).verdict).toBe('go');
-    expect(of({ lowC: fahrenheit(49.9) }).verdict).toBe('no');
-  });
-
-  test('without a forecast the dew point stands for the night', () => {
-    // Air of 20 °C condenses at 10.0 °C from 52.5 % on: 1.2282 of 2.3393 kPa (IAPWS steam tables).
-    expect(of({ lowC: undefined, humidityPercent: 51 }).verdict).toBe('no');
-    expect(of({ lowC: undefined, humidityPercent: 54 }).verdict).toBe('go');
-  });
-
-  test('oil stays off walls that the sun heats or soon will; waterborne off walls in the sun', () => {
-    expect(['shade', 'sun soon', 'sun'].map((wallSun) => of({ base: 'oil', wallSun: wallSun as 'sun' }).verdict)).toEqual(['go', 'wait', 'wait']);
-    expect(['shade', 'sun soon', 'sun'].map((wallSun) => of({ wallSun: wallSun as 'sun' }).verdict)).toEqual(['go', 'go', 'wait']);
-  });
-});
-
-test('sealant between 40 and 100 °F (ASTM C1193)', () => {
-  const verdicts = [39, 40, 100, 101].map((degrees) => of({ work: 'recaulk', temperatureC: fahrenheit(degrees), humidityPercent: 30, lowC: 5 }).verdict);
-  expect(verdicts).toEqual(['wait', 'go', 'go', 'wait']);
-});
-
-test('wood is finished below 20 % moisture', () => {
-  expect([19.9, 20].map((woodMoisturePercent) => of({ woodMoisturePercent }).verdict)).toEqual(['go', 'no']);
-});
-
 describe('our own rules', () => {
   test('a day without rain before and after; while it rains and within 4 hours of rain, none', () => {
-    expect([0, 0.5, 23.9, 24, Infinity].map((hoursSinceRain) => of({ hoursSinceRain }).verdict)).toEqual(['no', 'wait', 'wait', 'go', 'go']);
-    expect([0, 3.9, 4, 23.9, 24, Infinity].map((hoursToRain) => of({ hoursToRain }).verdict)).toEqual(['no', 'no', 'wait', 'wait', 'go', 'go']);
+    expect([0, 0.5, 23.9, 24, Infinity].map((hoursSinceRain) => dayWith({ hoursSinceRain }).verdict)).toEqual(['no', 'wait', 'wait', 'go', 'go']);
+    expect([0, 3.9, 4, 23.9, 24, Infinity].map((hoursToRain) => dayWith({ hoursToRain }).verdict)).toEqual(['no', 'no', 'wait', 'wait', 'go', 'go']);
   });
 
   test('no stain above 90 °F, no oil below 40 °F at night, no sealant in frost: wait', () => {
-    expect([90, 90.1].map((degrees) => of({ temperatureC: fahrenheit(degrees) }).verdict)).toEqual(['go', 'wait']);
-    expect([40, 39.9].map((degrees) => of({ base: 'oil', lowC: fahrenheit(degrees) }).verdict)).toEqual(['go', 'wait']);
-    expect([0, -0.1].map((lowC) => of({ work: 'recaulk', lowC }).verdict)).toEqual(['go', 'wait']);
+    expect([90, 90.1].map((degrees) => dayWith({ temperatureC: fahrenheit(degrees) }).verdict)).toEqual(['go', 'wait']);
+    expect([40, 39.9].map((degrees) => dayWith({ base: 'oil', lowC: fahrenheit(degrees) }).verdict)).toEqual(['go', 'wait']);
+    expect([0, -0.1].map((lowC) => dayWith({ work: 'recaulk', lowC }).verdict)).toEqual(['go', 'wait']);
   });
 
   test('each says that it is ours', () => {
-    const ours = (change: Partial<Day>) => of(change).checks.filter(({ source }) => source.ground === 'our rule').map(({ what }) => what);
+    const ours = (change: Partial<Day>) => dayWith(change).checks.filter(({ source }) => source.ground === 'our rule').map(({ what }) => what);
     expect(ours({})).toEqual(['Rain before', 'Rain after']);
     expect(ours({ base: 'oil', temperatureC: 35 })).toEqual(['Temperature now', 'Lowest in the next 24 hours', 'Rain before', 'Rain after']);
   });
@@ -78,7 +42,7 @@ describe('our own rules', () => {
 
 test('a surface stands 3 °C above the dew point (ISO 8502-4)', () => {
   // Air of 20 °C condenses at 17 °C at 83 % (1.9384 of 2.3393 kPa, IAPWS steam tables, from memory).
-  expect([82, 84].map((humidityPercent) => of({ humidityPercent, lowC: 18 }).verdict)).toEqual(['go', 'wait']);
+  expect([82, 84].map((humidityPercent) => dayWith({ humidityPercent, lowC: 18 }).verdict)).toEqual(['go', 'wait']);
 });
 
 describe('whatever the day', () => {

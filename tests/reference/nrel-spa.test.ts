@@ -1,5 +1,3 @@
-import { Body, Equator, Horizon, MakeTime, Observer } from 'astronomy-engine';
-import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { sunPosition } from '@/lib/sun';
 import { readCsv } from '../fixtures/csv';
@@ -7,7 +5,7 @@ import { readCsv } from '../fixtures/csv';
 /**
  * Tolerance 0.05° on elevation and on azimuth·cos(elevation): the sun moves that far in 12 s, and a wall's hours cannot tell.
  * suncalc's own documentation names about 0.08° as typical for the sun; the stricter of the two is kept, as it holds.
- * Largest errors measured: 0.0012° on the published example, 0.0074° on the thirty instants, 0.016° on 40,000 random ones.
+ * Largest errors measured: 0.0012° on the published example, 0.0074° on the thirty instants.
  */
 const toleranceDeg = 0.05;
 const radians = Math.PI / 180;
@@ -36,22 +34,5 @@ describe('NREL SPA at six places through 2027', () => {
     const elevation = Number(row.elevation_true_deg);
     expect(Math.abs(at.elevationDeg - elevation)).toBeLessThan(toleranceDeg);
     expect(turned(at.azimuthDeg, Number(row.azimuth_deg)) * Math.cos(elevation * radians)).toBeLessThan(toleranceDeg);
-  });
-});
-
-describe('a second ephemeris, astronomy-engine', () => {
-  test('any instant of 2000–2060 at any inhabited place', () => {
-    const instants = fc.date({ min: new Date('2000-01-01T00:00:00Z'), max: new Date('2060-01-01T00:00:00Z'), noInvalidDate: true });
-    fc.assert(
-      fc.property(instants, fc.double({ min: -72, max: 72, noNaN: true }), fc.double({ min: -180, max: 180, noNaN: true }), (instant, latitude, longitude) => {
-        const observer = new Observer(latitude, longitude, 0);
-        const { ra, dec } = Equator(Body.Sun, MakeTime(instant), observer, true, true);
-        const truth = Horizon(MakeTime(instant), observer, ra, dec);
-        const at = sunPosition(instant, { latitude, longitude });
-        expect(Math.abs(at.elevationDeg - truth.altitude)).toBeLessThan(toleranceDeg);
-        expect(turned(at.azimuthDeg, truth.azimuth) * Math.cos(truth.altitude * radians)).toBeLessThan(toleranceDeg);
-      }),
-      { numRuns: 500 },
-    );
   });
 });
