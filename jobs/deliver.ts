@@ -1,37 +1,61 @@
 import { closeDatabase } from '@/db/client';
-import { claimMail, type ClaimedMail, markCancelled, markRefused, markRetry, markSent } from '@/db/queries/mail';
+import { isAddressBounced } from '@/db/queries/bounced-address';
+import { claimMail, type ClaimedMail, markCancelled, markHeldUp, markRefused, markRetry, markSent, stillHeld } from '@/db/queries/mail';
+import { pullInFarTimes } from '@/db/queries/mail-clock';
 import { reminderPropsOf } from '@/db/queries/reminder-props';
 import { type Rendered } from '@/lib/mail/letter';
-import { renderMail } from '@/lib/mail/registry';
+import { hasRunOut, isAwaited, renderMail } from '@/lib/mail/registry';
+import { holdClaims } from './claims';
 import { environment } from './environment';
-import { failureOf, type MailTransport, smtpTransport } from './transport';
+import { pace } from './pace';
+import { connections, failureOf, type MailTransport, smtpPool, smtpTransport } from './transport';
+import { writeTogether } from './write-together';
 
-export type DeliveryCounts = { sent: number; retried: number; refused: number; cancelled: number };
-type Outcome = { state: keyof DeliveryCounts; noConnection?: boolean };
+/** What became of the mails of a run. `heldUp`: the mail server as a whole was in trouble; they wait and lose nothing. */
+export type DeliveryCounts = { sent: number; retried: number; refused: number; cancelled: number; heldUp: number };
+type Outcome = { state: keyof DeliveryCounts; dropped?: boolean };
+type Write = (work: () => void) => Promise<void>;
 
-/** Mails in the air at one time. */
-const atOnce = 4;
+/** After so many cut lines in succession the mail server is taken to be in trouble. */
+const mostCuts = 3;
 
-/** A clock that starts at `now` and runs on: leases must not be counted from the start of a long run. */
+/** A clock that starts at `now` and runs on, whatever is done to the machine's clock: leases must not be counted from the start of a long run. */
 function clockFrom(now: Date): () => Date {
   const startedAt = performance.now();
   return () => new Date(now.getTime() + (performance.now() - startedAt));
 }
 
-/** Sends everything in the outbox that is due. Stops early when the mail server cannot be reached. */
+/**
+ * Sends what is due in the outbox: at most MAIL_PER_RUN mails and MAIL_PER_SECOND, links that somebody waits for first; the rest
+ * waits for the next turn. Stops early when the mail server does not serve us, or when outcomes cannot be written down.
+ */
 export async function deliverDue(now: Date, transport?: MailTransport): Promise<DeliveryCounts> {
-  const counts: DeliveryCounts = { sent: 0, retried: 0, refused: 0, cancelled: 0 };
+  const counts: DeliveryCounts = { sent: 0, retried: 0, refused: 0, cancelled: 0, heldUp: 0 };
   const clock = clockFrom(now);
+  pullInFarTimes(now);
+  const claims = holdClaims(clock, environment().MAIL_PER_RUN);
+  const passes = pace(environment().MAIL_PER_SECOND);
+  const { write, isStuck } = writeTogether();
   let way = transport;
-  for (;;) {
-    const claimed = claimMail(clock(), atOnce);
-    if (claimed.length === 0) return counts;
-    way ??= smtpTransport(environment().SMTP_URL);
-    const sending = way;
-    const outcomes = await Promise.all(claimed.map((one) => deliverOne(one, sending, clock)));
-    for (const { state } of outcomes) counts[state] += 1;
-    if (outcomes.some((outcome) => outcome.noConnection)) return counts;
-  }
+  let cuts = 0;
+  const worker = async () => {
+    while (counts.heldUp === 0 && cuts < mostCuts && !isStuck()) {
+      const one = claims.next();
+      if (!one) return;
+      try {
+        const { state, dropped } = await deliverOne(one, (way ??= smtpPool(environment().SMTP_URL)), clock, write, passes);
+        counts[state] += 1;
+        cuts = dropped ? cuts + 1 : 0;
+      } finally {
+        claims.done(one);
+      }
+    }
+  };
+  const ends = await Promise.allSettled(Array.from({ length: connections }, worker));
+  if (!transport) way?.close?.();
+  claims.end();
+  for (const end of ends) if (end.status === 'rejected') throw end.reason;
+  return counts;
 }
 
 /** Sends one mail at once, for links that somebody waits for. Trouble with the mail server leaves it in the outbox; the scheduler goes on. */
@@ -39,39 +63,57 @@ export async function deliverMail(mailId: string, transport?: MailTransport): Pr
   const clock = () => new Date();
   const [claimed] = claimMail(clock(), 1, mailId);
   if (!claimed) return 'not due';
-  return (await deliverOne(claimed, transport ?? smtpTransport(environment().SMTP_URL), clock)).state;
+  return (await deliverOne(claimed, transport ?? smtpTransport(environment().SMTP_URL), clock, writeTogether().write)).state;
 }
 
-async function deliverOne(claimed: ClaimedMail, transport: MailTransport, clock: () => Date): Promise<Outcome> {
-  const later = (error: string, subject?: string): Outcome => ({ state: markRetry(claimed, error, clock(), Math.random(), subject) === 'queued' ? 'retried' : 'refused' });
+async function deliverOne(claimed: ClaimedMail, transport: MailTransport, clock: () => Date, write: Write, passes?: () => Promise<void>): Promise<Outcome> {
   const contents = contentsOf(claimed, clock());
-  if ('trouble' in contents) return later(contents.trouble);
+  if ('trouble' in contents) return later(claimed, write, contents.trouble, clock);
   if ('nothing' in contents) {
-    markCancelled(claimed, contents.nothing);
+    await write(() => void markCancelled(claimed, contents.nothing));
     return { state: 'cancelled' };
   }
-  const written = write(claimed.kind, contents.props);
+  const written = rendered(claimed.kind, contents.props);
   if ('fault' in written) {
-    markRefused(claimed, `It could not be written: ${written.fault}`);
+    await write(() => void markRefused(claimed, `It could not be written: ${written.fault}`));
     return { state: 'refused' };
   }
+  await passes?.();
+  if (!stillHeld(claimed)) return { state: 'cancelled' };
   try {
     const to = { name: '', address: contents.to };
     await transport.sendMail({ from: environment().MAIL_FROM, to, messageId: claimed.messageId, headers: { 'Auto-Submitted': 'auto-generated' }, ...written });
   } catch (error) {
-    const failure = failureOf(error);
-    if (failure.kind !== 'refused') return { ...later(failure.message, written.subject), noConnection: failure.kind === 'no connection' };
-    markRefused(claimed, failure.message, written.subject);
-    return { state: 'refused' };
+    return afterFailure(claimed, write, error, clock, written.subject);
   }
-  markSent(claimed, written.subject, clock());
+  await write(() => void markSent(claimed, written.subject, clock()));
   return { state: 'sent' };
+}
+
+async function later(claimed: ClaimedMail, write: Write, error: string, clock: () => Date, subject?: string): Promise<Outcome> {
+  let state: 'queued' | 'refused' = 'queued';
+  await write(() => void (state = markRetry(claimed, error, clock(), Math.random(), subject)));
+  return { state: state === 'queued' ? 'retried' : 'refused' };
+}
+
+async function afterFailure(claimed: ClaimedMail, write: Write, error: unknown, clock: () => Date, subject: string): Promise<Outcome> {
+  const { kind, message } = failureOf(error);
+  if (kind === 'later') return later(claimed, write, message, clock, subject);
+  if (kind === 'dropped') return { ...(await later(claimed, write, message, clock, subject)), dropped: true };
+  if (kind === 'server') {
+    await write(() => void markHeldUp(claimed, message, clock(), Math.random(), subject));
+    return { state: 'heldUp' };
+  }
+  await write(() => void markRefused(claimed, message, subject));
+  return { state: 'refused' };
 }
 
 type Contents = { to: string; props: unknown } | { nothing: string } | { trouble: string };
 
 /** What the mail is written from; for a reminder, the plan as it stands at this moment. */
 function contentsOf(claimed: ClaimedMail, now: Date): Contents {
+  if (hasRunOut(claimed.props, claimed.createdAt, now)) return { nothing: 'Its link had run out before it could be sent.' };
+  if (!isAwaited(claimed.kind) && isAddressBounced(claimed.toAddress)) return { nothing: 'Mail to this address comes back.' };
   if (claimed.kind !== 'reminder') return { to: claimed.toAddress, props: claimed.props };
   try {
     return reminderPropsOf(claimed, environment().NEXTAUTH_URL, now);
@@ -81,7 +123,7 @@ function contentsOf(claimed: ClaimedMail, now: Date): Contents {
 }
 
 /** A fault in one mail must not hold up the others. */
-function write(kind: string, props: unknown): Rendered | { fault: string } {
+function rendered(kind: string, props: unknown): Rendered | { fault: string } {
   try {
     return renderMail(kind, props);
   } catch (error) {
@@ -94,7 +136,7 @@ const messageOf = (error: unknown) => (error instanceof Error ? error.message : 
 async function main() {
   environment();
   const counts = await deliverDue(new Date());
-  console.log(`Mail: ${counts.sent} sent, ${counts.retried} to try again, ${counts.refused} refused, ${counts.cancelled} cancelled.`);
+  console.log(`Mail: ${counts.sent} sent, ${counts.retried} to try again, ${counts.refused} refused, ${counts.cancelled} cancelled, ${counts.heldUp} held up by the mail server.`);
   closeDatabase();
 }
 

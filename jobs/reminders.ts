@@ -16,7 +16,7 @@ export type ReminderRun = { replanned: number; homes: number; items: number; del
  */
 export async function runReminders(now: Date, options: { deliver?: boolean; transport?: MailTransport } = {}): Promise<ReminderRun> {
   const runId = startJobRun('reminders', now);
-  const outcome: ReminderRun = { replanned: 0, homes: 0, items: 0, deliveries: 0, mails: 0, sent: 0, retried: 0, refused: 0, cancelled: 0 };
+  const outcome: ReminderRun = { replanned: 0, homes: 0, items: 0, deliveries: 0, mails: 0, sent: 0, retried: 0, refused: 0, cancelled: 0, heldUp: 0 };
   const faults: unknown[] = [];
   const attempt = async (part: () => Promise<void> | void) => {
     try {
@@ -50,7 +50,7 @@ const messageOf = (error: unknown) => (error instanceof Error ? error.message : 
 /** The counts in one line. */
 export const inWords = (run: ReminderRun): string =>
   `Reminders: ${run.replanned} homes planned anew, ${run.items} pieces of work due at ${run.homes} homes, ${run.mails} mails queued. ` +
-  `Mail: ${run.sent} sent, ${run.retried} to try again, ${run.refused} refused, ${run.cancelled} cancelled.`;
+  `Mail: ${run.sent} sent, ${run.retried} to try again, ${run.refused} refused, ${run.cancelled} cancelled, ${run.heldUp} held up by the mail server.`;
 
 async function main() {
   environment();

@@ -15,7 +15,8 @@ export async function runSchedule(schedule: Schedule, until: AbortSignal): Promi
   let lastReminders = Number.NEGATIVE_INFINITY;
   while (!until.aborted) {
     const at = schedule.now().getTime();
-    if (at - lastReminders >= remindEveryMs) {
+    // A clock that was set back must not put the reminders off.
+    if (at < lastReminders || at - lastReminders >= remindEveryMs) {
       lastReminders = at;
       await schedule.remind().catch((error: unknown) => complain('reminders', error));
     } else {

@@ -1,6 +1,6 @@
-import { and, asc, eq, lte, or, sql } from 'drizzle-orm';
-import { backOffMs, mostAttempts } from '@/lib/mail/back-off';
-import { checkQueuedProps, isSecret, type MailKind, type QueuedProps } from '@/lib/mail/registry';
+import { and, asc, desc, eq, inArray, lte, or, sql } from 'drizzle-orm';
+import { backOffMs, mostAttempts, outageWaitMs } from '@/lib/mail/back-off';
+import { awaitedKinds, checkQueuedProps, isSecret, type MailKind, type QueuedProps } from '@/lib/mail/registry';
 import { database, transaction } from '../client';
 import { mail } from '../schema';
 
@@ -16,7 +16,7 @@ type NewMail<K extends MailKind> = {
   now?: Date;
 };
 
-/** A claim that was never finished (the process died) is free again after this time. Longer than any attempt takes. */
+/** A claim that was never finished (the process died) is free again after this time. Whoever lives renews its claims well before. */
 export const leaseMs = 5 * 60_000;
 
 const mailHost = () => {
@@ -46,37 +46,65 @@ export type ClaimedMail = MailRow & { leaseToken: string };
 const open = (now: Date) =>
   and(
     sql`${mail.state} in ('queued', 'sending')`,
-    or(and(eq(mail.state, 'queued'), lte(mail.nextAttemptAt, now)), and(eq(mail.state, 'sending'), lte(mail.leaseUntil, now))),
+    lte(mail.nextAttemptAt, now),
+    or(eq(mail.state, 'queued'), and(eq(mail.state, 'sending'), lte(mail.leaseUntil, now))),
   );
 
+const awaitedFirst = desc(inArray(mail.kind, [...awaitedKinds]));
+
+/** The mails that are due: links that somebody waits for first, then oldest first. */
+export const dueMails = (now: Date, limit: number, id?: string) =>
+  database()
+    .select({ id: mail.id })
+    .from(mail)
+    .where(id ? and(open(now), eq(mail.id, id)) : open(now))
+    .orderBy(awaitedFirst, asc(mail.nextAttemptAt), asc(mail.createdAt))
+    .limit(limit);
+
 /**
- * Takes up to `limit` mails that are due, oldest first, for this caller alone: one immediate transaction, so that two
- * processes never hold the same mail. `id` asks for one mail only.
+ * Takes up to `limit` mails that are due for this caller alone: one statement in one immediate transaction, so that two
+ * processes never hold the same mail. `id` asks for one mail only. `attempts` of what is returned counts the try to come;
+ * the row counts a try only when it has an answer, so that a process that is killed uses up none.
  */
 export function claimMail(now: Date, limit: number, id?: string): ClaimedMail[] {
-  return transaction(() => {
-    const due = database()
-      .select()
-      .from(mail)
-      .where(id ? and(open(now), eq(mail.id, id)) : open(now))
-      .orderBy(asc(mail.nextAttemptAt))
-      .limit(limit)
-      .all();
+  const leaseToken = crypto.randomUUID();
+  const rows = transaction(() => {
+    const due = dueMails(now, limit, id).all().map((row) => row.id);
+    if (due.length === 0) return [];
     const leaseUntil = new Date(now.getTime() + leaseMs);
-    return due.map((row) => {
-      const claim = { state: 'sending' as const, attempts: row.attempts + 1, leaseToken: crypto.randomUUID(), leaseUntil };
-      database().update(mail).set(claim).where(eq(mail.id, row.id)).run();
-      return { ...row, ...claim };
-    });
+    const taken = database().update(mail).set({ state: 'sending', leaseToken, leaseUntil }).where(inArray(mail.id, due)).returning().all();
+    return taken.sort((a, b) => due.indexOf(a.id) - due.indexOf(b.id));
   });
+  return rows.map((row) => ({ ...row, attempts: row.attempts + 1, leaseToken }));
+}
+
+const heldBy = (leaseToken: string) => and(eq(mail.state, 'sending'), eq(mail.leaseToken, leaseToken));
+
+/** Whether this claim still counts: neither taken over nor withdrawn in the meantime. */
+export const stillHeld = (claimed: ClaimedMail): boolean =>
+  database().select({ id: mail.id }).from(mail).where(and(eq(mail.id, claimed.id), heldBy(claimed.leaseToken))).get() !== undefined;
+
+const withIds = (claimed: ClaimedMail[]) => inArray(mail.id, claimed.map((one) => one.id));
+const tokensOf = (claimed: ClaimedMail[]) => and(eq(mail.state, 'sending'), inArray(mail.leaseToken, [...new Set(claimed.map((one) => one.leaseToken))]));
+
+/** Holds claims for longer, so that a slow mail server does not let somebody else take the same mail. */
+export function renewLeases(claimed: ClaimedMail[], now: Date): void {
+  if (claimed.length === 0) return;
+  database().update(mail).set({ leaseUntil: new Date(now.getTime() + leaseMs) }).where(and(withIds(claimed), tokensOf(claimed))).run();
+}
+
+/** Puts claims back that were not tried. */
+export function releaseMail(claimed: ClaimedMail[]): void {
+  if (claimed.length === 0) return;
+  database().update(mail).set({ state: 'queued', leaseToken: null, leaseUntil: null }).where(and(withIds(claimed), tokensOf(claimed))).run();
 }
 
 /** Ends a claim; without effect (false) when the lease ran out and somebody else holds the mail now. */
 function finish(claimed: ClaimedMail, change: Partial<typeof mail.$inferInsert>): boolean {
   const done = database()
     .update(mail)
-    .set({ leaseToken: null, leaseUntil: null, ...change })
-    .where(and(eq(mail.id, claimed.id), eq(mail.state, 'sending'), eq(mail.leaseToken, claimed.leaseToken)))
+    .set({ leaseToken: null, leaseUntil: null, attempts: claimed.attempts, ...change })
+    .where(and(eq(mail.id, claimed.id), heldBy(claimed.leaseToken)))
     .run();
   return done.changes === 1;
 }
@@ -103,4 +131,10 @@ export function markRetry(claimed: ClaimedMail, error: string, now: Date, jitter
   const nextAttemptAt = new Date(now.getTime() + backOffMs(claimed.attempts, jitter));
   finish(claimed, { state: 'queued', nextAttemptAt, lastError: error, ...(subject ? { subject } : {}) });
   return 'queued';
+}
+
+/** The mail server as a whole is in trouble: later again, and the try is not counted. */
+export function markHeldUp(claimed: ClaimedMail, error: string, now: Date, jitter: number, subject?: string): boolean {
+  const nextAttemptAt = new Date(now.getTime() + outageWaitMs(now.getTime() - claimed.createdAt.getTime(), jitter));
+  return finish(claimed, { state: 'queued', attempts: claimed.attempts - 1, nextAttemptAt, lastError: error, ...(subject ? { subject } : {}) });
 }

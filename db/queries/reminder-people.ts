@@ -2,13 +2,14 @@ import { and, eq, inArray, isNotNull, isNull } from 'drizzle-orm';
 import { database } from '../client';
 import { home, homeMember, user } from '../schema';
 
-/** Who is reminded: owners, co-owners and caretakers with a confirmed address and reminders on, of homes in use. Joins home, home_member and user. */
+/** Who is reminded: owners, co-owners and caretakers with a confirmed address that mail reaches and reminders on, of homes in use. Joins home, home_member and user. */
 export const wantsReminders = () =>
   and(
     isNull(home.archivedAt),
     inArray(homeMember.membership, ['owner', 'co-owner', 'caretaker']),
     eq(user.remindersOn, true),
     isNotNull(user.emailVerified),
+    isNull(user.bouncedAt),
   );
 
 export type Recipient = { userId: string; email: string };

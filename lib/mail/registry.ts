@@ -24,6 +24,14 @@ type Definitions = typeof definitions;
 /** What the outbox keeps of a mail until it is sent. */
 export type QueuedProps<K extends MailKind> = z.input<NonNullable<Definitions[K]['queued']>>;
 
+/** Links that somebody has asked for and waits for: they go out before the rest, and also to an address that bounced. */
+export const awaitedKinds: readonly MailKind[] = ['verify', 'sign-in', 'reset', 'already-known'];
+export const isAwaited = (kind: string): boolean => (awaitedKinds as readonly string[]).includes(kind);
+
+/** Whether a link that works for some hours (`props.hours`) no longer works at `now`. */
+export const hasRunOut = (props: Record<string, unknown>, createdAt: Date, now: Date): boolean =>
+  typeof props.hours === 'number' && now.getTime() - createdAt.getTime() > props.hours * 3_600_000;
+
 const definitionOf = (kind: string): MailDefinition => {
   if (!(kind in definitions)) throw new TypeError(`no such mail: ${kind}`);
   return definitions[kind as MailKind] as unknown as MailDefinition;

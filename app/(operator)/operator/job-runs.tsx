@@ -11,6 +11,7 @@ const words: Record<string, string> = {
   retried: 'to try again',
   refused: 'refused',
   cancelled: 'not needed any more',
+  heldUp: 'held up by the mail server',
 };
 
 function outcomeOf(run: JobRun): string {

@@ -18,7 +18,7 @@ async function read(url: string): Promise<OutboxPage> {
   return (await response.json()) as OutboxPage;
 }
 
-const outcomes: Record<string, string> = { sent: 'was sent', retried: 'could not be sent yet and waits again', refused: 'was refused', cancelled: 'is not needed any more' };
+const outcomes: Record<string, string> = { sent: 'was sent', retried: 'could not be sent yet and waits again', refused: 'was refused', cancelled: 'is not needed any more', heldUp: 'waits: the mail server did not serve us' };
 
 async function retry(mail: OutboxMail): Promise<{ tone: 'done' | 'fault'; words: string }> {
   try {
