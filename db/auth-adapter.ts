@@ -1,6 +1,7 @@
 import { DrizzleAdapter } from '@auth/drizzle-adapter';
 import { eq, lt } from 'drizzle-orm';
 import { database, transaction } from './client';
+import { liftBounce } from './queries/bounces';
 import { account, session, user, verificationToken } from './schema';
 
 type AdapterOfTables = ReturnType<typeof DrizzleAdapter>;
@@ -22,6 +23,7 @@ function proveAddress({ id, emailVerified }: Proof) {
   return transaction(() => {
     const before = database().select().from(user).where(eq(user.id, id)).get();
     if (!before) throw new Error('the account does not exist');
+    if (emailVerified) liftBounce(id);
     if (!emailVerified || before.emailVerified) return before;
     return database().update(user).set({ emailVerified, passwordHash: null, sessionsValidFrom: emailVerified }).where(eq(user.id, id)).returning().get();
   });

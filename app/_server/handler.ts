@@ -8,14 +8,19 @@ import { logFault } from './log';
 import { fieldErrors, problem } from './problem';
 import { sameSecret } from './secret';
 
-type Access = HomeVerb | RoleVerb | 'anyone' | 'signed in' | 'cron';
+/** Calls by machines: each needs the bearer secret of its own variable, and fails closed. */
+const bearerSecrets = { cron: 'CRON_SECRET', bounces: 'BOUNCE_SECRET' } as const;
+type Machine = keyof typeof bearerSecrets;
+type Access = HomeVerb | RoleVerb | 'anyone' | 'signed in' | Machine;
 type Context = { params: Promise<Record<string, string>> };
 type Call<I> = { actor: Actor; input: I; params: Record<string, string>; request: Request };
 type Definition<S extends z.ZodType> = {
-  /** Role verbs are checked here; verbs on a home by the data layer's scope. 'cron' needs the bearer secret and fails closed. */
+  /** Role verbs are checked here; verbs on a home by the data layer's scope; calls by machines need their bearer secret. */
   verb: Access;
   /** Of the JSON body (POST) or the query string (GET). */
   schema?: S;
+  /** 'json or text': a body that is not sent as JSON reaches the schema as the text it is. */
+  reads?: 'json' | 'json or text';
   run: (call: Call<z.output<S>>) => unknown;
 };
 
@@ -27,7 +32,7 @@ export function defineHandler<S extends z.ZodType>(definition: Definition<S>) {
     try {
       const gate = await admit(request, definition.verb);
       if (gate instanceof Response) return gate;
-      const body = await readInput(request);
+      const body = await readInput(request, definition.reads);
       if (body instanceof Response) return body;
       const parsed = definition.schema?.safeParse(body);
       if (parsed && !parsed.success) {
@@ -48,23 +53,28 @@ export function defineHandler<S extends z.ZodType>(definition: Definition<S>) {
 
 async function admit(request: Request, verb: Access): Promise<Actor | Response> {
   if (verb === 'anyone') return nobody;
-  if (verb === 'cron') {
-    const secret = environment().CRON_SECRET;
-    const given = /^Bearer (.+)$/i.exec(request.headers.get('authorization') ?? '')?.[1];
-    if (!secret) return problem(503, 'Not set up', 'CRON_SECRET is not set, so nobody may start this.');
-    return given && sameSecret(given, secret) ? nobody : problem(401, 'Not authorized', 'A bearer secret is needed.');
-  }
+  if (isMachine(verb)) return admitMachine(request, bearerSecrets[verb]);
   const actor = await currentActor();
   if (!actor) return problem(401, 'Signed out', 'Sign in first.');
   if (isRoleVerb(verb) && !can(actor, verb)) return problem(403, 'Not allowed', 'Your account may not do this.');
   return actor;
 }
 
-async function readInput(request: Request): Promise<unknown> {
+const isMachine = (verb: Access): verb is Machine => verb in bearerSecrets;
+
+function admitMachine(request: Request, variable: (typeof bearerSecrets)[Machine]): Actor | Response {
+  const secret = environment()[variable];
+  const given = /^Bearer (.+)$/i.exec(request.headers.get('authorization') ?? '')?.[1];
+  if (!secret) return problem(503, 'Not set up', `${variable} is not set, so nobody may start this.`);
+  return given && sameSecret(given, secret) ? nobody : problem(401, 'Not authorized', 'A bearer secret is needed.');
+}
+
+async function readInput(request: Request, reads: 'json' | 'json or text' = 'json'): Promise<unknown> {
   if (request.method === 'GET' || request.method === 'HEAD') return Object.fromEntries(new URL(request.url).searchParams);
   const text = await request.text();
   if (text.length > largestBody) return problem(413, 'Too large', `At most ${largestBody} characters.`);
   if (text === '') return {};
+  if (reads === 'json or text' && !/\bjson\b/i.test(request.headers.get('content-type') ?? '')) return text;
   try {
     return JSON.parse(text) as unknown;
   } catch {

@@ -4,6 +4,7 @@ import { type Role, type UnitSystem } from '@/lib/schemas/vocabulary';
 import { database } from '../client';
 import { user } from '../schema';
 import { withdrawTokens } from './account-tokens';
+import { liftBounce } from './bounces';
 
 export type PersonRow = typeof user.$inferSelect;
 
@@ -32,8 +33,9 @@ export function registerPerson(person: NewPerson): PersonRow | null {
 /** Whether the person has shown that the address is theirs. */
 export const hasConfirmedAddress = (actor: Actor): boolean => Boolean(personById(actor.id)?.emailVerified);
 
-/** The address is the person's own. */
+/** The address is the person's own, and mail reaches it. */
 export function markVerified(userId: string, now: Date): void {
+  liftBounce(userId);
   database().update(user).set({ emailVerified: now }).where(and(eq(user.id, userId), isNull(user.emailVerified))).run();
 }
 
