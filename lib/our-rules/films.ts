@@ -9,7 +9,7 @@ export const filmRules = {
   },
   'rain under an eave': {
     text: 'Under a porch roof or a deck rain is kept off as under an eave of its depth; what is under it counts by its area. An eave half as deep as the wall is high leaves three tenths of the rain; a weather side takes a fifth more',
-    because: 'Driving rain reaches the lower courses under any eave. Measured shares differ widely with wind; these are round figures in their middle.',
+    because: 'Driving rain reaches the lower courses under any eave. How much is kept off differs widely with wind; these are round guesses, no source.',
     where: ['lib/coat/severity.ts'],
   },
   'unknown wood': {
@@ -19,8 +19,8 @@ export const filmRules = {
   },
   learning: {
     text: 'The wall’s own factor: a normal-normal update of its logarithm, from 1 with a deviation of 0.25, by each earlier film that was looked at; within 0.5 to 2. Due counts at its age with 0.15, past due at 0.85 and sound beyond its time at 1.15 of it with 0.25',
-    because: 'Walls of one house stray from any model by about a quarter. One look says more when the coat is just due than when it is long past or still sound; a coat that was seen often still teaches once.',
-    where: ['lib/coat/learning.ts', 'lib/care/learned-words.ts'],
+    because: 'That walls stray from the model by about a quarter is a guess until enough of them have been seen. One look says more when the coat is just due than when it is long past or still sound; a coat that was seen often still teaches once.',
+    where: ['lib/coat/learning.ts', 'lib/care/learned-words.ts', 'components/home/learned-course.tsx'],
   },
   'assumed age': {
     text: 'Age of a film that nobody knows, from how it was found: due, its whole life; past due, more; sound, half of it',
@@ -43,7 +43,7 @@ export const filmRules = {
     where: ['lib/care/stripping.ts', 'lib/care/trip-rules.ts', 'lib/care/deferral-choices.ts'],
   },
   'one change': {
-    text: 'A change to a wall is judged one at a time; the wall’s own factor stays, a restain costs the same whatever the finish, and what the change itself costs is not counted',
+    text: 'A change to a wall is judged one at a time, an eave 1 or 2 ft (30 or 60 cm) deeper; the wall’s own factor stays, a restain costs the same whatever the finish, and what the change itself costs is not counted',
     because: 'Carpentry, stripping and a change of finish are priced by whoever does them; only what follows from the wall can be reckoned here.',
     where: ['lib/home/what-if.ts', 'lib/home/what-if-words.ts'],
   },

@@ -4,17 +4,17 @@ import { type OurRules } from './rule';
 export const pageRules = {
   'dry before': {
     text: 'A day without rain before the work, so that the wood is dry',
-    because: 'The Wood Handbook asks for dry wood without a figure for rain; a day is what labels usually say.',
+    because: 'The Wood Handbook asks for dry wood without a figure for rain; a day is what labels usually say, from memory.',
     where: ['lib/day/limits.ts'],
   },
   'dry after': {
     text: 'A day without rain after the work; within 4 hours fresh work is spoiled',
-    because: 'Labels say from four hours to a day until a coat takes rain.',
+    because: 'Labels usually say from four hours to a day until a coat takes rain; from memory.',
     where: ['lib/day/limits.ts'],
   },
   'stain in heat': {
     text: 'Stain dries too fast to keep a wet edge above 90 °F (32 °C)',
-    because: 'The Wood Handbook warns of hot surfaces without a figure; many labels stop at 90 °F.',
+    because: 'The Wood Handbook warns of hot surfaces without a figure; many labels stop at 90 °F, from memory.',
     where: ['lib/day/limits.ts'],
   },
   'oil at night': {
@@ -34,7 +34,7 @@ export const pageRules = {
   },
   'cool morning': {
     text: 'A morning up to 9 °F (5 °C) under the limit may still warm up to it: wait',
-    because: 'That much a clear forenoon gives nearly everywhere.',
+    because: 'A guess at what a clear forenoon gives; nothing published was found.',
     where: ['lib/day/limits.ts'],
   },
   'shade order': {

@@ -54,7 +54,22 @@ export const planRules = {
   },
   'mail tries': {
     text: 'A mail that could not be sent is tried again after a minute, then twice as long each time, at most six hours apart, for about three days',
-    because: 'Mail servers ask for patience; three days is as long as most keep trying themselves.',
+    because: 'Mail servers ask for patience; about three days is how long they usually keep trying themselves, from memory.',
     where: ['lib/mail/back-off.ts'],
+  },
+  bounces: {
+    text: 'Five passing bounces of an address within 14 days count as one for good; a full mailbox and trouble on the way count as passing even where the server says otherwise',
+    because: 'RFC 3463 and RFC 3464 say what is permanent and what is not; how long to believe a mailbox that is always full they leave open.',
+    where: ['lib/mail/bounce-rules.ts', 'lib/mail/delivery-status.ts'],
+  },
+  limits: {
+    text: 'How often a sign-in or an account mail may be tried, and how many hours a mailed link works',
+    because: 'Enough for a person with cold fingers, too little for guessing.',
+    where: ['app/_server/attempts.ts', 'db/queries/account-tokens.ts'],
+  },
+  'usual coat': {
+    text: 'A new wall starts as most log-look siding is: oil semitransparent stain on smooth wood, acrylic latex in the joints',
+    because: 'A start that the owner corrects; nobody counted.',
+    where: ['components/home/coat-fields.tsx'],
   },
 } satisfies OurRules;

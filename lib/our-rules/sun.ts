@@ -14,7 +14,7 @@ export const sunRules = {
   },
   leaves: {
     text: 'Trees carry leaves in months with a mean of at least 50 °F (10 °C)',
-    because: 'Broadleaved trees leaf out at about that mean; the calendar would be wrong in Florida and in Maine.',
+    because: 'Broadleaved trees leaf out at about that mean, from memory; the calendar would be wrong in Florida and in Maine.',
     where: ['lib/sun/leaf-months.ts'],
   },
   cover: {
@@ -23,8 +23,8 @@ export const sunRules = {
     where: ['lib/sun/strips.ts', 'lib/home/explained.ts'],
   },
   snow: {
-    text: 'Snow on the ground: none in months with a mean of 32 °F (0 °C) or more, all of it at 21 °F (−6 °C) or less, in a straight line between; that snow reflects 60 % of the light is from memory',
-    because: 'Stations tell the temperature, not how much snow lies. Ground under a mean of 21 °F is white nearly all month in most places.',
+    text: 'Snow on the ground: none in months with a mean of 32 °F (0 °C) or more, all of it at 21 °F (−6 °C) or less, in a straight line between; that bare ground reflects 20 % of the light and snow 60 % is from memory',
+    because: 'Stations tell the temperature, not how much snow lies. Where the mean is 21 °F or less we take the ground to be white; a guess.',
     where: ['lib/climate/snow.ts', 'lib/home/explained.ts'],
   },
   station: {
