@@ -1,7 +1,7 @@
 import { claimMail, type ClaimedMail, leaseMs, releaseMail, renewLeases } from '@/db/queries/mail';
 
 /** Mails taken from the outbox at one time. */
-const bite = 20;
+const bite = 100;
 
 /** What one run holds of the outbox: takes some at a time, at most `most` in all, renews what it holds, and gives back what it did not try. */
 export function holdClaims(clock: () => Date, most: number) {

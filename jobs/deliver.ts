@@ -1,6 +1,5 @@
 import { closeDatabase } from '@/db/client';
-import { isAddressBounced } from '@/db/queries/bounced-address';
-import { claimMail, type ClaimedMail, markCancelled, markHeldUp, markRefused, markRetry, markSent, stillHeld } from '@/db/queries/mail';
+import { claimMail, type ClaimedMail, markCancelled, markHeldUp, markRefused, markRetry, markSent, stateOfClaim } from '@/db/queries/mail';
 import { pullInFarTimes } from '@/db/queries/mail-clock';
 import { reminderPropsOf } from '@/db/queries/reminder-props';
 import { type Rendered } from '@/lib/mail/letter';
@@ -9,12 +8,14 @@ import { holdClaims } from './claims';
 import { environment } from './environment';
 import { pace } from './pace';
 import { connections, failureOf, type MailTransport, smtpPool, smtpTransport } from './transport';
-import { writeTogether } from './write-together';
+import { type Book, writeTogether } from './write-together';
 
 /** What became of the mails of a run. `heldUp`: the mail server as a whole was in trouble; they wait and lose nothing. */
 export type DeliveryCounts = { sent: number; retried: number; refused: number; cancelled: number; heldUp: number };
 type Outcome = { state: keyof DeliveryCounts; dropped?: boolean };
-type Write = (work: () => void) => Promise<void>;
+
+/** Mails under way at one time: while some are with the mail server, the next are being written. */
+const atOnce = 2 * connections;
 
 /** After so many cut lines in succession the mail server is taken to be in trouble. */
 const mostCuts = 3;
@@ -35,15 +36,15 @@ export async function deliverDue(now: Date, transport?: MailTransport): Promise<
   pullInFarTimes(now);
   const claims = holdClaims(clock, environment().MAIL_PER_RUN);
   const passes = pace(environment().MAIL_PER_SECOND);
-  const { write, isStuck } = writeTogether();
+  const book = writeTogether();
   let way = transport;
   let cuts = 0;
   const worker = async () => {
-    while (counts.heldUp === 0 && cuts < mostCuts && !isStuck()) {
+    while (counts.heldUp === 0 && cuts < mostCuts && !book.isStuck()) {
       const one = claims.next();
       if (!one) return;
       try {
-        const { state, dropped } = await deliverOne(one, (way ??= smtpPool(environment().SMTP_URL)), clock, write, passes);
+        const { state, dropped } = await deliverOne(one, (way ??= smtpPool(environment().SMTP_URL)), clock, book, passes);
         counts[state] += 1;
         cuts = dropped ? cuts + 1 : 0;
       } finally {
@@ -51,9 +52,10 @@ export async function deliverDue(now: Date, transport?: MailTransport): Promise<
       }
     }
   };
-  const ends = await Promise.allSettled(Array.from({ length: connections }, worker));
+  const ends = await Promise.allSettled(Array.from({ length: atOnce }, worker));
   if (!transport) way?.close?.();
   claims.end();
+  await book.settled();
   for (const end of ends) if (end.status === 'rejected') throw end.reason;
   return counts;
 }
@@ -63,48 +65,52 @@ export async function deliverMail(mailId: string, transport?: MailTransport): Pr
   const clock = () => new Date();
   const [claimed] = claimMail(clock(), 1, mailId);
   if (!claimed) return 'not due';
-  return (await deliverOne(claimed, transport ?? smtpTransport(environment().SMTP_URL), clock, writeTogether().write)).state;
+  const book = writeTogether();
+  const { state } = await deliverOne(claimed, transport ?? smtpTransport(environment().SMTP_URL), clock, book);
+  await book.settled();
+  return state;
 }
 
-async function deliverOne(claimed: ClaimedMail, transport: MailTransport, clock: () => Date, write: Write, passes?: () => Promise<void>): Promise<Outcome> {
-  const contents = contentsOf(claimed, clock());
-  if ('trouble' in contents) return later(claimed, write, contents.trouble, clock);
+async function deliverOne(claimed: ClaimedMail, transport: MailTransport, clock: () => Date, book: Book, passes?: () => Promise<void>): Promise<Outcome> {
+  await passes?.();
+  const state = stateOfClaim(claimed);
+  if (state === 'lost') return { state: 'cancelled' };
+  const contents: Contents = state === 'bounced' && !isAwaited(claimed.kind) ? { nothing: 'Mail to this address comes back.' } : contentsOf(claimed, clock());
+  if ('trouble' in contents) return later(claimed, book, contents.trouble, clock);
   if ('nothing' in contents) {
-    await write(() => void markCancelled(claimed, contents.nothing));
+    await book.write(() => void markCancelled(claimed, contents.nothing));
     return { state: 'cancelled' };
   }
   const written = rendered(claimed.kind, contents.props);
   if ('fault' in written) {
-    await write(() => void markRefused(claimed, `It could not be written: ${written.fault}`));
+    await book.write(() => void markRefused(claimed, `It could not be written: ${written.fault}`));
     return { state: 'refused' };
   }
-  await passes?.();
-  if (!stillHeld(claimed)) return { state: 'cancelled' };
   try {
     const to = { name: '', address: contents.to };
     await transport.sendMail({ from: environment().MAIL_FROM, to, messageId: claimed.messageId, headers: { 'Auto-Submitted': 'auto-generated' }, ...written });
   } catch (error) {
-    return afterFailure(claimed, write, error, clock, written.subject);
+    return afterFailure(claimed, book, error, clock, written.subject);
   }
-  await write(() => void markSent(claimed, written.subject, clock()));
+  await book.note(() => void markSent(claimed, written.subject, clock()));
   return { state: 'sent' };
 }
 
-async function later(claimed: ClaimedMail, write: Write, error: string, clock: () => Date, subject?: string): Promise<Outcome> {
+async function later(claimed: ClaimedMail, book: Book, error: string, clock: () => Date, subject?: string): Promise<Outcome> {
   let state: 'queued' | 'refused' = 'queued';
-  await write(() => void (state = markRetry(claimed, error, clock(), Math.random(), subject)));
+  await book.write(() => void (state = markRetry(claimed, error, clock(), Math.random(), subject)));
   return { state: state === 'queued' ? 'retried' : 'refused' };
 }
 
-async function afterFailure(claimed: ClaimedMail, write: Write, error: unknown, clock: () => Date, subject: string): Promise<Outcome> {
+async function afterFailure(claimed: ClaimedMail, book: Book, error: unknown, clock: () => Date, subject: string): Promise<Outcome> {
   const { kind, message } = failureOf(error);
-  if (kind === 'later') return later(claimed, write, message, clock, subject);
-  if (kind === 'dropped') return { ...(await later(claimed, write, message, clock, subject)), dropped: true };
+  if (kind === 'later') return later(claimed, book, message, clock, subject);
+  if (kind === 'dropped') return { ...(await later(claimed, book, message, clock, subject)), dropped: true };
   if (kind === 'server') {
-    await write(() => void markHeldUp(claimed, message, clock(), Math.random(), subject));
+    await book.write(() => void markHeldUp(claimed, message, clock(), Math.random(), subject));
     return { state: 'heldUp' };
   }
-  await write(() => void markRefused(claimed, message, subject));
+  await book.write(() => void markRefused(claimed, message, subject));
   return { state: 'refused' };
 }
 
@@ -113,7 +119,6 @@ type Contents = { to: string; props: unknown } | { nothing: string } | { trouble
 /** What the mail is written from; for a reminder, the plan as it stands at this moment. */
 function contentsOf(claimed: ClaimedMail, now: Date): Contents {
   if (hasRunOut(claimed.props, claimed.createdAt, now)) return { nothing: 'Its link had run out before it could be sent.' };
-  if (!isAwaited(claimed.kind) && isAddressBounced(claimed.toAddress)) return { nothing: 'Mail to this address comes back.' };
   if (claimed.kind !== 'reminder') return { to: claimed.toAddress, props: claimed.props };
   try {
     return reminderPropsOf(claimed, environment().NEXTAUTH_URL, now);

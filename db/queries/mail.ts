@@ -1,8 +1,8 @@
 import { and, asc, desc, eq, inArray, lte, or, sql } from 'drizzle-orm';
 import { backOffMs, mostAttempts, outageWaitMs } from '@/lib/mail/back-off';
 import { awaitedKinds, checkQueuedProps, isSecret, type MailKind, type QueuedProps } from '@/lib/mail/registry';
-import { database, transaction } from '../client';
-import { mail } from '../schema';
+import { database, type Database, transaction } from '../client';
+import { mail, user } from '../schema';
 
 export type MailRow = typeof mail.$inferSelect;
 
@@ -80,9 +80,29 @@ export function claimMail(now: Date, limit: number, id?: string): ClaimedMail[] 
 
 const heldBy = (leaseToken: string) => and(eq(mail.state, 'sending'), eq(mail.leaseToken, leaseToken));
 
-/** Whether this claim still counts: neither taken over nor withdrawn in the meantime. */
-export const stillHeld = (claimed: ClaimedMail): boolean =>
-  database().select({ id: mail.id }).from(mail).where(and(eq(mail.id, claimed.id), heldBy(claimed.leaseToken))).get() !== undefined;
+/** Whether this claim still counts (neither taken over nor withdrawn in the meantime), and whether mail to its address comes back. */
+export function stateOfClaim(claimed: ClaimedMail): 'held' | 'bounced' | 'lost' {
+  const row = prepared().state.get({ id: claimed.id, token: claimed.leaseToken, address: claimed.toAddress.trim().toLowerCase() });
+  return row ? (row.bouncedAt ? 'bounced' : 'held') : 'lost';
+}
+
+/** What is asked and said for every single mail, prepared once a connection. */
+const prepare = (db: Database) => {
+  const held = and(eq(mail.id, sql.placeholder('id')), eq(mail.state, 'sending'), eq(mail.leaseToken, sql.placeholder('token')));
+  const change = { state: 'sent' as const, lastError: null, leaseToken: null, leaseUntil: null, subject: sql`${sql.placeholder('subject')}`, attempts: sql`${sql.placeholder('attempts')}`, sentAt: sql`${sql.placeholder('sentAt')}` };
+  return {
+    state: db.select({ bouncedAt: user.bouncedAt }).from(mail).leftJoin(user, eq(user.email, sql.placeholder('address'))).where(held).prepare(),
+    sent: db.update(mail).set(change).where(held).prepare(),
+    sentSecret: db.update(mail).set({ ...change, props: {} }).where(held).prepare(),
+  };
+};
+const preparedOf = new WeakMap<Database, ReturnType<typeof prepare>>();
+function prepared(): ReturnType<typeof prepare> {
+  const db = database();
+  const known = preparedOf.get(db) ?? prepare(db);
+  preparedOf.set(db, known);
+  return known;
+}
 
 const withIds = (claimed: ClaimedMail[]) => inArray(mail.id, claimed.map((one) => one.id));
 const tokensOf = (claimed: ClaimedMail[]) => and(eq(mail.state, 'sending'), inArray(mail.leaseToken, [...new Set(claimed.map((one) => one.leaseToken))]));
@@ -111,8 +131,11 @@ function finish(claimed: ClaimedMail, change: Partial<typeof mail.$inferInsert>)
 
 const scrubbed = (claimed: ClaimedMail) => (isSecret(claimed.kind) ? { props: {} } : {});
 
-export const markSent = (claimed: ClaimedMail, subject: string, now: Date): boolean =>
-  finish(claimed, { state: 'sent', subject, sentAt: now, lastError: null, ...scrubbed(claimed) });
+export function markSent(claimed: ClaimedMail, subject: string, now: Date): boolean {
+  const { sent, sentSecret } = prepared();
+  const values = { id: claimed.id, token: claimed.leaseToken, subject, attempts: claimed.attempts, sentAt: now.getTime() };
+  return (isSecret(claimed.kind) ? sentSecret : sent).run(values).changes === 1;
+}
 
 /** Nobody will take this mail: the address was refused, or it could not be written. */
 export const markRefused = (claimed: ClaimedMail, error: string, subject?: string): boolean =>
