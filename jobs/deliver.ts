@@ -8,6 +8,7 @@ import { holdClaims } from './claims';
 import { environment } from './environment';
 import { pace } from './pace';
 import { connections, failureOf, type MailTransport, smtpPool, smtpTransport } from './transport';
+import { unsubscribeHeaders } from './unsubscribe';
 import { type Book, writeTogether } from './write-together';
 
 /** What became of the mails of a run. `heldUp`: the mail server as a whole was in trouble; they wait and lose nothing. */
@@ -88,7 +89,8 @@ async function deliverOne(claimed: ClaimedMail, transport: MailTransport, clock:
   }
   try {
     const to = { name: '', address: contents.to };
-    await transport.sendMail({ from: environment().MAIL_FROM, to, messageId: claimed.messageId, headers: { 'Auto-Submitted': 'auto-generated' }, ...written });
+    const headers = { 'Auto-Submitted': 'auto-generated', ...unsubscribeHeaders(claimed, environment().NEXTAUTH_URL) };
+    await transport.sendMail({ from: environment().MAIL_FROM, to, messageId: claimed.messageId, headers, ...written });
   } catch (error) {
     return afterFailure(claimed, book, error, clock, written.subject);
   }

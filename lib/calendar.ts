@@ -53,3 +53,6 @@ export const monthEnd = (year: number, month: number): CalendarDay => addDays(ad
 export function dayIn(timeZone: string, at: Date): CalendarDay {
   return new Intl.DateTimeFormat('en-CA', { timeZone, year: 'numeric', month: '2-digit', day: '2-digit' }).format(at);
 }
+
+/** The hour (0–23) on the clock at an instant in an IANA time zone. */
+export const hourIn = (timeZone: string, at: Date): number => Number(new Intl.DateTimeFormat('en-US', { timeZone, hour: '2-digit', hourCycle: 'h23' }).format(at));

@@ -2,7 +2,7 @@ import { and, eq, inArray, isNotNull, isNull } from 'drizzle-orm';
 import { database } from '../client';
 import { home, homeMember, user } from '../schema';
 
-/** Who is reminded: owners, co-owners and caretakers with a confirmed address that mail reaches and reminders on, of homes in use. Joins home, home_member and user. */
+/** Who is reminded: owners, co-owners and caretakers with a confirmed address that mail reaches and reminders on, of homes in use that they have not stopped reminders of. Joins home, home_member and user. */
 export const wantsReminders = () =>
   and(
     isNull(home.archivedAt),
@@ -10,6 +10,7 @@ export const wantsReminders = () =>
     eq(user.remindersOn, true),
     isNotNull(user.emailVerified),
     isNull(user.bouncedAt),
+    isNull(homeMember.remindersStoppedAt),
   );
 
 export type Recipient = { userId: string; email: string };

@@ -9,6 +9,7 @@ import { database } from '../client';
 import { delivery, home, homeMember, user, workItem } from '../schema';
 import { type MailRow } from './mail';
 import { wantsReminders } from './reminder-people';
+import { stoppedWork } from './reminder-stops';
 import { wallsOfHome } from './walls';
 
 type Of = Pick<MailRow, 'id' | 'userId' | 'homeId'>;
@@ -28,7 +29,7 @@ export function reminderPropsOf(mail: Of, site: string, now: Date): { to: string
     .where(and(eq(homeMember.homeId, homeId), eq(homeMember.userId, userId), wantsReminders()))
     .get();
   if (!who) return { nothing: 'The person no longer gets reminders for this home.' };
-  const items = standingItems(mail.id, site, homeId);
+  const items = standingItems(mail.id, site, homeId, stoppedWork(userId, homeId));
   const details = wallsOfHome(homeId);
   const concerned = details.filter(({ wall }) => items.some((item) => item.wallId === wall.id));
   if (concerned.length === 0) return { nothing: 'Everything in it was done or moved before it was sent.' };
@@ -52,8 +53,8 @@ export function reminderPropsOf(mail: Of, site: string, now: Date): { to: string
   return { to: who.to, props };
 }
 
-/** The mail's work that still stands: not logged since. Its date may have moved; the mail says the new one. */
-function standingItems(mailId: string, site: string, homeId: string): (ReminderItem & { wallId: string })[] {
+/** The mail's work that still stands: not logged since, and not stopped by the person. Its date may have moved; the mail says the new one. */
+function standingItems(mailId: string, site: string, homeId: string, stopped: Set<string>): (ReminderItem & { wallId: string })[] {
   const rows = database()
     .select({ stage: delivery.stage, key: delivery.workKey, item: workItem })
     .from(delivery)
@@ -62,7 +63,7 @@ function standingItems(mailId: string, site: string, homeId: string): (ReminderI
     .orderBy(workItem.dueOn, workItem.kind)
     .all();
   return rows
-    .filter(({ key, item }) => key === workKey(item))
+    .filter(({ key, item }) => key === workKey(item) && !stopped.has(key))
     .flatMap(({ stage, item: { wallId, kind, dueOn, opensOn, closesOn, because, basis } }) =>
       isReminderStage(stage) ? [{ wallId, kind, stage, dueOn, opensOn, closesOn, because, ownRule: basis === 'own rule', logUrl: logUrl(site, homeId, kind, wallId) }] : [],
     );

@@ -1,6 +1,6 @@
 import { createHash } from 'node:crypto';
 import { and, eq, inArray, lte } from 'drizzle-orm';
-import { type CalendarDay, dayIn } from '@/lib/calendar';
+import { type CalendarDay, dayIn, hourIn } from '@/lib/calendar';
 import { deliveryKey, nextStageDay, stageOn } from '@/lib/care/stages';
 import { workKey } from '@/lib/care/work-key';
 import { database, transaction } from '../client';
@@ -8,6 +8,7 @@ import { delivery, home, wall, workItem } from '../schema';
 import { toWorkItem } from './home-view';
 import { enqueueMail } from './mail';
 import { type Recipient, recipientsOf } from './reminder-people';
+import { stoppedWork } from './reminder-stops';
 
 export type ReminderCounts = { items: number; deliveries: number; mails: number };
 
@@ -22,14 +23,17 @@ export const itemsNearlyDue = (now: Date) =>
     .innerJoin(home, eq(home.id, workItem.homeId))
     .where(lte(workItem.remindOn, latestDay(now)));
 
-/** Homes where the day of a reminder has come, by their own calendar. The cost follows what is due, not how many homes there are. */
+/** Nobody is written to at night: from this hour on at the home. Our rule. */
+const morningHour = 7;
+
+/** Homes where the day of a reminder and its morning have come, by their own calendar and clock. The cost follows what is due, not how many homes there are. */
 export function homesToRemind(now: Date): { homeId: string; today: CalendarDay }[] {
   const due = new Map<string, CalendarDay>();
-  const days = new Map<string, CalendarDay>();
+  const days = new Map<string, CalendarDay | null>();
   for (const { homeId, remindOn, timeZone } of itemsNearlyDue(now).all()) {
-    const today = days.get(timeZone) ?? dayIn(timeZone, now);
-    days.set(timeZone, today);
-    if (remindOn !== null && remindOn <= today) due.set(homeId, today);
+    if (!days.has(timeZone)) days.set(timeZone, hourIn(timeZone, now) >= morningHour ? dayIn(timeZone, now) : null);
+    const today = days.get(timeZone);
+    if (today && remindOn !== null && remindOn <= today) due.set(homeId, today);
   }
   return [...due].map(([homeId, today]) => ({ homeId, today }));
 }
@@ -70,7 +74,8 @@ export function remindHome(homeId: string, today: CalendarDay, now: Date): Remin
 
 /** Returns how many deliveries are new. */
 function remindPerson(recipient: Recipient, homeId: string, items: ItemRow[], today: CalendarDay, now: Date): number {
-  const wanted = items.flatMap((item): Wanted[] => {
+  const stopped = stoppedWork(recipient.userId, homeId);
+  const wanted = items.filter((item) => !stopped.has(workKey(item))).flatMap((item): Wanted[] => {
     const reached = stageOn(toWorkItem(item), today);
     return reached ? [{ key: deliveryKey(toWorkItem(item), reached, recipient.userId), item, stage: reached.stage }] : [];
   });

@@ -15,3 +15,9 @@ export function logUrl(site: string, homeId: string, kind: WorkKind, wallId: str
 
 /** Where a person sees a home that was shared with them: contractors have pages of their own. */
 export const sharedUrl = (site: string, homeId: string, membership: Membership): string => new URL(membership === 'contractor' ? `/work/${homeId}` : `/homes/${homeId}`, site).href;
+
+/** Does one thing about one piece of work, without sign-in; `token` is signed. */
+export const doUrl = (site: string, token: string): string => new URL(`/do/${token}`, site).href;
+
+/** Where mail programs send the one click of RFC 8058; opened by hand it shows a page that asks first. */
+export const unsubscribeUrl = (site: string, token: string): string => new URL(`/api/mail/unsubscribe/${token}`, site).href;

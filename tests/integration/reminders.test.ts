@@ -205,32 +205,32 @@ describe('the day of a reminder', () => {
   const dueAt = (at: string) => homesToRemind(new Date(at)).length;
 
   it.each([
-    // Midnight at the home in UTC: Honolulu −10, Denver −6 (summer), New York −4 (summer); IANA time zone data.
-    ['Pacific/Honolulu', '2027-05-15T09:59:00Z', '2027-05-15T10:00:00Z'],
-    ['America/Denver', '2027-05-15T05:59:00Z', '2027-05-15T06:00:00Z'],
-    ['America/New_York', '2027-05-15T03:59:00Z', '2027-05-15T04:00:00Z'],
+    // Seven in the morning at the home in UTC: Honolulu −10, Denver −6 (summer), New York −4 (summer); IANA time zone data.
+    ['Pacific/Honolulu', '2027-05-15T16:59:00Z', '2027-05-15T17:00:00Z'],
+    ['America/Denver', '2027-05-15T12:59:00Z', '2027-05-15T13:00:00Z'],
+    ['America/New_York', '2027-05-15T10:59:00Z', '2027-05-15T11:00:00Z'],
     // East of Greenwich the day begins on the UTC day before: Guam +10.
-    ['Pacific/Guam', '2027-05-14T13:59:00Z', '2027-05-14T14:00:00Z'],
-  ])('begins at midnight in %s', (timeZone, before, from) => {
+    ['Pacific/Guam', '2027-05-14T20:59:00Z', '2027-05-14T21:00:00Z'],
+  ])('begins at seven in the morning in %s', (timeZone, before, from) => {
     springHome({ timeZone });
     expect([dueAt(before), dueAt(from)]).toEqual([0, 1]);
   });
 
-  it('begins at midnight also on the days the clocks change and at the end of a month', () => {
+  it('begins at seven also on the days the clocks change and at the end of a month', () => {
     const { items } = springHome({ timeZone: 'America/New_York' });
     const dueOn = (day: string) => database().update(workItem).set({ remindOn: day }).run();
     expect(items).toHaveLength(2);
-    // Clocks go forward on March 14, 2027 (standard time −5 at that midnight) and back on November 7, 2027 (summer time −4).
+    // Clocks go forward on March 14, 2027 (summer time −4 from 2:00) and back on November 7, 2027 (standard time −5).
     dueOn('2027-03-14');
-    expect([dueAt('2027-03-14T04:59:00Z'), dueAt('2027-03-14T05:00:00Z')]).toEqual([0, 1]);
+    expect([dueAt('2027-03-14T10:59:00Z'), dueAt('2027-03-14T11:00:00Z')]).toEqual([0, 1]);
     dueOn('2027-11-07');
-    expect([dueAt('2027-11-07T03:59:00Z'), dueAt('2027-11-07T04:00:00Z')]).toEqual([0, 1]);
+    expect([dueAt('2027-11-07T11:59:00Z'), dueAt('2027-11-07T12:00:00Z')]).toEqual([0, 1]);
     dueOn('2028-02-29');
-    expect([dueAt('2028-02-29T04:59:00Z'), dueAt('2028-02-29T05:00:00Z')]).toEqual([0, 1]);
+    expect([dueAt('2028-02-29T11:59:00Z'), dueAt('2028-02-29T12:00:00Z')]).toEqual([0, 1]);
     dueOn('2028-03-01');
-    expect([dueAt('2028-02-29T12:00:00Z'), dueAt('2028-03-01T04:59:00Z'), dueAt('2028-03-01T05:00:00Z')]).toEqual([0, 0, 1]);
+    expect([dueAt('2028-02-29T12:00:00Z'), dueAt('2028-03-01T11:59:00Z'), dueAt('2028-03-01T12:00:00Z')]).toEqual([0, 0, 1]);
     dueOn('2027-12-31');
-    expect([dueAt('2027-12-31T04:59:00Z'), dueAt('2027-12-31T05:00:00Z')]).toEqual([0, 1]);
+    expect([dueAt('2027-12-31T11:59:00Z'), dueAt('2027-12-31T12:00:00Z')]).toEqual([0, 1]);
   });
 
   it('that was missed is caught up with', async () => {
@@ -249,7 +249,7 @@ describe('the day of a reminder', () => {
   it('comes for a home only by its own calendar when two homes share the run', () => {
     const east = springHome({ timeZone: 'America/New_York' });
     springHome({ timeZone: 'Pacific/Honolulu' });
-    const due = homesToRemind(new Date('2027-05-15T05:00:00Z'));
+    const due = homesToRemind(new Date('2027-05-15T12:00:00Z'));
     expect(due).toEqual([{ homeId: east.place.id, today: '2027-05-15' }]);
     expect(remindHome(east.place.id, '2027-05-15', now)).toEqual({ items: 2, deliveries: 2, mails: 1 });
   });
