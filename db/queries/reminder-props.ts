@@ -3,11 +3,14 @@ import { dayIn } from '@/lib/calendar';
 import { workKey } from '@/lib/care/work-key';
 import { type ReminderItem, type ReminderProps } from '@/lib/mail/kinds/reminder';
 import { isReminderStage } from '@/lib/mail/kinds/reminder-stages';
-import { logUrl, planUrl, accountUrl } from '@/lib/mail/links';
+import { accountUrl, doUrl, planUrl } from '@/lib/mail/links';
+import { can } from '@/lib/permissions';
+import { type Membership } from '@/lib/schemas/vocabulary';
 import { wallAreaM2 } from '@/lib/takeoff';
 import { database } from '../client';
 import { delivery, home, homeMember, user, workItem } from '../schema';
 import { type MailRow } from './mail';
+import { linkDays, type MailAction, signLink } from './mail-links';
 import { wantsReminders } from './reminder-people';
 import { stoppedWork } from './reminder-stops';
 import { wallsOfHome } from './walls';
@@ -29,7 +32,7 @@ export function reminderPropsOf(mail: Of, site: string, now: Date): { to: string
     .where(and(eq(homeMember.homeId, homeId), eq(homeMember.userId, userId), wantsReminders()))
     .get();
   if (!who) return { nothing: 'The person no longer gets reminders for this home.' };
-  const items = standingItems(mail.id, site, homeId, stoppedWork(userId, homeId));
+  const items = standingItems(mail.id, stoppedWork(userId, homeId), linksFor(site, { userId, homeId, membership: who.membership }, now));
   const details = wallsOfHome(homeId);
   const concerned = details.filter(({ wall }) => items.some((item) => item.wallId === wall.id));
   if (concerned.length === 0) return { nothing: 'Everything in it was done or moved before it was sent.' };
@@ -54,7 +57,7 @@ export function reminderPropsOf(mail: Of, site: string, now: Date): { to: string
 }
 
 /** The mail's work that still stands: not logged since, and not stopped by the person. Its date may have moved; the mail says the new one. */
-function standingItems(mailId: string, site: string, homeId: string, stopped: Set<string>): (ReminderItem & { wallId: string })[] {
+function standingItems(mailId: string, stopped: Set<string>, links: (key: string) => Links): (ReminderItem & { wallId: string })[] {
   const rows = database()
     .select({ stage: delivery.stage, key: delivery.workKey, item: workItem })
     .from(delivery)
@@ -64,7 +67,19 @@ function standingItems(mailId: string, site: string, homeId: string, stopped: Se
     .all();
   return rows
     .filter(({ key, item }) => key === workKey(item) && !stopped.has(key))
-    .flatMap(({ stage, item: { wallId, kind, dueOn, opensOn, closesOn, because, basis } }) =>
-      isReminderStage(stage) ? [{ wallId, kind, stage, dueOn, opensOn, closesOn, because, ownRule: basis === 'own rule', logUrl: logUrl(site, homeId, kind, wallId) }] : [],
+    .flatMap(({ stage, key, item: { wallId, kind, dueOn, opensOn, closesOn, because, basis } }) =>
+      isReminderStage(stage) ? [{ wallId, kind, stage, dueOn, opensOn, closesOn, because, ownRule: basis === 'own rule', ...links(key) }] : [],
     );
+}
+
+type Links = Pick<ReminderItem, 'logUrl' | 'putOffUrl' | 'stopUrl'>;
+
+/** The links of one piece of work, signed for one person; putting off only for whoever may. */
+function linksFor(site: string, { userId, homeId, membership }: { userId: string; homeId: string; membership: Membership }, now: Date): (key: string) => Links {
+  const expiresAt = new Date(now.getTime() + linkDays * 86_400_000);
+  const mayPutOff = can({ id: userId, role: 'homeowner', email: '', name: null }, 'work.putOff', { membership });
+  return (key) => {
+    const url = (action: MailAction) => doUrl(site, signLink({ action, userId, homeId, workKey: key, expiresAt }));
+    return { logUrl: url('log'), putOffUrl: mayPutOff ? url('put off') : null, stopUrl: url('stop') };
+  };
 }

@@ -95,3 +95,7 @@ export function restoreRecord(actor: Actor, recordId: string): RecordRow {
   homeFor(actor, row.homeId, row.removedBy === actor.id ? 'work.log' : 'work.remove');
   return database().update(workRecord).set({ removedAt: null, removedBy: null }).where(eq(workRecord.id, recordId)).returning().get();
 }
+
+/** Whether the person's submission has made a record, taken back or not. */
+export const isLogged = (submissionKey: string, userId: string): boolean =>
+  database().select({ id: workRecord.id }).from(workRecord).where(and(eq(workRecord.submissionKey, submissionKey), eq(workRecord.createdBy, userId))).get() !== undefined;

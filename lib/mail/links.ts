@@ -1,17 +1,9 @@
-import { type Membership, type WorkKind } from '@/lib/schemas/vocabulary';
+import { type Membership } from '@/lib/schemas/vocabulary';
 
 /** Addresses that mails lead to. `site` is the public address of the application. */
 export const planUrl = (site: string, homeId: string): string => new URL(`/homes/${homeId}`, site).href;
 
 export const accountUrl = (site: string): string => new URL('/account', site).href;
-
-/** The form for logging work, with kind and wall filled in. */
-export function logUrl(site: string, homeId: string, kind: WorkKind, wallId: string): string {
-  const url = new URL(`/homes/${homeId}/log`, site);
-  url.searchParams.set('kind', kind);
-  url.searchParams.set('wall', wallId);
-  return url.href;
-}
 
 /** Where a person sees a home that was shared with them: contractors have pages of their own. */
 export const sharedUrl = (site: string, homeId: string, membership: Membership): string => new URL(membership === 'contractor' ? `/work/${homeId}` : `/homes/${homeId}`, site).href;

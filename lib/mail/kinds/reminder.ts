@@ -17,6 +17,9 @@ const item = z.object({
   ownRule: z.boolean(),
   because: z.string(),
   logUrl: z.url(),
+  /** Links that work without sign-in, for this piece of work only; null where the person may not put work off. */
+  putOffUrl: z.url().nullable(),
+  stopUrl: z.url(),
 });
 export type ReminderItem = z.output<typeof item>;
 
@@ -86,6 +89,8 @@ function itemParts(it: ReminderItem, today: CalendarDay): Part[] {
     { as: 'fact', label: filmEnds(it) ? 'Used up' : 'Due', text: `${exactDay(it.dueOn)}, ${fromToday(it.dueOn, today)}` },
     { as: 'fact', label: 'Why', text: it.because },
     { as: 'link', label: `Already done? Log this ${workKinds[it.kind].toLowerCase()}`, url: it.logUrl },
+    ...(it.putOffUrl ? [{ as: 'link', label: 'Put it off to its next season', url: it.putOffUrl } satisfies Part] : []),
+    { as: 'link', label: 'Stop reminding me of it', url: it.stopUrl },
   ];
 }
 

@@ -26,7 +26,9 @@ describe('a reminder', () => {
     const targets = [...page.querySelectorAll('a')].map((link) => link.href);
     expect(targets).toEqual([
       'https://eavewright.example/homes/h1',
-      'https://eavewright.example/homes/h1/log?kind=restain&wall=w3',
+      'https://eavewright.example/do/log',
+      'https://eavewright.example/do/put-off',
+      'https://eavewright.example/do/stop',
       'https://eavewright.example/account',
     ]);
     for (const target of targets) expect(text.split('\n')).toContain(target);
