@@ -1,9 +1,9 @@
-import { asc, count, eq, sql } from 'drizzle-orm';
+import { asc, eq, sql } from 'drizzle-orm';
 import { type Actor, type HomeVerb } from '@/lib/permissions';
 import { type Membership } from '@/lib/schemas/vocabulary';
 import { database, transaction } from '../client';
 import { demand, homeFor, memberOf } from '../scope';
-import { home, homeMember, wall, workItem } from '../schema';
+import { home, homeMember } from '../schema';
 
 export type HomeRow = typeof home.$inferSelect;
 type HomeFacts = Omit<typeof home.$inferInsert, 'id' | 'createdBy' | 'createdAt' | 'revision' | 'plannedAt' | 'replanOn' | 'archivedAt'>;
@@ -12,23 +12,13 @@ export type HomeSummary = { home: HomeRow; membership: Membership; nextOpensOn: 
 
 /** Every home the actor may see, by name, with the day its next work opens. */
 export function listHomes(actor: Actor): HomeSummary[] {
-  const next = database()
-    .select({ homeId: workItem.homeId, opensOn: sql<string>`min(${workItem.opensOn})`.as('next_opens_on') })
-    .from(workItem)
-    .groupBy(workItem.homeId)
-    .as('next');
-  const walls = database()
-    .select({ homeId: wall.homeId, walls: count().as('walls') })
-    .from(wall)
-    .where(sql`${wall.removedAt} is null`)
-    .groupBy(wall.homeId)
-    .as('walls_of');
+  // Asked home by home, so that the cost follows the actor's homes and not everybody's.
+  const nextOpensOn = sql<string | null>`(select min(opens_on) from work_item where work_item.home_id = home.id)`;
+  const wallCount = sql<number>`(select count(*) from wall where wall.home_id = home.id and wall.removed_at is null)`;
   return database()
-    .select({ home, membership: homeMember.membership, nextOpensOn: next.opensOn, wallCount: sql<number>`coalesce(${walls.walls}, 0)` })
-    .from(home)
-    .innerJoin(homeMember, eq(homeMember.homeId, home.id))
-    .leftJoin(next, eq(next.homeId, home.id))
-    .leftJoin(walls, eq(walls.homeId, home.id))
+    .select({ home, membership: homeMember.membership, nextOpensOn, wallCount })
+    .from(homeMember)
+    .innerJoin(home, eq(homeMember.homeId, home.id))
     .where(memberOf(actor))
     .orderBy(asc(home.name))
     .all();

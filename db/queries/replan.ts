@@ -47,13 +47,16 @@ function writePlan(row: HomeRow, { walls: plans, grouping }: HomePlan, today: Ca
   database().update(home).set({ plannedAt: now, replanOn: lapses[0] ?? null, grouping }).where(eq(home.id, row.id)).run();
 }
 
-/** Plans anew every home in whose plan something has lapsed by now; returns how many. A home that fails does not hold up the others; then throws. */
-export function replanLapsed(now: Date): number {
-  const latestDayAnywhere = dayIn('Etc/GMT-14', now);
-  const lapsed = database()
+/** Homes whose plan has lapsed at least somewhere on Earth; read from the index on replan_on. */
+export const nearlyLapsed = (now: Date) =>
+  database()
     .select({ id: home.id, timeZone: home.timeZone, replanOn: home.replanOn })
     .from(home)
-    .where(and(lte(home.replanOn, latestDayAnywhere), isNull(home.archivedAt)))
+    .where(and(lte(home.replanOn, dayIn('Etc/GMT-14', now)), isNull(home.archivedAt)));
+
+/** Plans anew every home in whose plan something has lapsed by now; returns how many. A home that fails does not hold up the others; then throws. */
+export function replanLapsed(now: Date): number {
+  const lapsed = nearlyLapsed(now)
     .all()
     .filter(({ timeZone, replanOn }) => replanOn !== null && replanOn <= dayIn(timeZone, now));
   const faults: unknown[] = [];

@@ -40,7 +40,7 @@ const copies: Record<string, Record<string, string>> = {
     opens_on: "'2027-05-15'",
     due_on: "'2027-06-10'",
     closes_on: "'2027-08-09'",
-    remind_on: `case when t.kind = 'restain' and n <= ${duePerDay * days.length} then date('${firstDay}', '+' || ((n - 1) / ${duePerDay}) || ' days') else '2031-05-15' end`,
+    remind_on: `case when t.kind = 'wash' and n <= ${duePerDay * days.length} then date('${firstDay}', '+' || ((n - 1) / ${duePerDay}) || ' days') else '2031-05-15' end`,
   },
 };
 
