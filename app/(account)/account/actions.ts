@@ -9,6 +9,7 @@ import { currentActor } from '@/app/_server/actor';
 import { currentSender, startMail, startTry, tryWorked, waitWords } from '@/app/_server/attempts';
 import { hashPassword, passwordMatches } from '@/app/_server/password';
 import { endSessions, personById, profileOf, setPassword, updateProfile } from '@/db/queries/people';
+import { resumeHome } from '@/db/queries/reminder-stops';
 import { passwordSchema, profileSchema } from '@/lib/schemas/account';
 
 export const saveProfile = defineAction({
@@ -64,4 +65,11 @@ export const sendVerifyAgain = defineAction({
   after: ({ person }) => {
     if (person && !person.emailVerified) sendVerifyLink(person);
   },
+});
+
+export const remindAgain = defineAction({
+  verb: 'signed in',
+  schema: z.object({ homeId: z.string().min(1).max(60) }),
+  run: (actor, { homeId }) => resumeHome(actor, homeId),
+  after: () => revalidatePath('/account'),
 });

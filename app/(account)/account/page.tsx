@@ -9,7 +9,8 @@ import { Field } from '@/components/ui/field';
 import { PageHead } from '@/components/ui/page-head';
 import { SubmitButton } from '@/components/ui/submit-button';
 import { profileOf } from '@/db/queries/people';
-import { changePassword, saveProfile, signOutEverywhere } from './actions';
+import { stoppedHomes } from '@/db/queries/reminder-stops';
+import { changePassword, remindAgain, saveProfile, signOutEverywhere } from './actions';
 
 export const metadata: Metadata = { title: 'Your account' };
 
@@ -21,6 +22,7 @@ const units = [
 export default async function AccountPage() {
   const actor = await requireActor();
   const profile = profileOf(actor);
+  const stopped = stoppedHomes(actor);
   return (
     <main id="main">
       <PageHead title="Your account" lead={profile.email} />
@@ -33,6 +35,16 @@ export default async function AccountPage() {
           <SubmitButton>Save</SubmitButton>
         </ActionForm>
       </Course>
+      {stopped.length > 0 ? (
+        <Course heading="Homes without reminders" aside="You stopped them">
+          {stopped.map((home) => (
+            <ActionForm key={home.id} action={remindAgain}>
+              <input type="hidden" name="homeId" value={home.id} />
+              <SubmitButton look="quiet">Remind me again of {home.name}</SubmitButton>
+            </ActionForm>
+          ))}
+        </Course>
+      ) : null}
       <Course heading={profile.hasPassword ? 'Change the password' : 'Set a password'} aside="You then sign in anew everywhere">
         <ActionForm action={changePassword}>
           {profile.hasPassword ? <Field label="Password of today" name="current" type="password" autoComplete="current-password" required /> : null}
