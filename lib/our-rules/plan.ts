@@ -48,9 +48,9 @@ export const planRules = {
     where: ['lib/care/rule-preview.ts', 'lib/care/rule-build.ts', 'lib/care/own-rule.ts', 'lib/schemas/own-rule.ts'],
   },
   reminders: {
-    text: 'When a reminder goes out: 120 days before to book, 28 days before to buy, on the opening day, and 14, 45 and 105 days after a chance has passed; after 400 days being overdue alone is no reason to write. Work is due soon 60 days ahead',
+    text: 'When a reminder goes out: 120 days before to book, 28 days before to buy, on the opening day, and 14, 45 and 105 days after a chance has passed; after 400 days being overdue alone is no reason to write. Nobody is written to before seven in the morning at the home. Work is due soon 60 days ahead',
     because: 'Crews fill up a season ahead, material takes weeks; growing gaps keep a reminder from becoming noise.',
-    where: ['lib/care/stages.ts', 'lib/care/state.ts'],
+    where: ['lib/care/stages.ts', 'lib/care/state.ts', 'db/queries/reminders.ts'],
   },
   'mail tries': {
     text: 'A mail that could not be sent is tried again after a minute, then twice as long each time, at most six hours apart, for about three days',
@@ -63,13 +63,18 @@ export const planRules = {
     where: ['lib/mail/bounce-rules.ts', 'lib/mail/delivery-status.ts'],
   },
   limits: {
-    text: 'How often a sign-in or an account mail may be tried, and how many hours a mailed link works',
+    text: 'How often a sign-in or an account mail may be tried, and how long a mailed link works',
     because: 'Enough for a person with cold fingers, too little for guessing.',
-    where: ['app/_server/attempts.ts', 'db/queries/account-tokens.ts'],
+    where: ['app/_server/attempts.ts', 'db/queries/account-tokens.ts', 'db/queries/mail-links.ts'],
   },
   'usual coat': {
     text: 'A new wall starts as most log-look siding is: oil semitransparent stain on smooth wood, acrylic latex in the joints',
     because: 'A start that the owner corrects; nobody counted.',
     where: ['components/home/coat-fields.tsx'],
+  },
+  'data kept': {
+    text: 'A removed home can be brought back for 30 days; of the daily backups the last of 7 days, 4 weeks and 6 months is kept',
+    because: 'A mistake is noticed within a month; damage that creeps in is found by a backup from before it.',
+    where: ['db/queries/removed-homes.ts', 'lib/backup-rotation.ts'],
   },
 } satisfies OurRules;

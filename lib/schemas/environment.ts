@@ -16,6 +16,7 @@ export const environmentSchema = z.object({
   MAIL_PER_RUN: wholeNumber(2000, 1_000_000),
   MAIL_PER_SECOND: wholeNumber(20, 10_000),
   MAILBOX_DIR: optionalText,
+  BACKUP_DIR: z.string().trim().min(1).default('data/backups'),
 });
 
 export type Environment = z.infer<typeof environmentSchema>;

@@ -12,6 +12,9 @@ const words: Record<string, string> = {
   refused: 'refused',
   cancelled: 'not needed any more',
   heldUp: 'held up by the mail server',
+  backups: 'backup made and checked',
+  removed: 'older backups removed',
+  purged: 'removed homes deleted for good',
 };
 
 function outcomeOf(run: JobRun): string {

@@ -1,0 +1,51 @@
+import { copyFileSync, existsSync, renameSync, rmSync } from 'node:fs';
+import path from 'node:path';
+import { faultOfDatabase, isInUse } from '@/db/database-file';
+import { migrateDatabase } from '@/db/migrate';
+import { backupName } from './backup';
+import { environment } from './environment';
+
+/** Moves the database out of the way, with what belongs to it; returns where it is now. */
+function setAside(file: string, now: Date): string | null {
+  if (!existsSync(file)) return null;
+  const aside = path.join(path.dirname(file), `before-restore-${backupName(now)}`);
+  for (const ending of ['', '-wal', '-shm']) if (existsSync(`${file}${ending}`)) renameSync(`${file}${ending}`, `${aside}${ending}`);
+  return aside;
+}
+
+/**
+ * Puts a backup in the place of the database and brings it to the newest schema. Refuses a backup that is not sound, and, unless
+ * forced, a database that somebody has open. What was there before is kept beside it. Throws with what to do.
+ */
+export async function restoreDatabase(backup: string, file: string, now: Date, force = false): Promise<{ keptAt: string | null }> {
+  const fault = faultOfDatabase(backup);
+  if (fault) throw new Error(`${backup} was not restored. ${fault}`);
+  if (!force && isInUse(file)) throw new Error('The database is in use. Stop the application and the scheduler first, or add --force.');
+  const part = `${file}.part`;
+  try {
+    copyFileSync(backup, part);
+    const keptAt = setAside(file, now);
+    renameSync(part, file);
+    await migrateDatabase(file);
+    const after = faultOfDatabase(file);
+    if (after) throw new Error(`The restored database is not sound. ${after}`);
+    return { keptAt };
+  } finally {
+    rmSync(part, { force: true });
+  }
+}
+
+async function main() {
+  const backup = process.argv.slice(2).find((word) => !word.startsWith('--'));
+  if (!backup) throw new Error('Which backup? npm run job:restore -- data/backups/eavewright-….db');
+  const file = path.resolve(environment().DATABASE_FILE);
+  const { keptAt } = await restoreDatabase(path.resolve(backup), file, new Date(), process.argv.includes('--force'));
+  console.log(`Restored ${backup} to ${file}, migrated and checked.${keptAt ? ` What was there before is at ${keptAt}.` : ''}`);
+}
+
+if (process.argv[1]?.endsWith('jobs/restore.ts')) {
+  main().catch((error: unknown) => {
+    console.error(error instanceof Error ? error.message : error);
+    process.exit(1);
+  });
+}
