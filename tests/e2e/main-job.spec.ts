@@ -86,10 +86,17 @@ test('from registering to a reminder in the mailbox, a logged coat and a changed
     await signOut(page);
   });
 
-  await test.step('the owner logs a restain from the mail; the plan changes at once', async () => {
+  await test.step('the owner logs one wall straight from the mail, without signing in', async () => {
+    await page.goto(linkIn(await waitForMail(email, /Saguaro House/), 'do/'));
+    await expectSound(page);
+    await expect(page.getByRole('heading', { level: 1 })).toHaveText(/^Log the \w+ of .* as done\?$/);
+    await page.getByRole('button', { name: 'Log it' }).click();
+    await expect(page.getByText(/^Logged\. To take it back/)).toBeVisible();
+  });
+
+  await test.step('the owner logs the restain of every wall; the plan changes at once', async () => {
     await signIn(page, email, password);
-    const reminder = await waitForMail(email, /Saguaro House/);
-    await page.goto(linkIn(reminder, 'homes/[\\w-]+/log'));
+    await page.goto(`${homePath}/log?kind=restain`);
     await expectSound(page);
     await expect(page.getByRole('radio', { name: /Restain/ })).toBeChecked();
     await page.getByRole('button', { name: 'Choose all walls' }).click();
