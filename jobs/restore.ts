@@ -5,17 +5,30 @@ import { migrateDatabase } from '@/db/migrate';
 import { backupName } from './backup';
 import { environment } from './environment';
 
-/** Moves the database out of the way, with what belongs to it; returns where it is now. */
+/** A database and the files that SQLite keeps beside it. */
+const endings = ['', '-wal', '-shm'];
+
+function move(from: string, to: string): void {
+  for (const ending of endings) if (existsSync(`${from}${ending}`)) renameSync(`${from}${ending}`, `${to}${ending}`);
+}
+
+/** Moves the database out of the way; returns where it is now. */
 function setAside(file: string, now: Date): string | null {
   if (!existsSync(file)) return null;
   const aside = path.join(path.dirname(file), `before-restore-${backupName(now)}`);
-  for (const ending of ['', '-wal', '-shm']) if (existsSync(`${file}${ending}`)) renameSync(`${file}${ending}`, `${aside}${ending}`);
+  move(file, aside);
   return aside;
+}
+
+function putBack(keptAt: string | null, file: string): void {
+  for (const ending of endings) rmSync(`${file}${ending}`, { force: true });
+  if (keptAt) move(keptAt, file);
 }
 
 /**
  * Puts a backup in the place of the database and brings it to the newest schema. Refuses a backup that is not sound, and, unless
- * forced, a database that somebody has open. What was there before is kept beside it. Throws with what to do.
+ * forced, a database that somebody has open. What was there before is kept beside it, and is put back when the restored one cannot be
+ * brought to the newest schema. Throws with what to do.
  */
 export async function restoreDatabase(backup: string, file: string, now: Date, force = false): Promise<{ keptAt: string | null }> {
   const fault = faultOfDatabase(backup);
@@ -25,10 +38,15 @@ export async function restoreDatabase(backup: string, file: string, now: Date, f
   try {
     copyFileSync(backup, part);
     const keptAt = setAside(file, now);
-    renameSync(part, file);
-    await migrateDatabase(file);
-    const after = faultOfDatabase(file);
-    if (after) throw new Error(`The restored database is not sound. ${after}`);
+    try {
+      renameSync(part, file);
+      await migrateDatabase(file);
+      const after = faultOfDatabase(file);
+      if (after) throw new Error(`The restored database is not sound. ${after}`);
+    } catch (error) {
+      putBack(keptAt, file);
+      throw new Error(`${backup} was not restored; what was there before is back in place. ${error instanceof Error ? error.message : String(error)}`, { cause: error });
+    }
     return { keptAt };
   } finally {
     rmSync(part, { force: true });

@@ -45,8 +45,8 @@ async function main() {
       deliver: () => deliverDue(new Date()),
       remind: async () => console.log(inWords(await runReminders(new Date()))),
       keep: async () => {
-        const { file } = await runBackup(new Date());
-        console.log(`Backup: ${file}. Purge: ${runPurge(new Date())} homes.`);
+        console.log(`Purge: ${runPurge(new Date())} homes.`);
+        console.log(`Backup: ${(await runBackup(new Date())).file}`);
       },
     },
     stop.signal,

@@ -76,7 +76,7 @@ describe('a backup', () => {
     expect(removed).toBeGreaterThan(0);
   });
 
-  it('that cannot be written says so in its row and leaves no half file', async () => {
+  it('that cannot be written leaves no half file', async () => {
     writeFileSync(path.join(folder, 'taken'), 'a file where the folder should be');
     await expect(backupDatabase(now, fresh.file(), path.join(folder, 'taken'))).rejects.toThrow(/EEXIST|ENOTDIR/);
     expect(readdirSync(folder)).toEqual(['taken']);
@@ -102,6 +102,17 @@ describe('restoring', () => {
     expect(homesIn(fresh.file())).toEqual(['Before']);
     expect(keptAt && homesIn(keptAt)).toEqual(['Before', 'Lost since']);
     expect(database().select().from(home).all()).toHaveLength(1);
+  });
+
+  it('puts back what was there when the backup cannot be brought to the newest schema', async () => {
+    const { file } = await backupDatabase(now, fresh.file(), folder);
+    const forgetful = new Sqlite(file);
+    forgetful.exec('delete from __drizzle_migrations');
+    forgetful.close();
+    insertHome({ name: 'Standing' });
+    closeDatabase();
+    await expect(restoreDatabase(file, fresh.file(), now)).rejects.toThrow(/back in place/);
+    expect(homesIn(fresh.file())).toEqual(['Standing']);
   });
 
   it('refuses a damaged or a foreign file, and a database that somebody has open', async () => {
