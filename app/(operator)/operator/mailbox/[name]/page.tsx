@@ -27,14 +27,14 @@ export default async function MessagePage({ params }: { params: Promise<{ name: 
         </Course>
       ) : null}
       <Course heading="As plain text">
-        <pre className="max-w-prose overflow-x-auto text-sm whitespace-pre-wrap">{message.text}</pre>
+        <pre className="max-w-prose text-sm whitespace-pre-wrap wrap-anywhere">{message.text}</pre>
       </Course>
       <Course heading="Headers" tone="quiet">
-        <dl className="grid gap-x-6 gap-y-1 text-sm sm:grid-cols-[12rem_minmax(0,1fr)]">
+        <dl className="grid grid-cols-[minmax(0,1fr)] gap-x-6 gap-y-1 text-sm sm:grid-cols-[12rem_minmax(0,1fr)]">
           {message.headers.map(({ name, value }, i) => (
             <div key={i} className="contents">
               <dt className="font-semibold">{name}</dt>
-              <dd className="break-words">{value}</dd>
+              <dd className="wrap-anywhere">{value}</dd>
             </div>
           ))}
         </dl>
